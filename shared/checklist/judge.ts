@@ -1,0 +1,48 @@
+import { unreachable } from '../failures/unreachable';
+import type { SequenceFacts } from './facts';
+import { refusedJudgement, type Judgement } from './judgement';
+import { chooseRules } from './kinds/choose';
+import { confirmRules } from './kinds/confirm';
+import { noteRules } from './kinds/note';
+import { overrideRules } from './kinds/override';
+import { photoRules } from './kinds/photo';
+import { readingRules } from './kinds/reading';
+import { signatureRules } from './kinds/signature';
+import { superheatRules } from './kinds/superheat';
+import type { Answer, Step } from './step';
+
+/** Raised by one whenever a change makes an old answer come out otherwise; stored with every judgement. */
+export const JUDGING_VERSION = 1;
+
+/**
+ * Judges one answer against its step, on the phone while typing and on the server when the entry arrives.
+ *
+ * @param answer what was recorded; of another kind than the step's it is kept, but doesn't count
+ * @returns the outcome with its figures and working; never throws for anything a person can type
+ */
+export function judge(step: Step, answer: Answer, facts: SequenceFacts): Judgement {
+  switch (step.kind) {
+    case 'confirm':
+      return answer.kind === step.kind ? confirmRules.judge(step, answer, facts) : mismatch();
+    case 'choose':
+      return answer.kind === step.kind ? chooseRules.judge(step, answer, facts) : mismatch();
+    case 'reading':
+      return answer.kind === step.kind ? readingRules.judge(step, answer, facts) : mismatch();
+    case 'superheat':
+      return answer.kind === step.kind ? superheatRules.judge(step, answer, facts) : mismatch();
+    case 'photo':
+      return answer.kind === step.kind ? photoRules.judge(step, answer, facts) : mismatch();
+    case 'note':
+      return answer.kind === step.kind ? noteRules.judge(step, answer, facts) : mismatch();
+    case 'override':
+      return answer.kind === step.kind ? overrideRules.judge(step, answer, facts) : mismatch();
+    case 'signature':
+      return answer.kind === step.kind ? signatureRules.judge(step, answer, facts) : mismatch();
+    default:
+      return unreachable(step);
+  }
+}
+
+function mismatch(): Judgement {
+  return refusedJudgement('wrongAnswerKind');
+}

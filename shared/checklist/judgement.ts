@@ -1,0 +1,90 @@
+import * as z from 'zod/mini';
+import { UNITS, type UnitId } from '../units/unit';
+
+const UNIT_IDS = Object.keys(UNITS) as [UnitId, ...UnitId[]];
+
+export const OUTCOMES = ['within', 'outside', 'recorded', 'notApplicable'] as const;
+export type Outcome = (typeof OUTCOMES)[number];
+
+/**
+ * Why an answer doesn't count, or what deserves a second look. `refuse` keeps the step open (the entry itself is kept
+ * all the same); `ask` is shown to whoever recorded it and to the lead.
+ */
+export const DOUBT_KINDS = [
+  'empty',
+  'notANumber',
+  'ambiguous',
+  'notFinite',
+  'wrongUnit',
+  'belowAbsoluteZero',
+  'deeperThanVacuum',
+  'aboveCritical',
+  'aboveTable',
+  'belowTable',
+  'notPlausible',
+  'swapped',
+  'celsiusInFahrenheit',
+  'fahrenheitInCelsius',
+  'liquidRisk',
+  'unknownOption',
+  'tooFewPhotos',
+  'wrongAnswerKind',
+  'unknownRefrigerant',
+  'notNegatable',
+  'lowAboveHigh',
+  'emptySignature',
+  'unknownStep',
+] as const;
+export type DoubtKind = (typeof DOUBT_KINDS)[number];
+export const doubtSchema = z.object({ kind: z.enum(DOUBT_KINDS), severity: z.enum(['refuse', 'ask']) });
+export type Doubt = z.infer<typeof doubtSchema>;
+
+export const workingSchema = z.object({
+  formula: z.string(),
+  source: z.string(),
+  lines: z.array(z.object({ label: z.string(), value: z.number(), unit: z.enum(UNIT_IDS) })),
+});
+
+/** A figure of a judgement, in SI, with the unit that says what it is. */
+export const figureSchema = z.object({ label: z.string(), value: z.number(), unit: z.enum(UNIT_IDS) });
+export type Figure = z.infer<typeof figureSchema>;
+
+/** The limits that applied on the day, kept with the judgement whatever becomes of the specification. */
+export const appliedLimitSchema = z.object({
+  low: z.nullable(z.number()),
+  high: z.nullable(z.number()),
+  unit: z.enum(UNIT_IDS),
+  source: z.string(),
+});
+export type AppliedLimit = z.infer<typeof appliedLimitSchema>;
+
+export const judgementSchema = z.object({
+  outcome: z.enum(OUTCOMES),
+  /** On which side of its limits an `outside` lies; `null` where there is no side. */
+  side: z.nullable(z.enum(['low', 'high'])),
+  /** Whether the answer satisfies its step. An outside answer does: it is a true record, and the lead sees it first. */
+  counts: z.boolean(),
+  doubts: z.array(doubtSchema),
+  figures: z.array(figureSchema),
+  limit: z.nullable(appliedLimitSchema),
+  working: z.array(workingSchema),
+});
+export type Judgement = z.infer<typeof judgementSchema>;
+
+/** A judgement with nothing to say beyond its outcome. */
+export function plainJudgement(outcome: Outcome, doubts: readonly Doubt[] = []): Judgement {
+  return {
+    outcome,
+    side: null,
+    counts: doubts.every((doubt) => doubt.severity !== 'refuse'),
+    doubts: [...doubts],
+    figures: [],
+    limit: null,
+    working: [],
+  };
+}
+
+/** The judgement of an answer that can't be used, for the one reason given. The entry is kept, the step stays open. */
+export function refusedJudgement(kind: DoubtKind): Judgement {
+  return plainJudgement('recorded', [{ kind, severity: 'refuse' }]);
+}

@@ -1,0 +1,41 @@
+import * as z from 'zod/mini';
+import { OUTCOMES } from '../checklist/judgement';
+import { deviceIdSchema, entryIdSchema, personIdSchema, sha256Schema } from '../plant/ids';
+import { restsOnSchema } from './entry';
+import { SEQUENCE_STATES } from './transitions';
+
+/** Where one step stands: the entry that counts now, or the last that didn't. */
+export const stepFoldSchema = z.object({
+  entryId: entryIdSchema,
+  outcome: z.enum(OUTCOMES),
+  counts: z.boolean(),
+  /** An override that was set and not yet put back. */
+  overrideStanding: z.boolean(),
+  /** Somebody answered without having seen an earlier answer: both are kept, the later counts, people are told. */
+  answeredTwice: z.boolean(),
+  /** The review entry that asked for this step again, until it is answered anew. */
+  reopenedBy: z.nullable(entryIdSchema),
+});
+export type StepFold = z.infer<typeof stepFoldSchema>;
+
+/** Which of a device's entries on this sequence have arrived: all up to `upTo`, and those in `beyond`. */
+const arrivedSchema = z.object({ upTo: z.int(), beyond: z.array(z.int()) });
+
+/** The whole state of a sequence, small enough to stand in its row and be carried forward entry by entry. */
+export const foldStateSchema = z.object({
+  state: z.enum(SEQUENCE_STATES),
+  /** 1 until the first review, one more with each. */
+  round: z.int(),
+  headHash: sha256Schema,
+  headPosition: z.int(),
+  stepListHash: z.nullable(sha256Schema),
+  steps: z.record(z.string(), stepFoldSchema),
+  arrived: z.record(deviceIdSchema, arrivedSchema),
+  pending: z.nullable(z.object({ entryId: entryIdSchema, restsOn: z.array(restsOnSchema) })),
+  /** Whoever recorded evidence: none of them may approve. */
+  recorders: z.array(personIdSchema),
+  approvedHead: z.nullable(sha256Schema),
+  lateCount: z.int(),
+  heldCount: z.int(),
+});
+export type FoldState = z.infer<typeof foldStateSchema>;

@@ -1,0 +1,160 @@
+import type { Step } from '../checklist/step';
+import { unreachable } from '../failures/unreachable';
+import { CHAIN_START } from './chain';
+import type { EntryBody, EntryContent, RestsOn, ServerPart } from './entry';
+import type { FoldState, StepFold } from './fold-state';
+import { transitionFor } from './transitions';
+
+/** What the fold needs of an entry. One that isn't on the server yet has position 0 and no hash. */
+export interface FoldEntry {
+  readonly body: EntryBody;
+  readonly server: Pick<ServerPart, 'position' | 'standing' | 'judgement'>;
+  readonly hash: string | null;
+}
+
+/** The state of a sequence before its first entry. */
+export function emptyFold(): FoldState {
+  return {
+    state: 'open',
+    round: 1,
+    headHash: CHAIN_START,
+    headPosition: 0,
+    stepListHash: null,
+    steps: {},
+    arrived: {},
+    pending: null,
+    recorders: [],
+    approvedHead: null,
+    lateCount: 0,
+    heldCount: 0,
+  };
+}
+
+/**
+ * Carries a sequence's state forward by one entry: the same reducer on the phone (over what it has, sent or not) and on
+ * the server (one entry at a time, under the row's lock).
+ *
+ * @param steps the steps asked for now; a submission is measured against them
+ * @returns a new state; the given one is not changed
+ */
+export function applyEntry(before: FoldState, entry: FoldEntry, steps: readonly Step[]): FoldState {
+  const state: FoldState = { ...before };
+  if (entry.hash !== null) {
+    state.headHash = entry.hash;
+    state.headPosition = entry.server.position;
+  }
+  markArrived(state, entry.body);
+  if (entry.server.standing === 'late') return { ...state, lateCount: state.lateCount + 1 };
+  if (entry.server.standing === 'held') return { ...state, heldCount: state.heldCount + 1 };
+  applyContent(state, entry, entry.body.content);
+  settlePending(state, steps);
+  return state;
+}
+
+/** Folds a whole history, in order of position, unsent entries last. */
+export function foldEntries(entries: readonly FoldEntry[], steps: readonly Step[]): FoldState {
+  return entries.reduce((state, entry) => applyEntry(state, entry, steps), emptyFold());
+}
+
+/** The required steps that a submission would still lack, in working order; a standing override is one of them. */
+export function missingSteps(state: FoldState, steps: readonly Step[]): readonly Step[] {
+  return steps.filter((step) => {
+    const fold = state.steps[step.key];
+    if (fold?.overrideStanding) return true;
+    return step.required && (!fold || !fold.counts || fold.reopenedBy !== null);
+  });
+}
+
+function applyContent(state: FoldState, entry: FoldEntry, content: EntryContent): void {
+  switch (content.kind) {
+    case 'answer':
+      applyAnswer(state, entry, content);
+      return;
+    case 'notApplicable':
+      setStep(state, content.stepKey, entry, { outcome: 'notApplicable', counts: true, overrideStanding: false });
+      return;
+    case 'submission':
+      state.pending = { entryId: entry.body.id, restsOn: content.restsOn };
+      return;
+    case 'expansion':
+      state.stepListHash = content.stepListHash;
+      return;
+    case 'review':
+      applyReview(state, entry, content);
+      return;
+    default:
+      unreachable(content);
+  }
+}
+
+function applyAnswer(state: FoldState, entry: FoldEntry, content: Extract<EntryContent, { kind: 'answer' }>): void {
+  const judged = entry.server.judgement ?? content.workedOut;
+  const standing = content.answer.kind === 'override' && content.answer.phase === 'set';
+  setStep(state, content.stepKey, entry, {
+    outcome: judged.outcome,
+    counts: judged.counts,
+    overrideStanding: standing,
+  });
+}
+
+function setStep(
+  state: FoldState,
+  key: string,
+  entry: FoldEntry,
+  result: Pick<StepFold, 'outcome' | 'counts' | 'overrideStanding'>,
+): void {
+  const { id, supersedes, authorId } = entry.body;
+  const known = state.steps[key];
+  state.steps = {
+    ...state.steps,
+    [key]: {
+      entryId: id,
+      ...result,
+      answeredTwice: known !== undefined && supersedes !== known.entryId,
+      reopenedBy: result.counts ? null : (known?.reopenedBy ?? null),
+    },
+  };
+  if (!state.recorders.includes(authorId)) state.recorders = [...state.recorders, authorId];
+}
+
+function applyReview(state: FoldState, entry: FoldEntry, content: Extract<EntryContent, { kind: 'review' }>): void {
+  const move = transitionFor(state.state, content.verdict);
+  if (!move) return;
+  state.state = move.to;
+  state.round += 1;
+  state.pending = null;
+  state.approvedHead = content.verdict === 'approved' ? content.headHash : null;
+  if (content.verdict !== 'sentBack') return;
+  state.steps = { ...state.steps };
+  for (const remark of content.remarks) {
+    const fold = state.steps[remark.stepKey];
+    if (fold) state.steps[remark.stepKey] = { ...fold, reopenedBy: entry.body.id };
+  }
+}
+
+function markArrived(state: FoldState, body: EntryBody): void {
+  if (body.deviceId === null) return;
+  const known = state.arrived[body.deviceId] ?? { upTo: 0, beyond: [] };
+  if (body.countOnSequence <= known.upTo || known.beyond.includes(body.countOnSequence)) return;
+  const beyond = [...known.beyond, body.countOnSequence].sort((a, b) => a - b);
+  let upTo = known.upTo;
+  while (beyond[0] === upTo + 1) {
+    upTo += 1;
+    beyond.shift();
+  }
+  state.arrived = { ...state.arrived, [body.deviceId]: { upTo, beyond } };
+}
+
+/** Whether all that a submission rests on has arrived. */
+export function hasArrived(state: FoldState, restsOn: readonly RestsOn[]): boolean {
+  return restsOn.every((rest) => (state.arrived[rest.deviceId]?.upTo ?? 0) >= rest.count);
+}
+
+/** A submission takes effect as soon as all it rests on is there and nothing is missing; until then it waits. */
+function settlePending(state: FoldState, steps: readonly Step[]): void {
+  if (!state.pending || !hasArrived(state, state.pending.restsOn)) return;
+  const move = transitionFor(state.state, 'submission');
+  if (!move || missingSteps(state, steps).length > 0) return;
+  state.state = move.to;
+  state.pending = null;
+}

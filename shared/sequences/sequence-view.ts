@@ -1,0 +1,68 @@
+import type { Step, StepList } from '../checklist/step';
+import type { FoldEntry } from './fold';
+import { foldEntries, missingSteps } from './fold';
+import type { Remark } from './entry';
+import type { FoldState, StepFold } from './fold-state';
+
+/** One step with all that was ever recorded on it, oldest first. */
+export interface StepView {
+  readonly step: Step;
+  readonly fold: StepFold | null;
+  readonly history: readonly FoldEntry[];
+  readonly current: FoldEntry | null;
+  /** The lead's remark that reopened it; `null` when it isn't asked again. */
+  readonly remark: (Remark & { readonly entry: FoldEntry }) | null;
+}
+
+export interface SequenceView {
+  readonly fold: FoldState;
+  readonly steps: readonly StepView[];
+  readonly missing: readonly Step[];
+  readonly doneCount: number;
+  readonly outsideCount: number;
+  /** Entries on steps that the template no longer asks for: kept and shown, never dropped. */
+  readonly noLongerAsked: readonly FoldEntry[];
+  readonly late: readonly FoldEntry[];
+  readonly reviews: readonly FoldEntry[];
+}
+
+/** Whether a step needs nothing more: answered so that it counts, no override standing, not asked again. */
+export function isDone(fold: StepFold | null | undefined): boolean {
+  return !!fold && fold.counts && !fold.overrideStanding && fold.reopenedBy === null;
+}
+
+/** Everything that a screen or the package shows of one sequence, from its entries in order of position. */
+export function viewSequence(stepList: StepList, entries: readonly FoldEntry[]): SequenceView {
+  const fold = foldEntries(entries, stepList.steps);
+  const byKey = new Map<string, FoldEntry[]>();
+  for (const entry of entries) {
+    const { content } = entry.body;
+    if ((content.kind === 'answer' || content.kind === 'notApplicable') && entry.server.standing === 'inOrder') {
+      byKey.set(content.stepKey, [...(byKey.get(content.stepKey) ?? []), entry]);
+    }
+  }
+  const byId = new Map(entries.map((entry) => [entry.body.id, entry]));
+  const steps = stepList.steps.map((step): StepView => {
+    const stepFold = fold.steps[step.key] ?? null;
+    const history = byKey.get(step.key) ?? [];
+    const reopening = stepFold?.reopenedBy ? byId.get(stepFold.reopenedBy) : undefined;
+    return { step, fold: stepFold, history, current: history.at(-1) ?? null, remark: remarkOn(step.key, reopening) };
+  });
+  const asked = new Set(stepList.steps.map((step) => step.key));
+  return {
+    fold,
+    steps,
+    missing: missingSteps(fold, stepList.steps),
+    doneCount: steps.filter((view) => isDone(view.fold)).length,
+    outsideCount: steps.filter((view) => view.fold?.outcome === 'outside').length,
+    noLongerAsked: [...byKey].filter(([key]) => !asked.has(key)).flatMap(([, list]) => list),
+    late: entries.filter((entry) => entry.server.standing === 'late'),
+    reviews: entries.filter((entry) => entry.body.content.kind === 'review'),
+  };
+}
+
+function remarkOn(stepKey: string, entry: FoldEntry | undefined): StepView['remark'] {
+  if (entry?.body.content.kind !== 'review') return null;
+  const remark = entry.body.content.remarks.find((candidate) => candidate.stepKey === stepKey);
+  return remark ? { ...remark, entry } : null;
+}
