@@ -1,0 +1,9 @@
+declare module 'express-mysql-session' {
+  import type session from 'express-session';
+
+  /** The library ships no types; this is the part of it in use. */
+  function makeStore(
+    sessionModule: typeof session,
+  ): new (options: Record<string, unknown>, connection: unknown) => session.Store;
+  export default makeStore;
+}

@@ -1,0 +1,98 @@
+import { uuidv7 } from 'uuidv7';
+import { managerOf, type Context } from '../database/transactions';
+import { JobEntity } from './job.entity';
+import { JOB_RULES, type JobKind, type JobPayloads } from './job-kinds';
+
+export interface ClaimedJob {
+  readonly id: string;
+  readonly companyId: string;
+  readonly kind: JobKind;
+  readonly payload: unknown;
+  readonly attempts: number;
+}
+
+export class JobsRepository {
+  /** Writes a job in the transaction that causes it. The same key twice is one job. */
+  async insert<K extends JobKind>(
+    context: Context,
+    companyId: string,
+    kind: K,
+    uniqueKey: string,
+    payload: JobPayloads[K],
+  ): Promise<void> {
+    await managerOf(context).query(
+      `INSERT INTO job (id, company_id, kind, unique_key, payload, state, attempts, progress, created_at, run_after)
+       VALUES (?, ?, ?, ?, ?, 'waiting', 0, 0, UTC_TIMESTAMP(3), UTC_TIMESTAMP(3))
+       ON DUPLICATE KEY UPDATE id = id`,
+      [uuidv7(), companyId, kind, uniqueKey, JSON.stringify(payload)],
+    );
+  }
+
+  /**
+   * Claims the next due job: one that waits, or one whose worker has gone silent. Other workers' rows are skipped, not
+   * waited for; the claim is committed before the work begins.
+   */
+  async claim(context: Context): Promise<ClaimedJob | null> {
+    const manager = managerOf(context);
+    const rows: { id: string; company_id: string; kind: JobKind; payload: string; attempts: number }[] =
+      await manager.query(
+        `SELECT id, company_id, kind, payload, attempts FROM job
+          WHERE (state = 'waiting' AND run_after <= UTC_TIMESTAMP(3))
+             OR (state = 'running' AND lease_until < UTC_TIMESTAMP(3))
+          ORDER BY run_after LIMIT 1 FOR UPDATE SKIP LOCKED`,
+      );
+    const row = rows[0];
+    if (!row) return null;
+    await manager.query(
+      `UPDATE job SET state = 'running', attempts = attempts + 1,
+              lease_until = UTC_TIMESTAMP(3) + INTERVAL ? SECOND WHERE id = ?`,
+      [JOB_RULES[row.kind].leaseS, row.id],
+    );
+    return {
+      id: row.id,
+      companyId: row.company_id,
+      kind: row.kind,
+      payload: JSON.parse(row.payload),
+      attempts: row.attempts + 1,
+    };
+  }
+
+  /** Says that the worker is alive and how far it is. */
+  async renew(context: Context, id: string, kind: JobKind, progress: number): Promise<void> {
+    await managerOf(context).query(
+      `UPDATE job SET progress = ?, lease_until = UTC_TIMESTAMP(3) + INTERVAL ? SECOND WHERE id = ? AND state = 'running'`,
+      [progress, JOB_RULES[kind].leaseS, id],
+    );
+  }
+
+  async finish(context: Context, id: string): Promise<void> {
+    await managerOf(context).update(JobEntity, { id }, { state: 'done', progress: 1, leaseUntil: null, lastError: null });
+  }
+
+  /** Puts a job that failed back for later, or gives it up. */
+  async fail(context: Context, id: string, error: string, retryAfterS: number | null): Promise<void> {
+    await managerOf(context).query(
+      `UPDATE job SET state = ?, lease_until = NULL, last_error = ?,
+              run_after = UTC_TIMESTAMP(3) + INTERVAL ? SECOND WHERE id = ?`,
+      [retryAfterS === null ? 'failed' : 'waiting', error.slice(0, 1000), retryAfterS ?? 0, id],
+    );
+  }
+
+  /** Newest first. */
+  async list(context: Context, companyId: string, limit: number, before: Date | null): Promise<JobEntity[]> {
+    const query = managerOf(context)
+      .createQueryBuilder(JobEntity, 'job')
+      .where('job.companyId = :companyId', { companyId })
+      .orderBy('job.createdAt', 'DESC')
+      .take(limit);
+    if (before) query.andWhere('job.createdAt < :before', { before });
+    return query.getMany();
+  }
+
+  /** Done jobs older than 14 days go: what they did is recorded elsewhere. */
+  async sweep(context: Context): Promise<void> {
+    await managerOf(context).query(
+      `DELETE FROM job WHERE state = 'done' AND created_at < UTC_TIMESTAMP(3) - INTERVAL 14 DAY LIMIT 1000`,
+    );
+  }
+}

@@ -1,0 +1,45 @@
+import type { Language, Text } from '#shared/checklist/text';
+import type { SequenceId } from '#shared/plant/ids';
+import { PAGE } from '../../pdf/page-geometry';
+import type { Sheet } from '../../pdf/sheet';
+import type { DocumentFormat } from './document-format';
+import type { DocumentWords } from './document-words';
+import type { PackageContent } from './package-content';
+
+/** What every part of the document draws with. */
+export interface DocumentContext {
+  readonly sheet: Sheet;
+  readonly words: DocumentWords;
+  readonly format: DocumentFormat;
+  readonly language: Language;
+  readonly content: PackageContent;
+  /** Page of each chapter as the measuring pass found it; empty during that pass. */
+  readonly knownPages: ReadonlyMap<string, number>;
+  /** Page of each chapter as this pass finds it. */
+  readonly foundPages: Map<string, number>;
+  /** The bytes, `null` when there are none to show, `'skip'` while measuring. */
+  readonly loadPhoto: (sequenceId: SequenceId, sha256: string) => Promise<Buffer | null | 'skip'>;
+}
+
+/** A template's words in the document's language; the other one where a translation is empty. */
+export function say(context: DocumentContext, text: Text): string {
+  const other = context.language === 'en' ? text.es : text.en;
+  return text[context.language].trim() === '' ? other : text[context.language];
+}
+
+/** Notes that a chapter begins on this page: for the contents, for links and for the outline. */
+export function beginChapter(
+  context: DocumentContext,
+  key: string,
+  title: string,
+  outline: PDFKit.PDFOutline = context.sheet.doc.outline,
+): PDFKit.PDFOutline {
+  const { sheet, foundPages } = context;
+  foundPages.set(key, sheet.page);
+  sheet.doc.addNamedDestination(key, 'XYZ', PAGE.left, PAGE.top - 20, 0);
+  return outline.addItem(title);
+}
+
+export const SUMMARY_KEY = 'summary';
+export const HASHES_KEY = 'hashes';
+export const circuitKey = (sequenceId: SequenceId): string => `circuit-${sequenceId}`;

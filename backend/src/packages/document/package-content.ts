@@ -1,0 +1,60 @@
+import type { Language } from '#shared/checklist/text';
+import type { Joint } from '#shared/contracts/openings';
+import type { SequenceDetail } from '#shared/contracts/sequences';
+import type { PackageId, SequenceId } from '#shared/plant/ids';
+
+/** A circuit that has a sequence, and with it a chapter of its own. */
+export interface PackageCircuitRef {
+  readonly sequenceId: SequenceId;
+  readonly code: string;
+  readonly description: string;
+  readonly systemName: string;
+  readonly state: Joint['state'];
+}
+
+export interface SummaryCircuit {
+  readonly code: string;
+  readonly description: string;
+  readonly area: string;
+  readonly state: Joint['state'];
+}
+
+export interface SummarySystem {
+  readonly name: string;
+  readonly refrigerant: string;
+  readonly circuits: readonly SummaryCircuit[];
+}
+
+/** All that a handover package's document says, and where it gets what is too much to hold at once. */
+export interface PackageContent {
+  readonly opening: {
+    readonly name: string;
+    readonly address: string;
+    /** ISO date. */
+    readonly openingDate: string;
+    /** IANA name; every time in the document is written in it. */
+    readonly timeZone: string;
+    readonly elevationM: number;
+    readonly unitSystem: 'us' | 'si';
+    readonly contractorName: string;
+    readonly companyName: string;
+  };
+  readonly package: {
+    readonly id: PackageId;
+    readonly version: number;
+    readonly language: Language;
+    /** ISO date and time. */
+    readonly createdAt: string;
+    readonly createdByName: string;
+  };
+  /** SHA-256 of the installation's public key, in lower-case hexadecimal. */
+  readonly installation: { readonly fingerprint: string };
+  /** Every circuit of the opening, with or without a sequence: what isn't complete is counted on these. */
+  readonly summary: { readonly systems: readonly SummarySystem[] };
+  /** In the order of the chapters. */
+  readonly circuits: readonly PackageCircuitRef[];
+  /** Called once in each of the two passes. */
+  loadCircuit(sequenceId: SequenceId): Promise<SequenceDetail>;
+  /** A JPEG of at most 1200 px; `null` when it isn't there or is broken, which the document says in its place. */
+  loadPhoto(sequenceId: SequenceId, sha256: string): Promise<Buffer | null>;
+}

@@ -1,0 +1,80 @@
+import { gap, kept, type Block } from '../../pdf/block';
+import { copperLine } from '../../pdf/copper-line';
+import { drawJoint, type JointState } from '../../pdf/joint';
+import { paragraph } from '../../pdf/paragraph';
+import { ruledTable } from '../../pdf/ruled-table';
+import { STYLES } from '../../pdf/text-style';
+import { countApproved } from './cover-page';
+import { beginChapter, SUMMARY_KEY, type DocumentContext } from './document-context';
+import type { SummarySystem } from './package-content';
+
+const ORDER = [
+  'approved',
+  'submitted',
+  'sentBack',
+  'underWay',
+  'open',
+  'noSequence',
+] as const satisfies readonly JointState[];
+
+/** Each system's copper line with its counts, then its circuits with their states. */
+export async function drawSummary(context: DocumentContext): Promise<void> {
+  const { sheet, content, words } = context;
+  sheet.newPage();
+  sheet.runningHead = words.summary;
+  sheet.openPart('Sect');
+  beginChapter(context, SUMMARY_KEY, words.summary);
+  await sheet.place([...paragraph(sheet, words.summary, STYLES.chapter, { tag: 'H1' }), gap(8)]);
+  if (content.summary.systems.length === 0)
+    await sheet.place(paragraph(sheet, words.cover.noCircuits, STYLES.body));
+  for (const system of content.summary.systems) await sheet.place(systemBlocks(context, system));
+  sheet.closePart();
+  sheet.runningHead = null;
+}
+
+function systemBlocks(context: DocumentContext, system: SummarySystem): Block[] {
+  const { sheet, words } = context;
+  const { approved, total } = countApproved(system.circuits);
+  const counts = ORDER.map((state) => ({
+    state,
+    count: system.circuits.filter((circuit) => circuit.state === state).length,
+  })).filter(({ count }) => count > 0);
+  const columns = [
+    { title: words.columns.circuit, share: 16, style: STYLES.mono },
+    { title: words.columns.description, share: 40 },
+    { title: words.columns.area, share: 22 },
+    { title: words.columns.state, share: 26 },
+  ];
+  const rows = system.circuits.map((circuit) => [
+    { text: circuit.code },
+    { text: circuit.description },
+    { text: circuit.area },
+    {
+      text: words.states[circuit.state],
+      mark: (page: typeof sheet, x: number, y: number) => drawJoint(page, x, y, 3.2, circuit.state),
+    },
+  ]);
+  const line = copperLine(system.circuits, words.lineAlt(system.name, approved, total));
+  return [
+    gap(14),
+    ...kept(
+      [
+        ...paragraph(sheet, `${system.name}, ${system.refrigerant}`, STYLES.section, { tag: 'H2' }),
+        ...paragraph(
+          sheet,
+          [
+            words.circuitCount(total),
+            ...counts.map(({ state, count }) => `${count} ${words.states[state].toLowerCase()}`),
+          ].join(' · '),
+          STYLES.small,
+        ),
+        gap(8),
+      ],
+      true,
+    ),
+    ...line,
+    gap(6),
+    ...(rows.length > 0 ? ruledTable(sheet, columns, rows, { hasRowHeads: true }) : []),
+    gap(10),
+  ];
+}

@@ -1,0 +1,13 @@
+import { defineRoute } from '../../http/define-route';
+import type { SessionDoor } from '../session-door';
+
+/** DELETE /session */
+export const signOut = (door: SessionDoor) =>
+  defineRoute({
+    method: 'delete',
+    path: '/session',
+    summary: 'Sign out of this browser',
+    access: { kind: 'self', reason: 'Everybody may leave.' },
+    response: 'nothing',
+    handle: ({ exchange }) => door.signOut(exchange.request, exchange.response),
+  });

@@ -1,0 +1,60 @@
+import { createHash } from 'node:crypto';
+import type { Pool } from 'mysql2';
+import { RateLimiterMySQL, RateLimiterRes } from 'rate-limiter-flexible';
+import { DomainFailure } from '#shared/failures/failure';
+
+const WINDOW_S = 900;
+
+/** Slows down guessing: per address of a person from one place, and per place. Kept in MariaDB for all servers. */
+export class SignInLimit {
+  private readonly perAccount: RateLimiterMySQL;
+  private readonly perPlace: RateLimiterMySQL;
+
+  /** @param pool a callback pool: the library refuses a promise pool */
+  constructor(pool: Pool, database: string) {
+    const shared = {
+      storeClient: pool,
+      storeType: 'pool',
+      dbName: database,
+      tableName: 'sign_in_limit',
+      tableCreated: true,
+      duration: WINDOW_S,
+      clearExpiredByTimeout: true,
+    };
+    this.perAccount = new RateLimiterMySQL({ ...shared, keyPrefix: 'account', points: 8 });
+    this.perPlace = new RateLimiterMySQL({ ...shared, keyPrefix: 'place', points: 60 });
+  }
+
+  /** @throws {DomainFailure} tooManyTries, with the seconds to wait */
+  async check(email: string, place: string): Promise<void> {
+    const states = await Promise.all([this.perAccount.get(accountKey(email, place)), this.perPlace.get(place)]);
+    const spent = states.find((state) => state !== null && state.remainingPoints <= 0);
+    if (spent) throw tooMany(spent);
+  }
+
+  async countFailure(email: string, place: string): Promise<void> {
+    await Promise.all([count(this.perAccount, accountKey(email, place)), count(this.perPlace, place)]);
+  }
+
+  async forget(email: string, place: string): Promise<void> {
+    await this.perAccount.delete(accountKey(email, place));
+  }
+}
+
+async function count(limiter: RateLimiterMySQL, key: string): Promise<void> {
+  try {
+    await limiter.consume(key);
+  } catch (error) {
+    // The library rejects with its result once the points are spent; the failure itself is answered by the caller.
+    if (!(error instanceof RateLimiterRes)) throw error;
+  }
+}
+
+function accountKey(email: string, place: string): string {
+  return createHash('sha256').update(`${email.trim().toLowerCase()}\n${place}`).digest('hex').slice(0, 40);
+}
+
+function tooMany(state: RateLimiterRes): DomainFailure {
+  const waitS = Math.ceil(state.msBeforeNext / 1000);
+  return new DomainFailure('tooManyTries', `Too many tries. Wait ${Math.ceil(waitS / 60)} minutes.`, [], { waitS });
+}

@@ -1,0 +1,134 @@
+import type { CircuitEntity } from '../plant/circuit.entity';
+import type { CoilEntity } from '../plant/coil.entity';
+import type { FixtureEntity } from '../plant/fixture.entity';
+import type { PlantRows } from '../plant/plant.repository';
+import type { SuctionGroupEntity } from '../plant/suction-group.entity';
+import type { SystemEntity } from '../plant/system.entity';
+import type { ParsedCircuit, ParsedFixture, ParsedSchedule } from './parsed-schedule';
+
+interface Owner {
+  readonly companyId: string;
+  readonly openingId: string;
+}
+
+interface Lists {
+  readonly systems: SystemEntity[];
+  readonly suctionGroups: SuctionGroupEntity[];
+  readonly circuits: CircuitEntity[];
+  readonly fixtures: FixtureEntity[];
+  readonly coils: CoilEntity[];
+}
+
+/**
+ * Lays a schedule over what stands already: things keep their ids by their names (systems and groups by name, circuits
+ * by code, fixtures by circuit and tag, coils by number), so that what was recorded stays where it belongs. What the
+ * schedule no longer has is marked removed, never deleted.
+ *
+ * @param newId makes an id
+ * @returns every row to write
+ */
+export function mergeSchedule(
+  owner: Owner,
+  schedule: ParsedSchedule,
+  known: PlantRows,
+  now: Date,
+  newId: () => string,
+): PlantRows {
+  const out: Lists = { systems: [], suctionGroups: [], circuits: [], fixtures: [], coils: [] };
+  const find = finders(known);
+  let circuitOrdinal = 0;
+  for (const [systemOrdinal, { suctionGroups, ...facts }] of schedule.systems.entries()) {
+    const system = { ...owner, id: find.system(facts.name)?.id ?? newId(), ...facts, ordinal: systemOrdinal, removedAt: null };
+    out.systems.push(system);
+    for (const [groupOrdinal, { circuits, ...groupFacts }] of suctionGroups.entries()) {
+      const id = find.suctionGroup(system.id, groupFacts.name)?.id ?? newId();
+      out.suctionGroups.push({ ...owner, id, systemId: system.id, ...groupFacts, ordinal: groupOrdinal, removedAt: null });
+      for (const circuit of circuits) {
+        addCircuit(out, owner, { ...circuit, suctionGroupId: id, ordinal: circuitOrdinal }, find, newId);
+        circuitOrdinal += 1;
+      }
+    }
+  }
+  return withRemoved(out, known, now);
+}
+
+function addCircuit(
+  out: Lists,
+  owner: Owner,
+  parsed: ParsedCircuit & { readonly suctionGroupId: string; readonly ordinal: number },
+  find: ReturnType<typeof finders>,
+  newId: () => string,
+): void {
+  const { fixtures, defrost, ...facts } = parsed;
+  const before = find.circuit(facts.code);
+  const id = before?.id ?? newId();
+  const row: CircuitEntity = {
+    ...owner,
+    id,
+    ...facts,
+    defrostType: defrost.type,
+    defrostPerDay: defrost.perDay,
+    defrostFailSafeS: defrost.failSafeS,
+    defrostTerminationTemperatureK: defrost.terminationTemperatureK,
+    defrostDripS: defrost.dripS,
+    assigneeId: before?.assigneeId ?? null,
+    revision: (before?.revision ?? 0) + 1,
+    removedAt: null,
+  };
+  out.circuits.push(row);
+  for (const [ordinal, fixture] of fixtures.entries()) addFixture(out, owner, id, fixture, ordinal, find, newId);
+}
+
+function addFixture(
+  out: Lists,
+  owner: Owner,
+  circuitId: string,
+  { coilCount, ...facts }: ParsedFixture,
+  ordinal: number,
+  find: ReturnType<typeof finders>,
+  newId: () => string,
+): void {
+  const id = find.fixture(circuitId, facts.tag)?.id ?? newId();
+  out.fixtures.push({ ...owner, id, circuitId, ...facts, ordinal, removedAt: null });
+  for (let number = 1; number <= coilCount; number += 1) {
+    out.coils.push({
+      ...owner,
+      id: find.coil(id, number)?.id ?? newId(),
+      circuitId,
+      fixtureId: id,
+      number,
+      removedAt: null,
+    });
+  }
+}
+
+function finders(known: PlantRows) {
+  const index = <T>(rows: readonly T[], key: (row: T) => string): ReadonlyMap<string, T> =>
+    new Map(rows.map((row) => [key(row), row]));
+  const systems = index(known.systems, (row) => row.name);
+  const groups = index(known.suctionGroups, (row) => `${row.systemId} ${row.name}`);
+  const circuits = index(known.circuits, (row) => row.code);
+  const fixtures = index(known.fixtures, (row) => `${row.circuitId} ${row.tag}`);
+  const coils = index(known.coils, (row) => `${row.fixtureId} ${row.number}`);
+  return {
+    system: (name: string) => systems.get(name),
+    suctionGroup: (systemId: string, name: string) => groups.get(`${systemId} ${name}`),
+    circuit: (code: string) => circuits.get(code),
+    fixture: (circuitId: string, tag: string) => fixtures.get(`${circuitId} ${tag}`),
+    coil: (fixtureId: string, number: number) => coils.get(`${fixtureId} ${number}`),
+  };
+}
+
+function withRemoved(out: Lists, known: PlantRows, removedAt: Date): PlantRows {
+  const gone = <T extends { id: string; removedAt: Date | null }>(now: readonly T[], before: readonly T[]): T[] => {
+    const kept = new Set(now.map((row) => row.id));
+    return before.filter((row) => row.removedAt === null && !kept.has(row.id)).map((row) => ({ ...row, removedAt }));
+  };
+  return {
+    systems: [...out.systems, ...gone(out.systems, known.systems)],
+    suctionGroups: [...out.suctionGroups, ...gone(out.suctionGroups, known.suctionGroups)],
+    circuits: [...out.circuits, ...gone(out.circuits, known.circuits)],
+    fixtures: [...out.fixtures, ...gone(out.fixtures, known.fixtures)],
+    coils: [...out.coils, ...gone(out.coils, known.coils)],
+  };
+}

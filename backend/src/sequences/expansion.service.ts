@@ -1,0 +1,164 @@
+import { uuidv7 } from 'uuidv7';
+import type { StepList } from '#shared/checklist/step';
+import type { CompanyId, EntryId, OpeningId, PersonId, SequenceId } from '#shared/plant/ids';
+import type { CircuitSpecification } from '#shared/plant/plant';
+import { canonicalJson } from '#shared/sequences/canonical-json';
+import { bodyHash } from '#shared/sequences/chain';
+import { emptyFold } from '#shared/sequences/fold';
+import type { EntryBody } from '#shared/sequences/entry';
+import type { FoldState } from '#shared/sequences/fold-state';
+import { sha256OfText } from '#shared/sequences/sha256';
+import type { Context } from '../database/transactions';
+import type { TemplatesService } from '../templates/templates.service';
+import { appendToChain, foldColumns } from './chain-appending';
+import type { EntryEntity } from './entry.entity';
+import type { SequenceEntity } from './sequence.entity';
+import type { SequencesRepository } from './sequences.repository';
+import type { StepListEntity } from './step-list.entity';
+
+interface Expanded {
+  readonly specification: CircuitSpecification;
+  readonly stepList: StepList;
+  readonly hash: string;
+  readonly content: string;
+}
+
+/**
+ * Turns templates and circuits into sequences. An expansion is an entry of the chain, so that the head binds what was
+ * asked as well as what was answered. Sequences that are submitted or approved are left as they are.
+ */
+export class ExpansionService {
+  constructor(
+    private readonly templates: TemplatesService,
+    private readonly sequences: SequencesRepository,
+  ) {}
+
+  /**
+   * Makes or renews the sequence of each circuit.
+   *
+   * @returns how many circuits have a sequence afterwards
+   */
+  async expand(
+    context: Context,
+    owner: { companyId: CompanyId; openingId: OpeningId },
+    specifications: readonly CircuitSpecification[],
+    authorId: PersonId,
+  ): Promise<number> {
+    const expanded = await this.expandAll(context, owner.companyId, specifications);
+    const now = new Date();
+    await this.sequences.insertStepLists(context, stepListRows(owner, expanded, now));
+    const known = await this.sequences.findByCircuits(
+      context,
+      expanded.map(({ specification }) => specification.circuit.id),
+    );
+    const byCircuit = new Map(known.map((row) => [row.circuitId as string, row]));
+    const [rows, entries]: [SequenceEntity[], EntryEntity[]] = [[], []];
+    for (const item of expanded) {
+      const sequence = byCircuit.get(item.specification.circuit.id);
+      if (sequence) await this.renew(context, sequence.id as SequenceId, item, authorId, now);
+      else begin(owner, item, authorId, now, rows, entries);
+    }
+    for (let at = 0; at < rows.length; at += 100) {
+      await this.sequences.insert(context, rows.slice(at, at + 100));
+      await this.sequences.insertEntries(context, entries.slice(at, at + 100));
+    }
+    return expanded.length;
+  }
+
+  private async expandAll(
+    context: Context,
+    companyId: CompanyId,
+    specifications: readonly CircuitSpecification[],
+  ): Promise<Expanded[]> {
+    const stepLists = await this.templates.expand(context, companyId, specifications);
+    return stepLists.flatMap((stepList, index) => {
+      const specification = specifications[index];
+      if (!stepList || !specification) return [];
+      const content = canonicalJson(stepList);
+      return [{ specification, stepList, content, hash: sha256OfText(content) }];
+    });
+  }
+
+  private async renew(
+    context: Context,
+    id: SequenceId,
+    item: Expanded,
+    authorId: PersonId,
+    now: Date,
+  ): Promise<void> {
+    const locked = await this.sequences.lock(context, id);
+    if (!locked || locked.stepListHash === item.hash) return;
+    const fold = JSON.parse(locked.fold) as FoldState;
+    if (fold.state !== 'open' && fold.state !== 'sentBack') return;
+    const result = appendExpansion(fold, locked.companyId, id, item, authorId, now);
+    await this.sequences.insertEntries(context, [result.row]);
+    await this.sequences.update(context, id, {
+      ...foldColumns(result.fold, item.stepList.steps),
+      stepListHash: item.hash,
+    });
+  }
+}
+
+function begin(
+  owner: { companyId: CompanyId; openingId: OpeningId },
+  item: Expanded,
+  authorId: PersonId,
+  now: Date,
+  rows: SequenceEntity[],
+  entries: EntryEntity[],
+): void {
+  const id = uuidv7() as SequenceId;
+  const { row, fold } = appendExpansion(emptyFold(), owner.companyId, id, item, authorId, now);
+  entries.push(row);
+  rows.push({
+    id,
+    ...owner,
+    circuitId: item.specification.circuit.id,
+    stepListHash: item.hash,
+    ...foldColumns(fold, item.stepList.steps),
+    submittedAt: null,
+    submittedBy: null,
+    createdAt: now,
+  });
+}
+
+function appendExpansion(
+  fold: FoldState,
+  companyId: string,
+  sequenceId: SequenceId,
+  item: Expanded,
+  authorId: PersonId,
+  now: Date,
+): { row: EntryEntity; fold: FoldState } {
+  const body: EntryBody = {
+    format: 1,
+    id: uuidv7() as EntryId,
+    sequenceId,
+    authorId,
+    deviceId: null,
+    deviceCount: 0,
+    countOnSequence: 0,
+    deviceTime: now.toISOString(),
+    stepListHash: item.hash,
+    supersedes: null,
+    content: {
+      kind: 'expansion',
+      templateKey: item.stepList.template.key,
+      templateVersion: item.stepList.template.version,
+      specificationRevision: item.specification.revision,
+      stepListHash: item.hash,
+    },
+  };
+  const entry = { body, bodyHash: bodyHash(body), standing: 'inOrder' as const, judgement: null };
+  const result = appendToChain(fold, companyId, entry, item.stepList.steps, now);
+  return { row: result.appended.row, fold: result.fold };
+}
+
+function stepListRows(
+  owner: { companyId: CompanyId; openingId: OpeningId },
+  expanded: readonly Expanded[],
+  createdAt: Date,
+): StepListEntity[] {
+  const byHash = new Map(expanded.map((item) => [item.hash, item.content]));
+  return [...byHash].map(([hash, content]) => ({ ...owner, hash, content, createdAt }));
+}

@@ -1,0 +1,50 @@
+import type { Step } from '#shared/checklist/step';
+import { DomainFailure } from '#shared/failures/failure';
+import type { CircuitId, CompanyId, OpeningId, PersonId, SequenceId } from '#shared/plant/ids';
+import type { EntryBody } from '#shared/sequences/entry';
+import type { FoldState } from '#shared/sequences/fold-state';
+import type { Context } from '../database/transactions';
+import { appendToChain, foldColumns } from './chain-appending';
+import type { SequencesRepository } from './sequences.repository';
+import type { StepLists } from './step-lists';
+
+/** A sequence under its row lock, as a reviewer's verdict meets it. */
+export interface LockedForReview {
+  readonly id: SequenceId;
+  readonly companyId: CompanyId;
+  readonly openingId: OpeningId;
+  readonly circuitId: CircuitId;
+  readonly stepListHash: string;
+  readonly fold: FoldState;
+  readonly steps: readonly Step[];
+}
+
+/** What the reviews feature may do to a sequence: take its lock and append a review to its chain. */
+export class SequenceReviewDesk {
+  constructor(
+    private readonly sequences: SequencesRepository,
+    private readonly stepLists: StepLists,
+  ) {}
+
+  /** @throws {DomainFailure} notFound */
+  async lock(context: Context, id: SequenceId): Promise<LockedForReview> {
+    const locked = await this.sequences.lock(context, id);
+    if (!locked) throw new DomainFailure('notFound', 'There is no such sequence.');
+    const { steps } = await this.stepLists.find(context, locked.companyId, locked.stepListHash);
+    return { ...locked, fold: JSON.parse(locked.fold) as FoldState, steps };
+  }
+
+  /** Appends a review entry; returns the fold after it. */
+  async append(context: Context, locked: LockedForReview, body: EntryBody, bodyHash: string): Promise<FoldState> {
+    const item = { body, bodyHash, standing: 'inOrder' as const, judgement: null };
+    const { fold, appended } = appendToChain(locked.fold, locked.companyId, item, locked.steps, new Date());
+    await this.sequences.insertEntries(context, [appended.row]);
+    await this.sequences.update(context, locked.id, foldColumns(fold, locked.steps));
+    return fold;
+  }
+
+  /** Whoever recorded or submitted something on it. */
+  async recorders(context: Context, id: SequenceId): Promise<PersonId[]> {
+    return this.sequences.findRecorders(context, id);
+  }
+}

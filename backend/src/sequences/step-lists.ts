@@ -1,0 +1,26 @@
+import type { StepList } from '#shared/checklist/step';
+import { Bug } from '#shared/failures/failure';
+import type { CompanyId } from '#shared/plant/ids';
+import type { Context } from '../database/transactions';
+import type { SequencesRepository } from './sequences.repository';
+
+const MAX_CACHED = 400;
+
+/** Expanded step lists by hash. What a hash stands for never changes, so every server may keep the ones in use. */
+export class StepLists {
+  private readonly cache = new Map<string, StepList>();
+
+  constructor(private readonly sequences: SequencesRepository) {}
+
+  async find(context: Context, companyId: CompanyId, hash: string): Promise<StepList> {
+    const key = `${companyId} ${hash}`;
+    const cached = this.cache.get(key);
+    if (cached) return cached;
+    const content = await this.sequences.findStepList(context, companyId, hash);
+    if (content === null) throw new Bug(`The step list ${hash} is missing`);
+    const stepList = JSON.parse(content) as StepList;
+    if (this.cache.size >= MAX_CACHED) this.cache.delete(this.cache.keys().next().value as string);
+    this.cache.set(key, stepList);
+    return stepList;
+  }
+}

@@ -1,0 +1,28 @@
+import type { CircuitSpecification } from '#shared/plant/plant';
+import { isTrue } from './evaluate';
+import { circuitFacts } from './specification-facts';
+import type { TemplateDocument } from './template-document';
+
+/**
+ * The template for a circuit: of those that apply, in their newest versions, the one with the highest priority. Equal
+ * priorities are settled by key, so that the choice doesn't depend on the order of the list.
+ *
+ * @returns `null` when none applies
+ * @throws {DomainFailure} templateRefused when a condition has no answer for this circuit
+ */
+export function chooseTemplate(
+  templates: readonly TemplateDocument[],
+  specification: CircuitSpecification,
+): TemplateDocument | null {
+  const facts = circuitFacts(specification);
+  const newest = new Map<string, TemplateDocument>();
+  for (const template of templates) {
+    const other = newest.get(template.key);
+    if (!other || other.version < template.version) newest.set(template.key, template);
+  }
+  const applying = [...newest.values()].filter((template) =>
+    isTrue(template.source, template.applies, facts),
+  );
+  applying.sort((a, b) => b.priority - a.priority || (a.key < b.key ? -1 : 1));
+  return applying[0] ?? null;
+}

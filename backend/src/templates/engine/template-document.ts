@@ -1,0 +1,79 @@
+import type { Caution, Text } from '#shared/checklist/text';
+import type { Dimension } from '#shared/units/unit';
+import type { CompiledExpression } from './expression';
+import type { Scope } from './fact-fields';
+import type { Limit } from './limit';
+import type { SourceText } from './source-text';
+
+/** A condition with the place where it is written, so that a failing evaluation can point at it. */
+export interface Condition {
+  readonly expression: CompiledExpression;
+  readonly offset: number;
+}
+
+/** A limit with its place. */
+export interface PlacedLimit {
+  readonly limit: Limit;
+  readonly offset: number;
+}
+
+export interface OptionDocument {
+  readonly value: string;
+  readonly label: Text;
+  readonly outcome: 'within' | 'outside' | 'recorded';
+}
+
+/** What only steps of one kind have. */
+export type StepBody =
+  | { readonly kind: 'confirm' }
+  | { readonly kind: 'choose'; readonly options: readonly OptionDocument[] }
+  | {
+      readonly kind: 'reading';
+      readonly dimension: Dimension;
+      readonly low: PlacedLimit | null;
+      readonly high: PlacedLimit | null;
+    }
+  | {
+      readonly kind: 'superheat';
+      /** `null`: the fixture's own band. */
+      readonly band: { readonly low: PlacedLimit; readonly high: PlacedLimit } | null;
+    }
+  | { readonly kind: 'photo'; readonly minCount: number }
+  | { readonly kind: 'note' }
+  | { readonly kind: 'override'; readonly subject: Text }
+  | { readonly kind: 'signature'; readonly meaning: Text };
+
+/** A step of a checked template. Texts may still hold placeholders. */
+export interface StepDocument {
+  readonly key: string;
+  /** `circuit`: there once; otherwise repeated for each fixture or coil. */
+  readonly scope: Scope;
+  readonly when: Condition | null;
+  readonly title: Text;
+  readonly instruction: Text | null;
+  readonly caution: Caution | null;
+  readonly required: boolean;
+  readonly source: string | null;
+  readonly body: StepBody;
+  readonly offset: number;
+}
+
+export interface SectionDocument {
+  readonly key: string;
+  readonly title: Text;
+  readonly when: Condition | null;
+  readonly steps: readonly StepDocument[];
+}
+
+/** A template that was read and found sound: every name is known, every type fits, every text stands in both languages. */
+export interface TemplateDocument {
+  readonly key: string;
+  readonly version: number;
+  readonly level: 'circuit';
+  readonly title: Text;
+  readonly applies: Condition;
+  readonly priority: number;
+  readonly sections: readonly SectionDocument[];
+  /** What was read, for messages that point into it. */
+  readonly source: SourceText;
+}
