@@ -5,7 +5,13 @@ import importX from 'eslint-plugin-import-x';
 import tseslint from 'typescript-eslint';
 import { folderZones, layerBans, syntaxBans } from './eslint.layers.mjs';
 
-const SPECS = ['**/*.spec.ts', '**/*.fixture.ts', '**/testing/**', 'frontend/e2e/**', 'frontend/jest-setup.ts'];
+const SPECS = [
+  '**/*.spec.ts',
+  '**/*.fixture.ts',
+  '**/testing/**',
+  'frontend/e2e/**',
+  'frontend/jest-setup.ts',
+];
 
 export default tseslint.config(
   { ignores: ['dist/', 'node_modules/', '.angular/', '.data/', 'coverage/', 'jest.config.cjs'] },
@@ -15,9 +21,28 @@ export default tseslint.config(
     files: ['**/*.mjs', '**/*.cjs'],
     languageOptions: {
       globals: Object.fromEntries(
-        ['process', 'console', 'Buffer', 'URL', 'setTimeout', 'clearTimeout', 'setInterval', 'clearInterval', 'fetch',
-          'performance', 'AbortController', 'AbortSignal', 'TextDecoder', 'TextEncoder', 'require', 'module', '__dirname',
-          'setImmediate', 'structuredClone', 'URLSearchParams'].map((name) => [name, 'readonly']),
+        [
+          'process',
+          'console',
+          'Buffer',
+          'URL',
+          'setTimeout',
+          'clearTimeout',
+          'setInterval',
+          'clearInterval',
+          'fetch',
+          'performance',
+          'AbortController',
+          'AbortSignal',
+          'TextDecoder',
+          'TextEncoder',
+          'require',
+          'module',
+          '__dirname',
+          'setImmediate',
+          'structuredClone',
+          'URLSearchParams',
+        ].map((name) => [name, 'readonly']),
       ),
     },
   },
@@ -28,7 +53,9 @@ export default tseslint.config(
     languageOptions: { parserOptions: { projectService: false } },
     settings: {
       'import-x/resolver-next': [
-        createTypeScriptImportResolver({ project: ['tsconfig.json', 'backend/tsconfig.json', 'frontend/tsconfig.app.json'] }),
+        createTypeScriptImportResolver({
+          project: ['tsconfig.json', 'backend/tsconfig.json', 'frontend/tsconfig.app.json'],
+        }),
       ],
     },
     rules: {

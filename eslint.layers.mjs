@@ -21,7 +21,11 @@ export function folderZones() {
     { target: './shared', from: './frontend', message: 'shared/ knows no screen.' },
     { target: './shared', from: './backend', message: 'shared/ knows no server.' },
     { target: './backend', from: './frontend/src', message: 'The server knows no screen.' },
-    { target: './frontend/src', from: './backend', message: 'Screens reach the server through shared/contracts only.' },
+    {
+      target: './frontend/src',
+      from: './backend',
+      message: 'Screens reach the server through shared/contracts only.',
+    },
   ];
   for (const [folder, allowed] of Object.entries(SHARED)) {
     zones.push({
@@ -54,11 +58,20 @@ export function folderZones() {
   return zones;
 }
 
-const ORM = { group: ['typeorm', 'typeorm/*'], message: 'The ORM stays in *.entity.ts, *.repository.ts and database/.' };
-const EXPRESS = { group: ['express', 'express/*'], message: 'Express stays in http/, app/ and the session door.' };
+const ORM = {
+  group: ['typeorm', 'typeorm/*'],
+  message: 'The ORM stays in *.entity.ts, *.repository.ts and database/.',
+};
+const EXPRESS = {
+  group: ['express', 'express/*'],
+  message: 'Express stays in http/, app/ and the session door.',
+};
 const REPOSITORY = { group: ['**/*.repository'], message: 'Go through the feature’s service.' };
 const ENTITY = { group: ['**/*.entity'], message: 'Entities stay behind the repository.' };
-const FOREIGN_REPOSITORY = { group: ['../*/*.repository'], message: 'Another feature is reached through its service.' };
+const FOREIGN_REPOSITORY = {
+  group: ['../*/*.repository'],
+  message: 'Another feature is reached through its service.',
+};
 
 /** Package and layer bans by the written path; built by one function, since a later block replaces a rule's options. */
 export function layerBans() {
@@ -82,21 +95,34 @@ export function layerBans() {
     ban(
       ['backend/src/**/*.ts'],
       [ORM, { group: ['@angular/*'], message: 'The server knows no Angular.' }],
-      [...specs, '**/*.repository.ts', '**/*.entity.ts', 'backend/src/database/**', 'backend/src/app/services.ts'],
+      [
+        ...specs,
+        '**/*.repository.ts',
+        '**/*.entity.ts',
+        'backend/src/database/**',
+        'backend/src/app/services.ts',
+      ],
     ),
     ban(['backend/src/**/*.route.ts'], [ORM, EXPRESS, REPOSITORY, ENTITY]),
     ban(['backend/src/**/*.service.ts'], [ORM, FOREIGN_REPOSITORY], ['backend/src/events/**']),
-    ban(['backend/src/**/*.repository.ts'], [
-      EXPRESS,
-      { group: ['**/*.service', '**/*.route'], message: 'A repository knows only its tables.' },
-    ]),
+    ban(
+      ['backend/src/**/*.repository.ts'],
+      [EXPRESS, { group: ['**/*.service', '**/*.route'], message: 'A repository knows only its tables.' }],
+    ),
     ban(
       ['frontend/src/**/*.ts'],
       [
         { group: ['node:*', 'express', 'typeorm', '**/backend/**'], message: 'Screens run in a browser.' },
         { group: ['@angular/common/http'], message: 'HTTP belongs to *-api.ts.' },
       ],
-      [...specs, '**/*-api.ts', '**/*interceptor.ts', 'frontend/src/app/app.config.ts', '**/problem-of.ts', '**/*-context.ts'],
+      [
+        ...specs,
+        '**/*-api.ts',
+        '**/*interceptor.ts',
+        'frontend/src/app/app.config.ts',
+        '**/problem-of.ts',
+        '**/*-context.ts',
+      ],
     ),
   ];
 }

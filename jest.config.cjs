@@ -35,6 +35,8 @@ const plain = (displayName, testMatch) => ({
 });
 
 module.exports = {
+  // Whole servers and browsers on two busy cores.
+  testTimeout: 40_000,
   projects: [
     plain('shared', ['<rootDir>/shared/**/*.spec.ts']),
     {

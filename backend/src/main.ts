@@ -28,7 +28,10 @@ async function main(): Promise<void> {
     services.sweep().catch((error: unknown) => logger.warn({ err: error }, 'could not sweep'));
   }, SWEEP_MS);
 
-  const server = makeServer(config, createApp(services, logger, { secure: config.secure, checkResponses: false }));
+  const server = makeServer(
+    config,
+    createApp(services, logger, { secure: config.secure, checkResponses: false }),
+  );
   await new Promise<void>((resolve, reject) => {
     server.once('error', reject);
     server.listen(config.PORT, config.host, resolve);
@@ -73,7 +76,8 @@ function makeServer(config: Config, app: Parameters<typeof createHttpServer>[1])
 
 main().catch((error: unknown) => {
   // The start script shows what is written here.
-  const reason = error instanceof DomainFailure ? error.message : error instanceof Error ? error.stack : String(error);
+  const reason =
+    error instanceof DomainFailure ? error.message : error instanceof Error ? error.stack : String(error);
   process.stderr.write(`${reason}\n`);
   process.exit(1);
 });

@@ -33,7 +33,8 @@ export function signaturePath(signature: Signature): string {
     .filter((stroke) => stroke.length >= 2)
     .map((stroke) => {
       const points: string[] = [];
-      for (let index = 0; index + 1 < stroke.length; index += 2) points.push(`${stroke[index]} ${stroke[index + 1]}`);
+      for (let index = 0; index + 1 < stroke.length; index += 2)
+        points.push(`${stroke[index]} ${stroke[index + 1]}`);
       return points.length === 1 ? `M${points[0]}l0.1 0` : `M${points.join('L')}`;
     })
     .join('');

@@ -5,7 +5,13 @@ import { huntingMean } from '../refrigeration/hunting-mean';
 import { superheat } from '../refrigeration/superheat';
 import { judgeSuperheat } from '../refrigeration/superheat-band';
 import { fromSi } from '../units/convert';
-import { kelvin, kelvinDifference, pascalAbsolute, pascalGauge, type KelvinDifference } from '../units/quantity';
+import {
+  kelvin,
+  kelvinDifference,
+  pascalAbsolute,
+  pascalGauge,
+  type KelvinDifference,
+} from '../units/quantity';
 import type { SequenceFacts } from './facts';
 import { plainJudgement, refusedJudgement, type Doubt, type Figure, type Judgement } from './judgement';
 import type { SuperheatAnswer, SuperheatObservation, SuperheatPair, SuperheatStep } from './kinds/superheat';
@@ -28,7 +34,11 @@ interface ObservationResult {
  * temperature at the bulb, and that against the fixture's band. A hunting valve is judged by the mean of its high and
  * its low (common practice, no source); a minimum at or below zero is flagged whatever the mean is. Never clamped.
  */
-export function judgeSuperheatAnswer(step: SuperheatStep, answer: SuperheatAnswer, facts: SequenceFacts): Judgement {
+export function judgeSuperheatAnswer(
+  step: SuperheatStep,
+  answer: SuperheatAnswer,
+  facts: SequenceFacts,
+): Judgement {
   const table = findRefrigerant(facts.refrigerant);
   if (!table) return refusedJudgement('unknownRefrigerant');
   const doubts: Doubt[] = [];
@@ -57,7 +67,11 @@ function figuresOf(left: ObservationResult, found: ObservationResult | null): Fi
   const figures: Figure[] = [{ label: 'superheat', value: left.mean, unit: 'K_diff' }];
   if (left.pairs.length > 1) {
     figures.push({ label: 'superheatLow', value: left.minimum, unit: 'K_diff' });
-    figures.push({ label: 'superheatHigh', value: Math.max(...left.pairs.map((pair) => pair.superheat)), unit: 'K_diff' });
+    figures.push({
+      label: 'superheatHigh',
+      value: Math.max(...left.pairs.map((pair) => pair.superheat)),
+      unit: 'K_diff',
+    });
   }
   figures.push(...(left.pairs[0]?.figures ?? []));
   if (found) figures.push({ label: 'superheatAsFound', value: found.mean, unit: 'K_diff' });

@@ -7,7 +7,16 @@ export type Language = (typeof LANGUAGES)[number];
 export const textSchema = z.object({ en: z.string(), es: z.string() });
 export type Text = z.infer<typeof textSchema>;
 
-export const HAZARDS = ['pressure', 'electricity', 'asphyxiation', 'co2', 'flammable', 'cold', 'rotating', 'height'] as const;
+export const HAZARDS = [
+  'pressure',
+  'electricity',
+  'asphyxiation',
+  'co2',
+  'flammable',
+  'cold',
+  'rotating',
+  'height',
+] as const;
 export type Hazard = (typeof HAZARDS)[number];
 
 /** A caution belongs to the step where the danger is; the hazard's name stands before the sentence. */

@@ -1,7 +1,14 @@
 import * as z from 'zod/mini';
 import { ROLES } from '../access/roles';
 import { LANGUAGES } from '../checklist/text';
-import { circuitIdSchema, companyIdSchema, openingIdSchema, personIdSchema, sequenceIdSchema, systemIdSchema } from '../plant/ids';
+import {
+  circuitIdSchema,
+  companyIdSchema,
+  openingIdSchema,
+  personIdSchema,
+  sequenceIdSchema,
+  systemIdSchema,
+} from '../plant/ids';
 import { UNIT_SYSTEMS } from '../plant/plant';
 import { TEMPERATURE_CLASSES } from '../plant/words';
 import { SEQUENCE_STATES } from '../sequences/transitions';
@@ -90,6 +97,11 @@ export const assignmentRequestSchema = z.strictObject({
   personId: z.nullable(personIdSchema),
 });
 
-export const openingPersonSchema = z.object({ id: personIdSchema, name: z.string(), role: z.enum(ROLES), companyName: z.string() });
+export const openingPersonSchema = z.object({
+  id: personIdSchema,
+  name: z.string(),
+  role: z.enum(ROLES),
+  companyName: z.string(),
+});
 export const openingPeopleSchema = z.object({ people: z.array(openingPersonSchema) });
 export type OpeningPerson = z.infer<typeof openingPersonSchema>;

@@ -2,7 +2,7 @@ import * as z from 'zod/mini';
 import { stepListSchema } from '../checklist/step';
 import { openingIdSchema, personIdSchema, sequenceIdSchema, sha256Schema } from '../plant/ids';
 import { circuitSpecificationSchema } from '../plant/plant';
-import type { entryBodySchema} from '../sequences/entry';
+import type { entryBodySchema } from '../sequences/entry';
 import { storedEntrySchema, STANDINGS } from '../sequences/entry';
 import { foldStateSchema } from '../sequences/fold-state';
 import { judgementSchema } from '../checklist/judgement';

@@ -21,7 +21,9 @@ export const meSchema = z.object({
 });
 export type Me = z.infer<typeof meSchema>;
 
-export const passwordRequestSchema = z.strictObject({ password: z.string().check(z.minLength(1), z.maxLength(256)) });
+export const passwordRequestSchema = z.strictObject({
+  password: z.string().check(z.minLength(1), z.maxLength(256)),
+});
 
 export const languageRequestSchema = z.strictObject({ language: z.enum(LANGUAGES) });
 

@@ -43,4 +43,6 @@ export const packageIdSchema = z.uuid().brand<'PackageId'>();
 export type PackageId = z.infer<typeof packageIdSchema>;
 
 /** Lower-case hexadecimal SHA-256. */
-export const sha256Schema = z.string().check(z.regex(/^[0-9a-f]{64}$/, 'must be 64 lower-case hexadecimal digits'));
+export const sha256Schema = z
+  .string()
+  .check(z.regex(/^[0-9a-f]{64}$/, 'must be 64 lower-case hexadecimal digits'));

@@ -1,5 +1,12 @@
 import * as z from 'zod/mini';
-import { circuitIdSchema, coilIdSchema, fixtureIdSchema, openingIdSchema, suctionGroupIdSchema, systemIdSchema } from './ids';
+import {
+  circuitIdSchema,
+  coilIdSchema,
+  fixtureIdSchema,
+  openingIdSchema,
+  suctionGroupIdSchema,
+  systemIdSchema,
+} from './ids';
 import {
   CONTROLS,
   DEFROST_TYPES,
@@ -80,7 +87,12 @@ export type System = z.infer<typeof systemSchema>;
 /** Everything that a template may ask about one circuit; `revision` counts the changes of the schedule behind it. */
 export const circuitSpecificationSchema = z.object({
   revision: z.int(),
-  opening: z.object({ id: openingIdSchema, name: z.string(), elevationM: z.number(), unitSystem: z.enum(UNIT_SYSTEMS) }),
+  opening: z.object({
+    id: openingIdSchema,
+    name: z.string(),
+    elevationM: z.number(),
+    unitSystem: z.enum(UNIT_SYSTEMS),
+  }),
   system: systemSchema,
   suctionGroup: suctionGroupSchema,
   circuit: circuitSchema,

@@ -9,7 +9,12 @@ export type SystemKind = (typeof SYSTEM_KINDS)[number];
 export const FEEDS = ['homeRun', 'sharedLoop'] as const;
 export type Feed = (typeof FEEDS)[number];
 
-export const CONTROLS = ['evaporatorPressureRegulator', 'suctionStop', 'liquidSolenoid', 'electronicValve'] as const;
+export const CONTROLS = [
+  'evaporatorPressureRegulator',
+  'suctionStop',
+  'liquidSolenoid',
+  'electronicValve',
+] as const;
 export type Control = (typeof CONTROLS)[number];
 
 export const DEFROST_TYPES = ['offTime', 'electric', 'hotGas', 'none'] as const;

@@ -25,7 +25,9 @@ export type ChainFault = 'position' | 'bodyHash' | 'previousHash' | 'hash';
  *
  * @returns the first broken link and what is wrong with it, or `null` when all hold
  */
-export function findBrokenLink(entries: readonly StoredEntry[]): { position: number; fault: ChainFault } | null {
+export function findBrokenLink(
+  entries: readonly StoredEntry[],
+): { position: number; fault: ChainFault } | null {
   let previous = CHAIN_START;
   for (const [index, entry] of entries.entries()) {
     const position = index + 1;

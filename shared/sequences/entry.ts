@@ -10,7 +10,10 @@ const stepKeySchema = z.string().check(z.minLength(1), z.maxLength(160));
 export const VERDICTS = ['approved', 'sentBack', 'withdrawn'] as const;
 export type Verdict = (typeof VERDICTS)[number];
 
-export const remarkSchema = z.object({ stepKey: stepKeySchema, text: z.string().check(z.minLength(1), z.maxLength(2000)) });
+export const remarkSchema = z.object({
+  stepKey: stepKeySchema,
+  text: z.string().check(z.minLength(1), z.maxLength(2000)),
+});
 export type Remark = z.infer<typeof remarkSchema>;
 
 /** The device's entries that a submission rests on: it takes effect when entries 1 to `count` of each have arrived. */
@@ -18,11 +21,20 @@ export const restsOnSchema = z.object({ deviceId: deviceIdSchema, count: z.int()
 export type RestsOn = z.infer<typeof restsOnSchema>;
 
 /** What was worked out on the device, beside what the server makes of it. */
-const workedOutSchema = z.object({ outcome: z.enum(OUTCOMES), counts: z.boolean(), figures: z.array(figureSchema) });
+const workedOutSchema = z.object({
+  outcome: z.enum(OUTCOMES),
+  counts: z.boolean(),
+  figures: z.array(figureSchema),
+});
 
 /** What an entry says. The first three are made on a device, the last two by the server. */
 export const entryContentSchema = z.discriminatedUnion('kind', [
-  z.object({ kind: z.literal('answer'), stepKey: stepKeySchema, answer: answerSchema, workedOut: workedOutSchema }),
+  z.object({
+    kind: z.literal('answer'),
+    stepKey: stepKeySchema,
+    answer: answerSchema,
+    workedOut: workedOutSchema,
+  }),
   z.object({
     kind: z.literal('notApplicable'),
     stepKey: stepKeySchema,

@@ -71,7 +71,11 @@ function applyContent(state: FoldState, entry: FoldEntry, content: EntryContent)
       applyAnswer(state, entry, content);
       return;
     case 'notApplicable':
-      setStep(state, content.stepKey, entry, { outcome: 'notApplicable', counts: true, overrideStanding: false });
+      setStep(state, content.stepKey, entry, {
+        outcome: 'notApplicable',
+        counts: true,
+        overrideStanding: false,
+      });
       return;
     case 'submission':
       state.pending = { entryId: entry.body.id, restsOn: content.restsOn };
@@ -87,7 +91,11 @@ function applyContent(state: FoldState, entry: FoldEntry, content: EntryContent)
   }
 }
 
-function applyAnswer(state: FoldState, entry: FoldEntry, content: Extract<EntryContent, { kind: 'answer' }>): void {
+function applyAnswer(
+  state: FoldState,
+  entry: FoldEntry,
+  content: Extract<EntryContent, { kind: 'answer' }>,
+): void {
   const judged = entry.server.judgement ?? content.workedOut;
   const standing = content.answer.kind === 'override' && content.answer.phase === 'set';
   setStep(state, content.stepKey, entry, {
@@ -117,7 +125,11 @@ function setStep(
   if (!state.recorders.includes(authorId)) state.recorders = [...state.recorders, authorId];
 }
 
-function applyReview(state: FoldState, entry: FoldEntry, content: Extract<EntryContent, { kind: 'review' }>): void {
+function applyReview(
+  state: FoldState,
+  entry: FoldEntry,
+  content: Extract<EntryContent, { kind: 'review' }>,
+): void {
   const move = transitionFor(state.state, content.verdict);
   if (!move) return;
   state.state = move.to;

@@ -37,7 +37,10 @@ export function viewSequence(stepList: StepList, entries: readonly FoldEntry[]):
   const byKey = new Map<string, FoldEntry[]>();
   for (const entry of entries) {
     const { content } = entry.body;
-    if ((content.kind === 'answer' || content.kind === 'notApplicable') && entry.server.standing === 'inOrder') {
+    if (
+      (content.kind === 'answer' || content.kind === 'notApplicable') &&
+      entry.server.standing === 'inOrder'
+    ) {
       byKey.set(content.stepKey, [...(byKey.get(content.stepKey) ?? []), entry]);
     }
   }
@@ -46,7 +49,13 @@ export function viewSequence(stepList: StepList, entries: readonly FoldEntry[]):
     const stepFold = fold.steps[step.key] ?? null;
     const history = byKey.get(step.key) ?? [];
     const reopening = stepFold?.reopenedBy ? byId.get(stepFold.reopenedBy) : undefined;
-    return { step, fold: stepFold, history, current: history.at(-1) ?? null, remark: remarkOn(step.key, reopening) };
+    return {
+      step,
+      fold: stepFold,
+      history,
+      current: history.at(-1) ?? null,
+      remark: remarkOn(step.key, reopening),
+    };
   });
   const asked = new Set(stepList.steps.map((step) => step.key));
   return {

@@ -50,7 +50,10 @@ export function readConfig(environment: NodeJS.ProcessEnv) {
   const given = Object.fromEntries(Object.entries(environment).filter(([, value]) => value !== ''));
   const parsed = environmentSchema.safeParse(given);
   if (!parsed.success) {
-    const places = parsed.error.issues.map((issue) => ({ path: issue.path.join('.'), message: issue.message }));
+    const places = parsed.error.issues.map((issue) => ({
+      path: issue.path.join('.'),
+      message: issue.message,
+    }));
     const names = places.map((place) => `${place.path} (${place.message})`).join(', ');
     throw new DomainFailure('invalidInput', `The environment lacks or misstates: ${names}.`, places);
   }

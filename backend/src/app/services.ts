@@ -75,7 +75,9 @@ export function wireServices(config: Config, dataSource: DataSource, logger: Log
   const transactions = new Transactions(dataSource);
   const key = InstallationKey.load(config.SIGNING_KEY_FILE);
   const storage = new ObjectStorage(config.storage);
-  const renderer = new PhotoRenderer();
+  const renderer = new PhotoRenderer(
+    join(PROJECT_FOLDER, 'dist', 'backend', 'src', 'files', 'photo-worker.js'),
+  );
   const mailer = new Mailer(config.mail);
   const audit = new AuditService(new AuditRepository());
   const events = new LiveEventsService(transactions, new LiveEventsRepository(), logger);
@@ -85,16 +87,17 @@ export function wireServices(config: Config, dataSource: DataSource, logger: Log
   const peopleRepository = new PeopleRepository();
   const devices = new DevicesRepository();
   const people = new PeopleService(transactions, peopleRepository, devices);
-  const sessions = new SessionService(
+  const signInLimit = new SignInLimit(pool, config.appAccount.database);
+  const sessions = new SessionService(transactions, peopleRepository, devices, audit, signInLimit);
+  const session = sessionMiddleware(pool, config.SESSION_SECRET, config.secure);
+  const desk = new PeopleAccessDesk(
     transactions,
     peopleRepository,
     devices,
-    audit,
-    new SignInLimit(pool, config.appAccount.database),
+    new SubjectsRepository(),
+    session.handle,
   );
-  const session = sessionMiddleware(pool, config.SESSION_SECRET, config.secure);
-  const desk = new PeopleAccessDesk(transactions, peopleRepository, devices, new SubjectsRepository(), session);
-  const door = new SessionDoor(sessions, desk, session, config.secure);
+  const door = new SessionDoor(sessions, desk, session.handle, config.secure);
 
   const plant = new PlantService(new PlantRepository());
   const openings = new OpeningsService(
@@ -136,7 +139,15 @@ export function wireServices(config: Config, dataSource: DataSource, logger: Log
 
   const reviewDesk = new SequenceReviewDesk(sequencesRepository, stepLists);
   const notice = new SentBackNotice(reviewDesk, openings, plant, people, jobs, config.publicUrl);
-  const reviews = new ReviewsService(transactions, reviewDesk, new ReviewsRepository(), key, audit, events, notice);
+  const reviews = new ReviewsService(
+    transactions,
+    reviewDesk,
+    new ReviewsRepository(),
+    key,
+    audit,
+    events,
+    notice,
+  );
   const queue = new ReviewQueueService(transactions, new ReviewQueueRepository(), openings);
 
   const packagesRepository = new PackagesRepository();
@@ -204,12 +215,14 @@ export function wireServices(config: Config, dataSource: DataSource, logger: Log
     sweep: async (): Promise<void> => {
       await new LiveEventsRepository().sweep(transactions.outside);
       await jobsRepository.sweep(transactions.outside);
+      await signInLimit.sweep(transactions.outside);
     },
     close: async (): Promise<void> => {
       events.close();
       await worker.stop();
       await renderer.close();
       storage.close();
+      await session.close();
       await new Promise<void>((resolve) => pool.end(() => resolve()));
     },
   };

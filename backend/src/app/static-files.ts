@@ -22,7 +22,11 @@ export function staticFiles(folder: string): RequestHandler {
   const twins = findTwins(folder);
   router.use((request, response, next) => {
     const type = TYPES[request.path.split('.').at(-1) ?? ''];
-    if (!type || !twins.has(request.path) || !/\bbr\b/.test(String(request.headers['accept-encoding'] ?? ''))) {
+    if (
+      !type ||
+      !twins.has(request.path) ||
+      !/\bbr\b/.test(String(request.headers['accept-encoding'] ?? ''))
+    ) {
       next();
       return;
     }
@@ -38,7 +42,10 @@ export function staticFiles(folder: string): RequestHandler {
       redirect: false,
       setHeaders(response, path) {
         const plain = path.replace(/\.br$/, '');
-        response.setHeader('Cache-Control', HASHED.test(plain) ? 'public, max-age=31536000, immutable' : 'no-cache');
+        response.setHeader(
+          'Cache-Control',
+          HASHED.test(plain) ? 'public, max-age=31536000, immutable' : 'no-cache',
+        );
         const type = TYPES[plain.split('.').at(-1) ?? ''];
         if (path.endsWith('.br') && type) response.setHeader('Content-Type', type);
       },

@@ -5,7 +5,8 @@ import { Column, PrimaryColumn, type ColumnOptions } from 'typeorm';
 
 export const IdColumn = (): PropertyDecorator => PrimaryColumn({ type: 'uuid' });
 
-export const RefColumn = (options: ColumnOptions = {}): PropertyDecorator => Column({ type: 'uuid', ...options });
+export const RefColumn = (options: ColumnOptions = {}): PropertyDecorator =>
+  Column({ type: 'uuid', ...options });
 
 export const TextColumn = (length: number, options: ColumnOptions = {}): PropertyDecorator =>
   Column({ type: 'varchar', length, ...options });
@@ -21,9 +22,11 @@ export const HashColumn = (options: ColumnOptions = {}): PropertyDecorator =>
 export const LongTextColumn = (options: ColumnOptions = {}): PropertyDecorator =>
   Column({ type: 'longtext', charset: 'utf8mb4', collation: 'utf8mb4_bin', ...options });
 
-export const DoubleColumn = (options: ColumnOptions = {}): PropertyDecorator => Column({ type: 'double', ...options });
+export const DoubleColumn = (options: ColumnOptions = {}): PropertyDecorator =>
+  Column({ type: 'double', ...options });
 
-export const IntColumn = (options: ColumnOptions = {}): PropertyDecorator => Column({ type: 'int', ...options });
+export const IntColumn = (options: ColumnOptions = {}): PropertyDecorator =>
+  Column({ type: 'int', ...options });
 
 export const BooleanColumn = (options: ColumnOptions = {}): PropertyDecorator =>
   Column({ type: 'boolean', ...options });

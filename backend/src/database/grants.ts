@@ -43,7 +43,12 @@ export const TABLE_GRANTS: Readonly<Record<string, keyof typeof RIGHTS>> = {
  *
  * @throws {Bug} for a table without a line in the list, so that nobody forgets to decide
  */
-export async function grantTables(owner: DataSource, database: string, appUser: string, appHost: string): Promise<void> {
+export async function grantTables(
+  owner: DataSource,
+  database: string,
+  appUser: string,
+  appHost: string,
+): Promise<void> {
   const tables: { name: string }[] = await owner.query(
     'SELECT table_name AS name FROM information_schema.tables WHERE table_schema = ?',
     [database],

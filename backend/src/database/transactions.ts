@@ -68,7 +68,8 @@ function isLockError(error: unknown): boolean {
 
 /** The driver's error number behind an ORM error, or `undefined`. */
 export function driverErrno(error: unknown): number | undefined {
-  const source = (error as { driverError?: { errno?: unknown } } | null)?.driverError ?? (error as { errno?: unknown });
+  const source =
+    (error as { driverError?: { errno?: unknown } } | null)?.driverError ?? (error as { errno?: unknown });
   return typeof source?.errno === 'number' ? source.errno : undefined;
 }
 

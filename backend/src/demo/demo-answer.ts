@@ -32,7 +32,10 @@ export async function demoAnswer(step: Step, scene: DemoScene): Promise<Answer> 
     case 'confirm':
       return { kind: 'confirm', confirmed: true };
     case 'choose':
-      return { kind: 'choose', value: (step.options.find((option) => option.outcome === 'within') ?? step.options[0])?.value ?? '' };
+      return {
+        kind: 'choose',
+        value: (step.options.find((option) => option.outcome === 'within') ?? step.options[0])?.value ?? '',
+      };
     case 'reading':
       return { kind: 'reading', value: typed(readingValue(step, scene.random), step.dimension, scene) };
     case 'superheat':
@@ -90,7 +93,11 @@ function superheatAnswer(step: StepOf<'superheat'>, scene: DemoScene): Answer {
   };
 }
 
-function observation(superheatK: number, fixture: Fixture | undefined, scene: DemoScene): SuperheatObservation {
+function observation(
+  superheatK: number,
+  fixture: Fixture | undefined,
+  scene: DemoScene,
+): SuperheatObservation {
   const dewK = (fixture?.evaporatingTemperatureK ?? 263.15) + (scene.random() - 0.5) * 0.8;
   const table = findRefrigerant(scene.facts.refrigerant);
   const pressure = table && dewPressure(table, kelvin(dewK));

@@ -34,7 +34,12 @@ export class DemoInstaller {
     this.deviceCount = 0;
   }
 
-  static async begin(services: Services, caller: Caller, random: () => number, startsAt: Date): Promise<DemoInstaller> {
+  static async begin(
+    services: Services,
+    caller: Caller,
+    random: () => number,
+    startsAt: Date,
+  ): Promise<DemoInstaller> {
     const { response } = await services.sessions.registerDevice(caller.person, null, 'Demo phone');
     const own = { ...caller, deviceId: response.deviceId };
     return new DemoInstaller(services, own, response.deviceId, random, startsAt);

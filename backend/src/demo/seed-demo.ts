@@ -40,7 +40,12 @@ export async function seedDemo(services: Services, logger: Logger): Promise<void
   const builder = await services.register.addCompany('Ridgeline Builders');
   const people = await addPeople(services, accounts, own, builder);
   const admin = await callerOf(services, people.first('admin'));
-  const harbor = await addOpening(services, admin, openingOf('Harbor Street Market', '410 Harbor Street, Tillamere', 26), people);
+  const harbor = await addOpening(
+    services,
+    admin,
+    openingOf('Harbor Street Market', '410 Harbor Street, Tillamere', 26),
+    people,
+  );
   await addOpening(services, admin, openingOf('Mill Road Market', '88 Mill Road, Eastwick', 61), people);
   await importSchedule(services, await callerOf(services, people.first('lead')), harbor);
   await tellStory(services, harbor, people);
@@ -48,7 +53,11 @@ export async function seedDemo(services: Services, logger: Logger): Promise<void
 }
 
 interface DemoPeople {
-  readonly all: readonly { readonly account: DemoAccount; readonly id: PersonId; readonly companyId: CompanyId }[];
+  readonly all: readonly {
+    readonly account: DemoAccount;
+    readonly id: PersonId;
+    readonly companyId: CompanyId;
+  }[];
   first(role: Role): PersonId;
 }
 
@@ -62,7 +71,14 @@ async function addPeople(
   for (const account of accounts) {
     const companyId = account.role === 'contractor' ? builder : own;
     const { name, email, password, role } = account;
-    const id = await services.register.addPerson({ companyId, name, email, password, companyRole: role, language: 'en' });
+    const id = await services.register.addPerson({
+      companyId,
+      name,
+      email,
+      password,
+      companyRole: role,
+      language: 'en',
+    });
     all.push({ account, id, companyId });
   }
   return { all, first: (role) => all.find((person) => person.account.role === role)?.id as PersonId };
@@ -81,10 +97,16 @@ function openingOf(name: string, address: string, days: number): NewOpening {
   };
 }
 
-async function addOpening(services: Services, admin: Caller, opening: NewOpening, people: DemoPeople): Promise<OpeningId> {
+async function addOpening(
+  services: Services,
+  admin: Caller,
+  opening: NewOpening,
+  people: DemoPeople,
+): Promise<OpeningId> {
   const { id } = await services.openings.create(admin.person, opening);
   for (const { account, id: personId } of people.all) {
-    if (account.role !== 'admin') await services.register.addMember(id, admin.person.companyId, personId, account.role);
+    if (account.role !== 'admin')
+      await services.register.addMember(id, admin.person.companyId, personId, account.role);
   }
   return id;
 }
@@ -125,11 +147,20 @@ async function giveVerdict(
   const { fold } = await services.sequences.show(sequenceId);
   const outside = Object.entries(fold.steps).find(([, step]) => step.outcome === 'outside');
   if (verdict === 'sentBack' && outside) {
-    const remarks = [{ stepKey: outside[0], text: 'Above the band on this coil. Open the valve a little, wait, and read again.' }];
+    const remarks = [
+      {
+        stepKey: outside[0],
+        text: 'Above the band on this coil. Open the valve a little, wait, and read again.',
+      },
+    ];
     await services.reviews.give(lead, sequenceId, { verdict, headHash: fold.headHash, remarks });
   } else {
     const signature = demoSignature(lead.personName, random);
-    await services.reviews.give(lead, sequenceId, { verdict: 'approved', headHash: fold.headHash, signature });
+    await services.reviews.give(lead, sequenceId, {
+      verdict: 'approved',
+      headHash: fold.headHash,
+      signature,
+    });
   }
 }
 

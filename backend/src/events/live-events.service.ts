@@ -75,7 +75,8 @@ export class LiveEventsService {
   /** What happened before the first listener came is not news. */
   private async remember(): Promise<void> {
     this.seen.clear();
-    for (const row of await this.events.findRecent(this.transactions.outside, OVERLAP_S)) this.seen.set(row.id, Date.now());
+    for (const row of await this.events.findRecent(this.transactions.outside, OVERLAP_S))
+      this.seen.set(row.id, Date.now());
   }
 
   private async poll(): Promise<void> {

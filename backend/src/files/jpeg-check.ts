@@ -1,7 +1,9 @@
 import { DomainFailure } from '#shared/failures/failure';
 
 const MAX_PIXELS = 40_000_000;
-const START_OF_FRAME = new Set([0xc0, 0xc1, 0xc2, 0xc3, 0xc5, 0xc6, 0xc7, 0xc9, 0xca, 0xcb, 0xcd, 0xce, 0xcf]);
+const START_OF_FRAME = new Set([
+  0xc0, 0xc1, 0xc2, 0xc3, 0xc5, 0xc6, 0xc7, 0xc9, 0xca, 0xcb, 0xcd, 0xce, 0xcf,
+]);
 
 /**
  * Looks at a JPEG's markers (ITU-T T.81) without decoding it: cheap enough to do while the phone waits.
@@ -37,7 +39,10 @@ function findFrame(bytes: Buffer): { width: number; height: number } | null {
     const length = bytes.readUInt16BE(at + 2);
     if (length < 2) return null;
     if (marker === 0xe1) {
-      throw new DomainFailure('notAnImage', 'The picture still holds camera metadata, which may name a place.');
+      throw new DomainFailure(
+        'notAnImage',
+        'The picture still holds camera metadata, which may name a place.',
+      );
     }
     if (START_OF_FRAME.has(marker)) {
       if (at + 9 > bytes.length) return null;

@@ -60,7 +60,13 @@ export class ObjectStorage {
   async put(key: string, body: Buffer | Readable, bytes: number, contentType: string): Promise<void> {
     await this.reach(() =>
       this.client.send(
-        new PutObjectCommand({ Bucket: this.bucket, Key: key, Body: body, ContentLength: bytes, ContentType: contentType }),
+        new PutObjectCommand({
+          Bucket: this.bucket,
+          Key: key,
+          Body: body,
+          ContentLength: bytes,
+          ContentType: contentType,
+        }),
       ),
     );
   }
@@ -111,7 +117,9 @@ export class ObjectStorage {
 
   /** @throws when the store can't be reached */
   async ping(): Promise<void> {
-    await this.client.send(new HeadBucketCommand({ Bucket: this.bucket }), { abortSignal: AbortSignal.timeout(2_500) });
+    await this.client.send(new HeadBucketCommand({ Bucket: this.bucket }), {
+      abortSignal: AbortSignal.timeout(2_500),
+    });
   }
 
   close(): void {

@@ -54,7 +54,8 @@ export function errorResponse(logger: Logger): ErrorRequestHandler {
       return;
     }
     const problem = problemFor(error, requestIdOf(response));
-    if (problem.status >= 500) logger.error({ err: error, requestId: problem.requestId, path: request.path }, 'failed');
+    if (problem.status >= 500)
+      logger.error({ err: error, requestId: problem.requestId, path: request.path }, 'failed');
     if (error instanceof TemporaryFailure) response.setHeader('Retry-After', String(error.retryAfterS));
     sendProblem(response, problem);
   };

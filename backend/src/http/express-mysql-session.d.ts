@@ -4,6 +4,9 @@ declare module 'express-mysql-session' {
   /** The library ships no types; this is the part of it in use. */
   function makeStore(
     sessionModule: typeof session,
-  ): new (options: Record<string, unknown>, connection: unknown) => session.Store;
+  ): new (
+    options: Record<string, unknown>,
+    connection: unknown,
+  ) => session.Store & { close(): Promise<void> };
   export default makeStore;
 }

@@ -27,7 +27,11 @@ export interface MountOptions {
 const UUID = /^[0-9a-f]{8}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{12}$/i;
 
 /** Mounts the list of routes. Each request is authorised before its body is read. */
-export function mountRoutes(routes: readonly AnyRoute[], options: MountOptions, jsonParser: RequestHandler): Router {
+export function mountRoutes(
+  routes: readonly AnyRoute[],
+  options: MountOptions,
+  jsonParser: RequestHandler,
+): Router {
   const router = Router({ caseSensitive: true });
   for (const route of routes) {
     const readBody = route.upload ? uploadReader(route.upload.field, route.upload.maxBytes) : jsonParser;
@@ -99,7 +103,9 @@ function handler(route: AnyRoute, options: MountOptions): RequestHandler {
     if (options.checkResponses) {
       const checked = route.response.safeParse(result);
       if (!checked.success) {
-        throw new Bug(`${route.method} ${route.path} answers against its schema: ${JSON.stringify(checked.error.issues)}`);
+        throw new Bug(
+          `${route.method} ${route.path} answers against its schema: ${JSON.stringify(checked.error.issues)}`,
+        );
       }
     }
     if (route.status) response.status(route.status);
@@ -116,7 +122,8 @@ function uploadReader(field: string, maxBytes: number): RequestHandler {
   return (request: Request, response: Response, next: NextFunction) => {
     single(request, response, (error: unknown) => {
       if (error) next(error);
-      else if (!request.file) next(new DomainFailure('invalidInput', `Send one file in the field "${field}".`));
+      else if (!request.file)
+        next(new DomainFailure('invalidInput', `Send one file in the field "${field}".`));
       else next();
     });
   };

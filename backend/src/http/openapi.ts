@@ -13,7 +13,11 @@ export function openApiDocument(routes: readonly AnyRoute[]): Json {
   }
   return {
     openapi: '3.1.0',
-    info: { title: 'Firstcold', version: '1', description: 'Errors are application/problem+json (RFC 9457).' },
+    info: {
+      title: 'Firstcold',
+      version: '1',
+      description: 'Errors are application/problem+json (RFC 9457).',
+    },
     paths,
     components: {
       schemas: { Problem: jsonSchema(problemSchema) },
@@ -59,12 +63,17 @@ function requestBody(route: AnyRoute): Json {
     return { requestBody: { required: true, content: { 'multipart/form-data': { schema } } } };
   }
   if (!route.body) return {};
-  return { requestBody: { required: true, content: { 'application/json': { schema: jsonSchema(route.body) } } } };
+  return {
+    requestBody: { required: true, content: { 'application/json': { schema: jsonSchema(route.body) } } },
+  };
 }
 
 function parameters(schema: z.ZodMiniType | undefined, where: 'path' | 'query'): Json[] {
   if (!schema) return [];
-  const { properties = {}, required = [] } = jsonSchema(schema) as { properties?: Record<string, Json>; required?: string[] };
+  const { properties = {}, required = [] } = jsonSchema(schema) as {
+    properties?: Record<string, Json>;
+    required?: string[];
+  };
   return Object.entries(properties).map(([name, value]) => ({
     name,
     in: where,
@@ -74,6 +83,9 @@ function parameters(schema: z.ZodMiniType | undefined, where: 'path' | 'query'):
 }
 
 function jsonSchema(schema: z.ZodMiniType): Json {
-  const { $schema: _dialect, ...rest } = z.toJSONSchema(schema, { io: 'input', unrepresentable: 'any' }) as Json;
+  const { $schema: _dialect, ...rest } = z.toJSONSchema(schema, {
+    io: 'input',
+    unrepresentable: 'any',
+  }) as Json;
   return rest;
 }

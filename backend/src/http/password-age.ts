@@ -9,6 +9,8 @@ const FRESH_MS = 15 * 60_000;
  * @throws {DomainFailure} passwordNeeded
  */
 export function requireFreshPassword(caller: Caller): void {
-  const age = caller.passwordGivenAt ? Date.now() - caller.passwordGivenAt.getTime() : Number.POSITIVE_INFINITY;
+  const age = caller.passwordGivenAt
+    ? Date.now() - caller.passwordGivenAt.getTime()
+    : Number.POSITIVE_INFINITY;
   if (age > FRESH_MS) throw new DomainFailure('passwordNeeded', 'Give your password again to sign.');
 }

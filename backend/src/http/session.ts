@@ -9,7 +9,11 @@ export const SESSION_COOKIE = 'firstcold_session';
 export const SESSION_MS = 18 * 3_600_000;
 
 /** Sessions in MariaDB, so that any server can answer. `firstcold_session` is HttpOnly, SameSite=Strict, Secure behind TLS. */
-export function sessionMiddleware(pool: Pool, secret: string, secure: boolean): RequestHandler {
+export function sessionMiddleware(
+  pool: Pool,
+  secret: string,
+  secure: boolean,
+): { readonly handle: RequestHandler; readonly close: () => Promise<void> } {
   const Store = expressMySqlSession(session);
   const store = new Store(
     {
@@ -19,11 +23,14 @@ export function sessionMiddleware(pool: Pool, secret: string, secure: boolean): 
       expiration: SESSION_MS,
       endConnectionOnClose: false,
       disableTouch: true,
-      schema: { tableName: 'session', columnNames: { session_id: 'session_id', expires: 'expires', data: 'data' } },
+      schema: {
+        tableName: 'session',
+        columnNames: { session_id: 'session_id', expires: 'expires', data: 'data' },
+      },
     },
     pool.promise(),
   );
-  return session({
+  const handle = session({
     name: SESSION_COOKIE,
     secret,
     store,
@@ -32,4 +39,5 @@ export function sessionMiddleware(pool: Pool, secret: string, secure: boolean): 
     rolling: false,
     cookie: { httpOnly: true, sameSite: 'strict', secure, maxAge: SESSION_MS, path: '/' },
   });
+  return { handle, close: () => store.close() };
 }

@@ -9,7 +9,11 @@ export interface FileAnswer {
 }
 
 /** Writes a stored file as the response; a client that goes away ends the reading too. */
-export async function streamFile(response: Response, file: FileAnswer, headers: Record<string, string>): Promise<void> {
+export async function streamFile(
+  response: Response,
+  file: FileAnswer,
+  headers: Record<string, string>,
+): Promise<void> {
   response.writeHead(file.contentRange ? 206 : 200, {
     'Content-Length': String(file.bytes),
     'Accept-Ranges': 'bytes',

@@ -15,7 +15,9 @@ export interface JobRun {
   progress(fraction: number): void;
 }
 
-export type JobHandlers = { readonly [K in JobKind]: (payload: JobPayloads[K], run: JobRun) => Promise<void> };
+export type JobHandlers = {
+  readonly [K in JobKind]: (payload: JobPayloads[K], run: JobRun) => Promise<void>;
+};
 
 const IDLE_MS = 700;
 const HEARTBEAT_MS = 5_000;

@@ -1,5 +1,14 @@
 import { Entity, Index, Unique } from 'typeorm';
-import { DoubleColumn, IdColumn, IntColumn, LongTextColumn, RefColumn, TextColumn, TimeColumn, WordColumn } from '../database/columns';
+import {
+  DoubleColumn,
+  IdColumn,
+  IntColumn,
+  LongTextColumn,
+  RefColumn,
+  TextColumn,
+  TimeColumn,
+  WordColumn,
+} from '../database/columns';
 
 /** Background work, written in the transaction that causes it. */
 @Entity('job')

@@ -66,7 +66,11 @@ export class JobsRepository {
   }
 
   async finish(context: Context, id: string): Promise<void> {
-    await managerOf(context).update(JobEntity, { id }, { state: 'done', progress: 1, leaseUntil: null, lastError: null });
+    await managerOf(context).update(
+      JobEntity,
+      { id },
+      { state: 'done', progress: 1, leaseUntil: null, lastError: null },
+    );
   }
 
   /** Puts a job that failed back for later, or gives it up. */

@@ -29,7 +29,11 @@ export class JobsService {
     context.afterCommit.push(() => this.nudge());
   }
 
-  async list(companyId: string, limit: number, after: string | undefined): Promise<z.infer<typeof jobListSchema>> {
+  async list(
+    companyId: string,
+    limit: number,
+    after: string | undefined,
+  ): Promise<z.infer<typeof jobListSchema>> {
     const before = after ? new Date(after) : null;
     const rows = await this.jobs.list(this.transactions.outside, companyId, limit, before);
     return {

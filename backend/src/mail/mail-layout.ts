@@ -21,7 +21,9 @@ export function layOutMail(content: MailContent): MailPayload {
 }
 
 function html({ subject, lines, link, footer }: MailContent): string {
-  const paragraphs = lines.map((line) => `<p style="margin:0 0 14px">${escapeHtml(line).replace(/\n/g, '<br>')}</p>`).join('');
+  const paragraphs = lines
+    .map((line) => `<p style="margin:0 0 14px">${escapeHtml(line).replace(/\n/g, '<br>')}</p>`)
+    .join('');
   const button = link
     ? `<p style="margin:20px 0"><a href="${escapeHtml(link.url)}" style="background:#16332D;color:#FAF7F0;padding:12px 18px;text-decoration:none;border-radius:4px;display:inline-block">${escapeHtml(link.label)}</a></p>
        <p style="margin:0 0 14px;font-size:13px;color:#4C625C;word-break:break-all">${escapeHtml(link.url)}</p>`
@@ -37,6 +39,12 @@ ${paragraphs}${button}
 }
 
 function escapeHtml(text: string): string {
-  const entities: Record<string, string> = { '&': '&amp;', '<': '&lt;', '>': '&gt;', '"': '&quot;', "'": '&#39;' };
+  const entities: Record<string, string> = {
+    '&': '&amp;',
+    '<': '&lt;',
+    '>': '&gt;',
+    '"': '&quot;',
+    "'": '&#39;',
+  };
   return text.replace(/[&<>"']/g, (character) => entities[character] ?? character);
 }

@@ -1,5 +1,13 @@
 import { Column, Entity, Index } from 'typeorm';
-import { DoubleColumn, IdColumn, IntColumn, RefColumn, TextColumn, TimeColumn, WordColumn } from '../database/columns';
+import {
+  DoubleColumn,
+  IdColumn,
+  IntColumn,
+  RefColumn,
+  TextColumn,
+  TimeColumn,
+  WordColumn,
+} from '../database/columns';
 
 @Entity('opening')
 @Index('IX_opening_company', ['companyId'])

@@ -50,7 +50,10 @@ export class OpeningsService {
     );
     const summaries = await this.summarise(outside, page);
     const last = page.at(-1);
-    return { items: summaries, next: page.length === limit && last ? `${last.openingDate} ${last.id}` : null };
+    return {
+      items: summaries,
+      next: page.length === limit && last ? `${last.openingDate} ${last.id}` : null,
+    };
   }
 
   /** Makes an opening; whoever makes it is a lead in it. */
@@ -127,7 +130,10 @@ export class OpeningsService {
       openingId && ordinal ? { openingId, ordinal: Number(ordinal) } : null,
     );
     const last = rows.at(-1);
-    return { items: rows.map(toRow), next: rows.length === limit && last ? `${last.openingId} ${last.ordinal}` : null };
+    return {
+      items: rows.map(toRow),
+      next: rows.length === limit && last ? `${last.openingId} ${last.ordinal}` : null,
+    };
   }
 
   /**
@@ -205,7 +211,13 @@ export class OpeningsService {
       address: opening.address,
       openingDate: opening.openingDate,
       contractorName: opening.contractorName,
-      counts: counts.get(opening.id as OpeningId) ?? { open: 0, underWay: 0, submitted: 0, sentBack: 0, approved: 0 },
+      counts: counts.get(opening.id as OpeningId) ?? {
+        open: 0,
+        underWay: 0,
+        submitted: 0,
+        sentBack: 0,
+        approved: 0,
+      },
     }));
   }
 

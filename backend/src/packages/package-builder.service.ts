@@ -96,7 +96,11 @@ export class PackageBuilder {
     };
   }
 
-  private async write(row: PackageRow, signal: AbortSignal, onProgress: (fraction: number) => void): Promise<Written> {
+  private async write(
+    row: PackageRow,
+    signal: AbortSignal,
+    onProgress: (fraction: number) => void,
+  ): Promise<Written> {
     await mkdir(this.place.temporaryFolder, { recursive: true });
     const file = join(this.place.temporaryFolder, `package-${row.id}-${randomUUID()}.pdf`);
     const hash = createHash('sha256');
@@ -109,7 +113,10 @@ export class PackageBuilder {
     const out = createWriteStream(file);
     hashing.pipe(out);
     try {
-      const { pages } = await writePackageDocument(await this.contentOf(row), hashing, { signal, onProgress });
+      const { pages } = await writePackageDocument(await this.contentOf(row), hashing, {
+        signal,
+        onProgress,
+      });
       hashing.end();
       await finished(out);
       return { file, pages, bytes: (await stat(file)).size, sha256: hash.digest('hex') };
@@ -168,7 +175,10 @@ export class PackageBuilder {
       openingId,
       version: row.version,
       sha256: written.sha256,
-      heads: sequencesOf(JSON.parse(row.heads) as PackageSnapshot).map(({ sequenceId, headHash }) => [sequenceId, headHash]),
+      heads: sequencesOf(JSON.parse(row.heads) as PackageSnapshot).map(({ sequenceId, headHash }) => [
+        sequenceId,
+        headHash,
+      ]),
     });
     await this.transactions.run(async (context) => {
       const current = await this.packages.lock(context, id);
@@ -203,7 +213,12 @@ export class PackageBuilder {
     }
   }
 
-  private async giveUp(id: PackageId, openingId: OpeningId, companyId: string, error: unknown): Promise<void> {
+  private async giveUp(
+    id: PackageId,
+    openingId: OpeningId,
+    companyId: string,
+    error: unknown,
+  ): Promise<void> {
     const failure = (error instanceof Error ? error.message : String(error)).slice(0, 500);
     await this.transactions.run(async (context) => {
       await this.packages.update(context, id, { state: 'failed', failure });
@@ -211,7 +226,12 @@ export class PackageBuilder {
     });
   }
 
-  private async announce(context: Context, companyId: string, openingId: OpeningId, packageId: PackageId): Promise<void> {
+  private async announce(
+    context: Context,
+    companyId: string,
+    openingId: OpeningId,
+    packageId: PackageId,
+  ): Promise<void> {
     await this.events.announce(context, companyId, { kind: 'packageChanged', openingId, packageId });
   }
 }

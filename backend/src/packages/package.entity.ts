@@ -1,5 +1,15 @@
 import { Entity, Unique } from 'typeorm';
-import { DoubleColumn, HashColumn, IdColumn, IntColumn, LongTextColumn, RefColumn, TextColumn, TimeColumn, WordColumn } from '../database/columns';
+import {
+  DoubleColumn,
+  HashColumn,
+  IdColumn,
+  IntColumn,
+  LongTextColumn,
+  RefColumn,
+  TextColumn,
+  TimeColumn,
+  WordColumn,
+} from '../database/columns';
 
 @Entity('handover_package')
 @Unique('UQ_handover_package_version', ['openingId', 'version'])

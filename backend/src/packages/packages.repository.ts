@@ -91,7 +91,11 @@ export class PackagesRepository {
     return { systems: [...systems.values()] };
   }
 
-  private async query(context: Context, where: string, parameters: Record<string, string>): Promise<PackageRow[]> {
+  private async query(
+    context: Context,
+    where: string,
+    parameters: Record<string, string>,
+  ): Promise<PackageRow[]> {
     const { entities, raw } = await managerOf(context)
       .createQueryBuilder(PackageEntity, 'h')
       .innerJoin('opening', 'o', 'o.id = h.opening_id')

@@ -86,7 +86,10 @@ export class PackagesService {
         installationSignature: null,
         failure: null,
       });
-      await this.jobs.enqueue(context, opening.companyId, 'package', `package ${id}`, { packageId: id, openingId });
+      await this.jobs.enqueue(context, opening.companyId, 'package', `package ${id}`, {
+        packageId: id,
+        openingId,
+      });
       await this.record(context, caller, opening.companyId, openingId, id, 'package.requested');
     });
     return this.show(id);
@@ -98,7 +101,9 @@ export class PackagesService {
       const row = await this.packages.lock(context, id);
       if (!row) throw new DomainFailure('notFound', 'There is no such package.');
       if (row.state !== 'building') {
-        throw new DomainFailure('wrongState', 'This package is not being built any more.', [], { state: row.state });
+        throw new DomainFailure('wrongState', 'This package is not being built any more.', [], {
+          state: row.state,
+        });
       }
       await this.packages.update(context, id, { state: 'cancelled' });
       await this.record(context, caller, row.companyId, row.openingId as OpeningId, id, 'package.cancelled');
@@ -122,14 +127,20 @@ export class PackagesService {
    *
    * @throws {DomainFailure} changedMeanwhile: the hash is of another document; alreadyThere; passwordNeeded
    */
-  async accept(caller: Caller, id: PackageId, sha256: string, signature: Signature): Promise<HandoverPackage> {
+  async accept(
+    caller: Caller,
+    id: PackageId,
+    sha256: string,
+    signature: Signature,
+  ): Promise<HandoverPackage> {
     requireFreshPassword(caller);
     if (!isSigned(signature)) throw new DomainFailure('invalidInput', 'The signature box is empty.');
     const row = await this.find(id);
     if (row.state !== 'issued') {
       throw new DomainFailure('wrongState', 'This package is not issued.', [], { state: row.state });
     }
-    if (row.sha256 !== sha256) throw new DomainFailure('changedMeanwhile', 'This is not the document that you read.');
+    if (row.sha256 !== sha256)
+      throw new DomainFailure('changedMeanwhile', 'This is not the document that you read.');
     const signed = { ...signature, printedName: caller.personName };
     const createdAt = new Date();
     const statement = canonicalJson({
@@ -169,7 +180,13 @@ export class PackagesService {
     id: PackageId,
     action: string,
   ): Promise<void> {
-    await this.audit.append(context, { companyId, openingId, personId: caller.person.id, action, subject: id });
+    await this.audit.append(context, {
+      companyId,
+      openingId,
+      personId: caller.person.id,
+      action,
+      subject: id,
+    });
     await this.events.announce(context, companyId, { kind: 'packageChanged', openingId, packageId: id });
   }
 

@@ -68,7 +68,10 @@ export class PeopleRepository {
   }
 
   async findPasswordHash(context: Context, id: PersonId): Promise<string | null> {
-    const person = await managerOf(context).findOne(PersonEntity, { where: { id }, select: { id: true, passwordHash: true } });
+    const person = await managerOf(context).findOne(PersonEntity, {
+      where: { id },
+      select: { id: true, passwordHash: true },
+    });
     return person?.passwordHash ?? null;
   }
 
@@ -80,7 +83,9 @@ export class PeopleRepository {
   async findOfOpening(
     context: Context,
     openingId: OpeningId,
-  ): Promise<{ id: PersonId; name: string; email: string; language: Language; role: Role; companyName: string }[]> {
+  ): Promise<
+    { id: PersonId; name: string; email: string; language: Language; role: Role; companyName: string }[]
+  > {
     return managerOf(context).query(
       `SELECT p.id, p.name, p.email, p.language, m.role, c.name AS companyName
          FROM membership m JOIN person p ON p.id = m.person_id JOIN company c ON c.id = p.company_id
@@ -125,7 +130,12 @@ export class PeopleRepository {
   }
 
   /** Ends a role in an opening: what the person still has on a phone will be held, not dropped. */
-  async endMembership(context: Context, openingId: OpeningId, personId: PersonId, endedAt: Date): Promise<void> {
+  async endMembership(
+    context: Context,
+    openingId: OpeningId,
+    personId: PersonId,
+    endedAt: Date,
+  ): Promise<void> {
     await managerOf(context).update(MembershipEntity, { openingId, personId }, { endedAt });
   }
 }

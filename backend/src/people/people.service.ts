@@ -32,7 +32,9 @@ export class PeopleService {
   async recipients(
     context: Context,
     openingId: OpeningId,
-  ): Promise<{ id: PersonId; name: string; email: string; language: Language; role: Role; companyName: string }[]> {
+  ): Promise<
+    { id: PersonId; name: string; email: string; language: Language; role: Role; companyName: string }[]
+  > {
     return this.people.findOfOpening(context, openingId);
   }
 

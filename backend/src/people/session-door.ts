@@ -39,7 +39,9 @@ export class SessionDoor {
     const person = request.user as KnownPerson | undefined;
     if (!person) throw new DomainFailure('wrongCredentials', 'The address or the password is not right.');
     // A new id at sign-in: one that was planted before is worth nothing after.
-    await new Promise<void>((resolve, reject) => request.session.regenerate((error) => (error ? reject(error) : resolve())));
+    await new Promise<void>((resolve, reject) =>
+      request.session.regenerate((error) => (error ? reject(error) : resolve())),
+    );
     request.session.personId = person.id;
     request.session.passwordGivenAt = Date.now();
     await save(request);
@@ -50,7 +52,9 @@ export class SessionDoor {
   }
 
   async signOut(request: Request, response: Response): Promise<void> {
-    await new Promise<void>((resolve, reject) => request.session.destroy((error) => (error ? reject(error) : resolve())));
+    await new Promise<void>((resolve, reject) =>
+      request.session.destroy((error) => (error ? reject(error) : resolve())),
+    );
     response.clearCookie(SESSION_COOKIE, { path: '/' });
     this.dropDevice(response);
   }
@@ -89,7 +93,9 @@ function isUuid(text: string | null): boolean {
 }
 
 function save(request: Request): Promise<void> {
-  return new Promise((resolve, reject) => request.session.save((error) => (error ? reject(error) : resolve())));
+  return new Promise((resolve, reject) =>
+    request.session.save((error) => (error ? reject(error) : resolve())),
+  );
 }
 
 function run(handler: RequestHandler, request: Request, response: Response): Promise<void> {

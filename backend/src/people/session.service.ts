@@ -34,7 +34,8 @@ export class SessionService {
     await this.limit.check(email, address);
     const known = await this.people.findCredentials(this.transactions.outside, email);
     const right = await isPassword(known?.passwordHash ?? null, password);
-    const person = right && known?.isActive ? await this.people.findActive(this.transactions.outside, known.id) : null;
+    const person =
+      right && known?.isActive ? await this.people.findActive(this.transactions.outside, known.id) : null;
     if (!person) {
       await this.limit.countFailure(email, address);
       throw new DomainFailure('wrongCredentials', 'The address or the password is not right.');
@@ -50,7 +51,12 @@ export class SessionService {
   }
 
   /** @throws {DomainFailure} wrongCredentials; tooManyTries */
-  async checkPasswordAgain(personId: PersonId, email: string, password: string, address: string): Promise<void> {
+  async checkPasswordAgain(
+    personId: PersonId,
+    email: string,
+    password: string,
+    address: string,
+  ): Promise<void> {
     await this.limit.check(email, address);
     const hash = await this.people.findPasswordHash(this.transactions.outside, personId);
     if (await isPassword(hash, password)) return;

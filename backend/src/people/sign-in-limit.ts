@@ -2,6 +2,7 @@ import { createHash } from 'node:crypto';
 import type { Pool } from 'mysql2';
 import { RateLimiterMySQL, RateLimiterRes } from 'rate-limiter-flexible';
 import { DomainFailure } from '#shared/failures/failure';
+import { managerOf, type Context } from '../database/transactions';
 
 const WINDOW_S = 900;
 
@@ -19,7 +20,8 @@ export class SignInLimit {
       tableName: 'sign_in_limit',
       tableCreated: true,
       duration: WINDOW_S,
-      clearExpiredByTimeout: true,
+      // Its own timer would outlive the server; expired rows go with the other sweeping.
+      clearExpiredByTimeout: false,
     };
     this.perAccount = new RateLimiterMySQL({ ...shared, keyPrefix: 'account', points: 8 });
     this.perPlace = new RateLimiterMySQL({ ...shared, keyPrefix: 'place', points: 60 });
@@ -27,13 +29,21 @@ export class SignInLimit {
 
   /** @throws {DomainFailure} tooManyTries, with the seconds to wait */
   async check(email: string, place: string): Promise<void> {
-    const states = await Promise.all([this.perAccount.get(accountKey(email, place)), this.perPlace.get(place)]);
+    const states = await Promise.all([
+      this.perAccount.get(accountKey(email, place)),
+      this.perPlace.get(place),
+    ]);
     const spent = states.find((state) => state !== null && state.remainingPoints <= 0);
     if (spent) throw tooMany(spent);
   }
 
   async countFailure(email: string, place: string): Promise<void> {
     await Promise.all([count(this.perAccount, accountKey(email, place)), count(this.perPlace, place)]);
+  }
+
+  /** Removes what has run out. */
+  async sweep(context: Context): Promise<void> {
+    await managerOf(context).query('DELETE FROM sign_in_limit WHERE expire < ? LIMIT 5000', [Date.now()]);
   }
 
   async forget(email: string, place: string): Promise<void> {
@@ -56,5 +66,7 @@ function accountKey(email: string, place: string): string {
 
 function tooMany(state: RateLimiterRes): DomainFailure {
   const waitS = Math.ceil(state.msBeforeNext / 1000);
-  return new DomainFailure('tooManyTries', `Too many tries. Wait ${Math.ceil(waitS / 60)} minutes.`, [], { waitS });
+  return new DomainFailure('tooManyTries', `Too many tries. Wait ${Math.ceil(waitS / 60)} minutes.`, [], {
+    waitS,
+  });
 }

@@ -11,7 +11,10 @@ const QUERIES = {
 /** To whom things belong: the first question of every access decision. */
 export class SubjectsRepository {
   async find(context: Context, kind: keyof typeof QUERIES, id: string): Promise<AccessSubject | null> {
-    const rows: { companyId: CompanyId; openingId: OpeningId }[] = await managerOf(context).query(QUERIES[kind], [id]);
+    const rows: { companyId: CompanyId; openingId: OpeningId }[] = await managerOf(context).query(
+      QUERIES[kind],
+      [id],
+    );
     return rows[0] ?? null;
   }
 }

@@ -1,5 +1,13 @@
 import { Entity, Index, Unique } from 'typeorm';
-import { DoubleColumn, IdColumn, IntColumn, RefColumn, TextColumn, TimeColumn, WordColumn } from '../database/columns';
+import {
+  DoubleColumn,
+  IdColumn,
+  IntColumn,
+  RefColumn,
+  TextColumn,
+  TimeColumn,
+  WordColumn,
+} from '../database/columns';
 
 @Entity('circuit')
 @Unique('UQ_circuit_code', ['openingId', 'code'])

@@ -1,5 +1,13 @@
 import { Entity, Unique } from 'typeorm';
-import { DoubleColumn, IdColumn, IntColumn, RefColumn, TextColumn, TimeColumn, WordColumn } from '../database/columns';
+import {
+  DoubleColumn,
+  IdColumn,
+  IntColumn,
+  RefColumn,
+  TextColumn,
+  TimeColumn,
+  WordColumn,
+} from '../database/columns';
 
 @Entity('fixture')
 @Unique('UQ_fixture_tag', ['circuitId', 'tag'])

@@ -22,7 +22,11 @@ type OpeningFacts = Pick<OpeningEntity, 'id' | 'name' | 'elevationM' | 'unitSyst
 
 export class PlantRepository {
   /** The whole plant of an opening: a few hundred rows in five queries, whatever its size. */
-  async findPlant(context: Context, openingId: OpeningId, circuitIds?: readonly CircuitId[]): Promise<PlantRows> {
+  async findPlant(
+    context: Context,
+    openingId: OpeningId,
+    circuitIds?: readonly CircuitId[],
+  ): Promise<PlantRows> {
     const manager = managerOf(context);
     const standing = { openingId, removedAt: IsNull() };
     const ofCircuits = circuitIds ? { ...standing, circuitId: In([...circuitIds]) } : standing;
@@ -78,7 +82,12 @@ export class PlantRepository {
     return managerOf(context).countBy(CircuitEntity, { openingId, id: In([...ids]), removedAt: IsNull() });
   }
 
-  async assign(context: Context, openingId: OpeningId, ids: readonly CircuitId[], personId: string | null): Promise<void> {
+  async assign(
+    context: Context,
+    openingId: OpeningId,
+    ids: readonly CircuitId[],
+    personId: string | null,
+  ): Promise<void> {
     await managerOf(context).update(CircuitEntity, { openingId, id: In([...ids]) }, { assigneeId: personId });
   }
 }
@@ -123,7 +132,9 @@ function specificationOf(
     },
     circuit: {
       ...circuitFacts(circuit),
-      fixtures: plant.fixtures.filter((row) => row.circuitId === circuit.id).map((row) => fixtureOf(row, plant.coils)),
+      fixtures: plant.fixtures
+        .filter((row) => row.circuitId === circuit.id)
+        .map((row) => fixtureOf(row, plant.coils)),
     },
   };
 }

@@ -10,7 +10,10 @@ type OpeningFacts = Parameters<typeof specificationsOf>[0];
 export class PlantService {
   constructor(private readonly plant: PlantRepository) {}
 
-  async systemsOf(context: Context, openingId: OpeningId): Promise<{ id: string; name: string; refrigerant: string }[]> {
+  async systemsOf(
+    context: Context,
+    openingId: OpeningId,
+  ): Promise<{ id: string; name: string; refrigerant: string }[]> {
     return this.plant.findSystems(context, openingId);
   }
 
@@ -34,7 +37,10 @@ export class PlantService {
     const unique = [...new Set(circuitIds)];
     if ((await this.plant.countCircuits(context, openingId, unique)) !== unique.length) {
       throw new DomainFailure('invalidInput', 'Some of these circuits are not of this opening.', [
-        { path: 'body.circuitIds', message: 'A circuit is unknown here, or was removed by a later schedule.' },
+        {
+          path: 'body.circuitIds',
+          message: 'A circuit is unknown here, or was removed by a later schedule.',
+        },
       ]);
     }
     await this.plant.assign(context, openingId, unique, personId);

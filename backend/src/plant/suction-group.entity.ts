@@ -1,5 +1,13 @@
 import { Entity, Unique } from 'typeorm';
-import { DoubleColumn, IdColumn, IntColumn, RefColumn, TextColumn, TimeColumn, WordColumn } from '../database/columns';
+import {
+  DoubleColumn,
+  IdColumn,
+  IntColumn,
+  RefColumn,
+  TextColumn,
+  TimeColumn,
+  WordColumn,
+} from '../database/columns';
 
 @Entity('suction_group')
 @Unique('UQ_suction_group_name', ['systemId', 'name'])

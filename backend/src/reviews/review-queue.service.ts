@@ -22,12 +22,20 @@ export class ReviewQueueService {
     after: string | undefined,
   ): Promise<z.infer<typeof queueSchema>> {
     const ids = (await this.reviewable(person)).filter((id) => only === undefined || id === only);
-    const items = await this.queue.findPage(this.transactions.outside, ids, person.id, limit, parseCursor(after));
+    const items = await this.queue.findPage(
+      this.transactions.outside,
+      ids,
+      person.id,
+      limit,
+      parseCursor(after),
+    );
     const last = items.at(-1);
     return {
       items,
       next:
-        items.length === limit && last ? `${last.outsideCount === 0 ? 1 : 0} ${last.submittedAt} ${last.sequenceId}` : null,
+        items.length === limit && last
+          ? `${last.outsideCount === 0 ? 1 : 0} ${last.submittedAt} ${last.sequenceId}`
+          : null,
     };
   }
 

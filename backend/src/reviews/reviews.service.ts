@@ -40,7 +40,11 @@ export class ReviewsService {
    * @throws {DomainFailure} wrongState: not submitted; changedMeanwhile: something arrived since the lead looked;
    *   fourEyes: the lead recorded some of it; passwordNeeded; invalidInput: a remark on a step that isn't there
    */
-  async give(caller: Caller, id: SequenceId, request: ReviewRequest): Promise<{ state: SequenceState; headHash: string }> {
+  async give(
+    caller: Caller,
+    id: SequenceId,
+    request: ReviewRequest,
+  ): Promise<{ state: SequenceState; headHash: string }> {
     if (request.verdict === 'approved') {
       requireFreshPassword(caller);
       checkSignature(request.signature);
@@ -63,13 +67,19 @@ export class ReviewsService {
     });
   }
 
-  private bodyOf(caller: Caller, sequenceId: SequenceId, stepListHash: string, request: ReviewRequest): EntryBody {
+  private bodyOf(
+    caller: Caller,
+    sequenceId: SequenceId,
+    stepListHash: string,
+    request: ReviewRequest,
+  ): EntryBody {
     const content: EntryContent = {
       kind: 'review',
       verdict: request.verdict,
       headHash: request.headHash,
       remarks: request.verdict === 'sentBack' ? request.remarks : [],
-      signature: request.verdict === 'approved' ? { ...request.signature, printedName: caller.personName } : null,
+      signature:
+        request.verdict === 'approved' ? { ...request.signature, printedName: caller.personName } : null,
       meaning: request.verdict === 'approved' ? APPROVAL_MEANING : null,
     };
     return {
@@ -150,13 +160,18 @@ function checkSignature(signature: Signature): void {
 
 function checkVerdict(fold: FoldState, steps: readonly Step[], request: ReviewRequest, caller: Caller): void {
   if (!transitionFor(fold.state, request.verdict)) {
-    throw new DomainFailure('wrongState', `This circuit is ${fold.state}, not submitted.`, [], { state: fold.state });
+    throw new DomainFailure('wrongState', `This circuit is ${fold.state}, not submitted.`, [], {
+      state: fold.state,
+    });
   }
   if (fold.headHash !== request.headHash) {
     throw new DomainFailure('changedMeanwhile', 'Something arrived since you opened it. Look at it again.');
   }
   if (request.verdict === 'approved' && fold.recorders.includes(caller.person.id)) {
-    throw new DomainFailure('fourEyes', 'You recorded some of this yourself. A second person has to approve it.');
+    throw new DomainFailure(
+      'fourEyes',
+      'You recorded some of this yourself. A second person has to approve it.',
+    );
   }
   if (request.verdict !== 'sentBack') return;
   const known = new Set(steps.map((step) => step.key));

@@ -19,7 +19,12 @@ export class SentBackNotice {
     private readonly publicUrl: string,
   ) {}
 
-  async send(context: Context, leadName: string, locked: LockedForReview, remarks: readonly Remark[]): Promise<void> {
+  async send(
+    context: Context,
+    leadName: string,
+    locked: LockedForReview,
+    remarks: readonly Remark[],
+  ): Promise<void> {
     const opening = await this.openings.find(context, locked.openingId);
     const [specification] = await this.plant.specifications(context, opening, [locked.circuitId]);
     const recorders = new Set(await this.desk.recorders(context, locked.id));

@@ -38,11 +38,24 @@ export function mergeSchedule(
   const find = finders(known);
   let circuitOrdinal = 0;
   for (const [systemOrdinal, { suctionGroups, ...facts }] of schedule.systems.entries()) {
-    const system = { ...owner, id: find.system(facts.name)?.id ?? newId(), ...facts, ordinal: systemOrdinal, removedAt: null };
+    const system = {
+      ...owner,
+      id: find.system(facts.name)?.id ?? newId(),
+      ...facts,
+      ordinal: systemOrdinal,
+      removedAt: null,
+    };
     out.systems.push(system);
     for (const [groupOrdinal, { circuits, ...groupFacts }] of suctionGroups.entries()) {
       const id = find.suctionGroup(system.id, groupFacts.name)?.id ?? newId();
-      out.suctionGroups.push({ ...owner, id, systemId: system.id, ...groupFacts, ordinal: groupOrdinal, removedAt: null });
+      out.suctionGroups.push({
+        ...owner,
+        id,
+        systemId: system.id,
+        ...groupFacts,
+        ordinal: groupOrdinal,
+        removedAt: null,
+      });
       for (const circuit of circuits) {
         addCircuit(out, owner, { ...circuit, suctionGroupId: id, ordinal: circuitOrdinal }, find, newId);
         circuitOrdinal += 1;
@@ -76,7 +89,8 @@ function addCircuit(
     removedAt: null,
   };
   out.circuits.push(row);
-  for (const [ordinal, fixture] of fixtures.entries()) addFixture(out, owner, id, fixture, ordinal, find, newId);
+  for (const [ordinal, fixture] of fixtures.entries())
+    addFixture(out, owner, id, fixture, ordinal, find, newId);
 }
 
 function addFixture(
@@ -120,9 +134,14 @@ function finders(known: PlantRows) {
 }
 
 function withRemoved(out: Lists, known: PlantRows, removedAt: Date): PlantRows {
-  const gone = <T extends { id: string; removedAt: Date | null }>(now: readonly T[], before: readonly T[]): T[] => {
+  const gone = <T extends { id: string; removedAt: Date | null }>(
+    now: readonly T[],
+    before: readonly T[],
+  ): T[] => {
     const kept = new Set(now.map((row) => row.id));
-    return before.filter((row) => row.removedAt === null && !kept.has(row.id)).map((row) => ({ ...row, removedAt }));
+    return before
+      .filter((row) => row.removedAt === null && !kept.has(row.id))
+      .map((row) => ({ ...row, removedAt }));
   };
   return {
     systems: [...out.systems, ...gone(out.systems, known.systems)],

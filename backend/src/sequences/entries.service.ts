@@ -46,11 +46,17 @@ export class EntriesService {
     const ownDevices = new Set<string>(caller.deviceId ? [caller.deviceId] : []);
     for (const [index, sent] of batch.entries()) {
       const checked = await this.check(caller, sent, ownDevices);
-      if (typeof checked === 'string') results[index] = { result: 'refused', id: idOf(sent.body), reason: checked };
-      else bySequence.set(checked.sequenceId, [...(bySequence.get(checked.sequenceId) ?? []), item(index, checked, sent)]);
+      if (typeof checked === 'string')
+        results[index] = { result: 'refused', id: idOf(sent.body), reason: checked };
+      else
+        bySequence.set(checked.sequenceId, [
+          ...(bySequence.get(checked.sequenceId) ?? []),
+          item(index, checked, sent),
+        ]);
     }
     for (const [sequenceId, items] of bySequence) {
-      for (const [index, result] of await this.appendToSequence(caller, sequenceId, items)) results[index] = result;
+      for (const [index, result] of await this.appendToSequence(caller, sequenceId, items))
+        results[index] = result;
     }
     return results;
   }
@@ -66,7 +72,8 @@ export class EntriesService {
       return `It is not an entry as documented: ${issue?.path.join('.')} ${issue?.message}`;
     }
     const body = parsed.data;
-    if (bodyHash(body) !== sent.bodyHash) return 'Its content does not match its hash: it was changed on the way.';
+    if (bodyHash(body) !== sent.bodyHash)
+      return 'Its content does not match its hash: it was changed on the way.';
     if (body.authorId !== caller.person.id) return 'It was recorded by somebody else than who sends it.';
     if (body.deviceId === null || body.content.kind === 'expansion' || body.content.kind === 'review') {
       return 'Only the server makes entries of this kind.';
@@ -113,13 +120,23 @@ export class EntriesService {
     for (const entry of items) {
       const row = byId.get(entry.body.id);
       if (row && row.bodyHash !== entry.bodyHash) {
-        known.push([entry.index, { result: 'refused', id: row.id, reason: 'Another entry has this id already.' }]);
-      } else if (row) known.push([entry.index, storedResult('alreadyStored', row, JSON.parse(row.serverPart), state)]);
+        known.push([
+          entry.index,
+          { result: 'refused', id: row.id, reason: 'Another entry has this id already.' },
+        ]);
+      } else if (row)
+        known.push([entry.index, storedResult('alreadyStored', row, JSON.parse(row.serverPart), state)]);
       else if (!inThisBatch.has(entry.body.id)) missing.push(entry);
-      else known.push([entry.index, { result: 'refused', id: entry.body.id, reason: 'It stands twice in this batch.' }]);
+      else
+        known.push([
+          entry.index,
+          { result: 'refused', id: entry.body.id, reason: 'It stands twice in this batch.' },
+        ]);
       inThisBatch.add(entry.body.id);
     }
-    return missing.length === 0 ? known : [...known, ...(await this.write(context, caller, sequenceId, missing))];
+    return missing.length === 0
+      ? known
+      : [...known, ...(await this.write(context, caller, sequenceId, missing))];
   }
 
   private async write(
@@ -144,7 +161,13 @@ export class EntriesService {
     for (const { body, bodyHash: hash } of items) {
       const standing: Standing = allowed === 'held' ? 'held' : fold.state === 'approved' ? 'late' : 'inOrder';
       const judgement = judgeContent(body, { steps, facts });
-      const next = appendToChain(fold, sequence.companyId, { body, bodyHash: hash, standing, judgement }, steps, now);
+      const next = appendToChain(
+        fold,
+        sequence.companyId,
+        { body, bodyHash: hash, standing, judgement },
+        steps,
+        now,
+      );
       fold = next.fold;
       appended.push(next.appended);
     }
@@ -204,7 +227,10 @@ function idOf(body: unknown): string | null {
 }
 
 /** The server's own judgement; the device's stays in the body as what it was. */
-function judgeContent(body: EntryBody, { steps, facts }: Pick<StepList, 'steps' | 'facts'>): Judgement | null {
+function judgeContent(
+  body: EntryBody,
+  { steps, facts }: Pick<StepList, 'steps' | 'facts'>,
+): Judgement | null {
   const { content } = body;
   if (content.kind === 'notApplicable') return plainJudgement('notApplicable');
   if (content.kind !== 'answer') return null;

@@ -1,5 +1,13 @@
 import { Entity, Index, Unique } from 'typeorm';
-import { HashColumn, IdColumn, IntColumn, LongTextColumn, RefColumn, TimeColumn, WordColumn } from '../database/columns';
+import {
+  HashColumn,
+  IdColumn,
+  IntColumn,
+  LongTextColumn,
+  RefColumn,
+  TimeColumn,
+  WordColumn,
+} from '../database/columns';
 
 /** Append-only: the application's account has no UPDATE or DELETE here. */
 @Entity('entry')

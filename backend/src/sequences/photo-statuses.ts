@@ -7,9 +7,13 @@ export function photoStatuses(
   entries: readonly StoredEntry[],
   rows: readonly Pick<PhotoEntity, 'sha256' | 'state'>[],
 ): SequenceDetail['photos'] {
-  const known = new Map(rows.map((row) => [row.sha256, row.state as SequenceDetail['photos'][number]['state']]));
+  const known = new Map(
+    rows.map((row) => [row.sha256, row.state as SequenceDetail['photos'][number]['state']]),
+  );
   const named = entries.flatMap(({ body: { content } }) =>
-    content.kind === 'answer' && content.answer.kind === 'photo' ? content.answer.photos.map((photo) => photo.sha256) : [],
+    content.kind === 'answer' && content.answer.kind === 'photo'
+      ? content.answer.photos.map((photo) => photo.sha256)
+      : [],
   );
   return [...new Set(named)].map((sha256) => ({ sha256, state: known.get(sha256) ?? 'awaited' }));
 }

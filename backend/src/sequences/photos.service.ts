@@ -6,7 +6,6 @@ import type { LiveEventsService } from '../events/live-events.service';
 import { checkJpeg } from '../files/jpeg-check';
 import type { ObjectStorage, StoredObject } from '../files/object-storage';
 import type { PhotoRenderer } from '../files/photo-renderer';
-import type { PhotoRenditions } from '../files/photo-worker';
 import type { Caller } from '../http/define-route';
 import type { JobPayloads } from '../jobs/job-kinds';
 import type { JobRun } from '../jobs/job-worker';
@@ -38,7 +37,12 @@ export class PhotosService {
    *
    * @throws {DomainFailure} notAnImage, tooLarge; invalidInput when the bytes don't have the hash of the path
    */
-  async add(caller: Caller, sequenceId: SequenceId, sha256: string, bytes: Buffer): Promise<{ sha256: string; alreadyThere: boolean }> {
+  async add(
+    caller: Caller,
+    sequenceId: SequenceId,
+    sha256: string,
+    bytes: Buffer,
+  ): Promise<{ sha256: string; alreadyThere: boolean }> {
     const { width, height } = checkJpeg(bytes);
     if (createHash('sha256').update(bytes).digest('hex') !== sha256) {
       throw new DomainFailure('invalidInput', 'The photo was changed on the way: its hash is another.', [
@@ -97,15 +101,20 @@ export class PhotosService {
     if (!photo || photo.state === 'checked') return;
     const bytes = await this.storage.getBuffer(photoKey(photo.companyId, sha256, 'full'));
     if (!bytes) throw new TemporaryFailure('The photo is not in the store yet');
-    const rendered = await this.render(bytes, run.signal);
-    if (typeof rendered !== 'string') {
+    const finding = await this.renderer.render(bytes, run.signal);
+    if (finding.ok) {
       for (const size of ['thumbnail', 'print'] as const) {
-        const content = Buffer.from(rendered[size]);
-        await this.storage.put(photoKey(photo.companyId, sha256, size), content, content.length, 'image/jpeg');
+        const content = Buffer.from(finding.renditions[size]);
+        await this.storage.put(
+          photoKey(photo.companyId, sha256, size),
+          content,
+          content.length,
+          'image/jpeg',
+        );
       }
     }
     await this.transactions.run(async (context) => {
-      const failure = typeof rendered === 'string' ? rendered : null;
+      const failure = finding.ok ? null : finding.reason;
       await this.photos.setState(context, sequenceId, sha256, failure ? 'broken' : 'checked', failure);
       const openingId = photo.openingId as never;
       await this.events.announce(context, photo.companyId, {
@@ -115,15 +124,5 @@ export class PhotosService {
         state: failure ? 'photoBroken' : 'photoChecked',
       });
     });
-  }
-
-  private async render(bytes: Buffer, signal: AbortSignal): Promise<PhotoRenditions | string> {
-    try {
-      return await this.renderer.render(bytes, signal);
-    } catch (error) {
-      // What the decoder throws for a broken picture is the finding, not a fault of ours; a stop is not a finding.
-      if (signal.aborted) throw error;
-      return (error instanceof Error ? error.message : String(error)).slice(0, 300);
-    }
   }
 }

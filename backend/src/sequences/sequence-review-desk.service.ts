@@ -35,7 +35,12 @@ export class SequenceReviewDesk {
   }
 
   /** Appends a review entry; returns the fold after it. */
-  async append(context: Context, locked: LockedForReview, body: EntryBody, bodyHash: string): Promise<FoldState> {
+  async append(
+    context: Context,
+    locked: LockedForReview,
+    body: EntryBody,
+    bodyHash: string,
+  ): Promise<FoldState> {
     const item = { body, bodyHash, standing: 'inOrder' as const, judgement: null };
     const { fold, appended } = appendToChain(locked.fold, locked.companyId, item, locked.steps, new Date());
     await this.sequences.insertEntries(context, [appended.row]);

@@ -1,5 +1,13 @@
 import { Entity, Index, Unique } from 'typeorm';
-import { HashColumn, IdColumn, IntColumn, LongTextColumn, RefColumn, TimeColumn, WordColumn } from '../database/columns';
+import {
+  HashColumn,
+  IdColumn,
+  IntColumn,
+  LongTextColumn,
+  RefColumn,
+  TimeColumn,
+  WordColumn,
+} from '../database/columns';
 
 /**
  * A sequence's row: the lock that entries are appended under, and what the entries fold to. `fold` can always be worked

@@ -31,7 +31,11 @@ export class SequencesService {
    *
    * @param upTo a position: shows the sequence as it stood then
    */
-  async show(id: SequenceId, upTo?: number, context: Context = this.transactions.outside): Promise<SequenceDetail> {
+  async show(
+    id: SequenceId,
+    upTo?: number,
+    context: Context = this.transactions.outside,
+  ): Promise<SequenceDetail> {
     const row = await this.sequences.find(context, id);
     if (!row) throw new DomainFailure('notFound', 'There is no such sequence.');
     const opening = await this.openings.find(context, row.openingId as never);

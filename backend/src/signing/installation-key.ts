@@ -1,4 +1,12 @@
-import { createHash, createPrivateKey, createPublicKey, generateKeyPairSync, sign, verify, type KeyObject } from 'node:crypto';
+import {
+  createHash,
+  createPrivateKey,
+  createPublicKey,
+  generateKeyPairSync,
+  sign,
+  verify,
+  type KeyObject,
+} from 'node:crypto';
 import { existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs';
 import { dirname } from 'node:path';
 
@@ -35,6 +43,11 @@ export class InstallationKey {
   }
 
   verify(statement: string, signature: string): boolean {
-    return verify(null, Buffer.from(statement, 'utf8'), createPublicKey(this.key), Buffer.from(signature, 'base64'));
+    return verify(
+      null,
+      Buffer.from(statement, 'utf8'),
+      createPublicKey(this.key),
+      Buffer.from(signature, 'base64'),
+    );
   }
 }

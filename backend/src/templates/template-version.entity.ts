@@ -1,5 +1,13 @@
 import { Entity, Unique } from 'typeorm';
-import { HashColumn, IdColumn, IntColumn, LongTextColumn, RefColumn, TimeColumn, WordColumn } from '../database/columns';
+import {
+  HashColumn,
+  IdColumn,
+  IntColumn,
+  LongTextColumn,
+  RefColumn,
+  TimeColumn,
+  WordColumn,
+} from '../database/columns';
 
 /** A published template version of a company; never changed, a new version is a new row. */
 @Entity('template_version')

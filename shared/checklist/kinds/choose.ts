@@ -8,10 +8,15 @@ export const chooseStepSchema = z.object({
   kind: z.literal('choose'),
   ...stepBaseShape,
   options: z
-    .array(z.object({ value: z.string(), label: textSchema, outcome: z.enum(['within', 'outside', 'recorded']) }))
+    .array(
+      z.object({ value: z.string(), label: textSchema, outcome: z.enum(['within', 'outside', 'recorded']) }),
+    )
     .check(z.minLength(2)),
 });
-export const chooseAnswerSchema = z.object({ kind: z.literal('choose'), value: z.string().check(z.maxLength(80)) });
+export const chooseAnswerSchema = z.object({
+  kind: z.literal('choose'),
+  value: z.string().check(z.maxLength(80)),
+});
 
 /** One of a few named findings; the template says which of them lie within. */
 export const chooseRules: StepRules<z.infer<typeof chooseStepSchema>, z.infer<typeof chooseAnswerSchema>> = {

@@ -7,6 +7,9 @@ export const confirmStepSchema = z.object({ kind: z.literal('confirm'), ...stepB
 export const confirmAnswerSchema = z.object({ kind: z.literal('confirm'), confirmed: z.literal(true) });
 
 /** Something looked at and found so. What isn't so is recorded as not applicable with its reason, or left open. */
-export const confirmRules: StepRules<z.infer<typeof confirmStepSchema>, z.infer<typeof confirmAnswerSchema>> = {
+export const confirmRules: StepRules<
+  z.infer<typeof confirmStepSchema>,
+  z.infer<typeof confirmAnswerSchema>
+> = {
   judge: () => plainJudgement('recorded'),
 };

@@ -19,6 +19,9 @@ export const overrideAnswerSchema = z.object({
  * Something put by hand for the work. Setting it is recorded but leaves the step open: only putting it back satisfies
  * it, and no sequence is submitted while one stands.
  */
-export const overrideRules: StepRules<z.infer<typeof overrideStepSchema>, z.infer<typeof overrideAnswerSchema>> = {
+export const overrideRules: StepRules<
+  z.infer<typeof overrideStepSchema>,
+  z.infer<typeof overrideAnswerSchema>
+> = {
   judge: (_step, answer) => ({ ...plainJudgement('recorded'), counts: answer.phase === 'putBack' }),
 };

@@ -7,7 +7,10 @@ import type { StepRules } from '../step-rules';
 import { readTypedValue, typedValueSchema } from '../typed-value';
 
 const UNIT_IDS = Object.keys(UNITS) as [UnitId, ...UnitId[]];
-const DIMENSIONS = [...new Set(Object.values(UNITS).map((unit) => unit.dimension))] as [Dimension, ...Dimension[]];
+const DIMENSIONS = [...new Set(Object.values(UNITS).map((unit) => unit.dimension))] as [
+  Dimension,
+  ...Dimension[],
+];
 
 export const readingStepSchema = z.object({
   kind: z.literal('reading'),
@@ -34,7 +37,8 @@ export const readingRules: StepRules<ReadingStep, z.infer<typeof readingAnswerSc
     if (doubt) return refusedJudgement(doubt);
     const { low, high } = step.limits;
     const slack = EDGE * Math.max(1, Math.abs(read.si));
-    const side = low !== null && read.si < low - slack ? 'low' : high !== null && read.si > high + slack ? 'high' : null;
+    const side =
+      low !== null && read.si < low - slack ? 'low' : high !== null && read.si > high + slack ? 'high' : null;
     const judged = low !== null || high !== null;
     return {
       ...plainJudgement(judged ? (side ? 'outside' : 'within') : 'recorded'),

@@ -14,6 +14,10 @@ export const signatureStepSchema = z.object({
 export const signatureAnswerSchema = z.object({ kind: z.literal('signature'), signature: signatureSchema });
 
 /** A name under the work. One made without a network says so where it is shown. */
-export const signatureRules: StepRules<z.infer<typeof signatureStepSchema>, z.infer<typeof signatureAnswerSchema>> = {
-  judge: (_step, answer) => (isSigned(answer.signature) ? plainJudgement('recorded') : refusedJudgement('emptySignature')),
+export const signatureRules: StepRules<
+  z.infer<typeof signatureStepSchema>,
+  z.infer<typeof signatureAnswerSchema>
+> = {
+  judge: (_step, answer) =>
+    isSigned(answer.signature) ? plainJudgement('recorded') : refusedJudgement('emptySignature'),
 };

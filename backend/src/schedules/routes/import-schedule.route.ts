@@ -19,5 +19,10 @@ export const importSchedule = (schedules: SchedulesService) =>
     upload: { field: 'schedule', maxBytes: MAX_BYTES },
     response: scheduleImportSchema,
     handle: ({ caller, params, query, file }) =>
-      schedules.import(caller.person, params.openingId, file?.bytes ?? Buffer.alloc(0), query.store === 'true'),
+      schedules.import(
+        caller.person,
+        params.openingId,
+        file?.bytes ?? Buffer.alloc(0),
+        query.store === 'true',
+      ),
   });

@@ -19,7 +19,8 @@ export const showPhoto = (photos: PhotosService) =>
       await streamFile(exchange.response, file, {
         'Content-Type': 'image/jpeg',
         // A thumbnail may still be the photo itself; the bytes under a hash never change.
-        'Cache-Control': query.size === 'thumbnail' ? 'private, max-age=60' : 'private, max-age=31536000, immutable',
+        'Cache-Control':
+          query.size === 'thumbnail' ? 'private, max-age=60' : 'private, max-age=31536000, immutable',
         'Content-Disposition': `inline; filename="${params.sha256.slice(0, 12)}.jpg"`,
       });
     },

@@ -1,10 +1,5 @@
-import type {
-  TypeError as ExpressionTypeError} from '@marcbachmann/cel-js';
-import {
-  EvaluationError,
-  ParseError,
-  type ParseResult,
-} from '@marcbachmann/cel-js';
+import type { TypeError as ExpressionTypeError } from '@marcbachmann/cel-js';
+import { EvaluationError, ParseError, type ParseResult } from '@marcbachmann/cel-js';
 import { ENVIRONMENTS } from './expression-environment';
 import { fieldsReadIn, forbiddenIn, type ExpressionProblem } from './expression-rules';
 import { NAMES, type Scope } from './fact-fields';

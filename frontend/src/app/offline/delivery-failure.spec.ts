@@ -1,0 +1,43 @@
+import { HttpErrorResponse } from '@angular/common/http';
+import { describe, expect, it } from '@jest/globals';
+import { TimeoutError } from 'rxjs';
+import { backOff } from './back-off';
+import { deliveryFailure, refusalReason } from './delivery-failure';
+
+const answer = (status: number, error: unknown = null) => new HttpErrorResponse({ status, error });
+
+describe('deliveryFailure', () => {
+  it.each([
+    [answer(0), 'later'],
+    [answer(500), 'later'],
+    [answer(503), 'later'],
+    [answer(429), 'later'],
+    [new TimeoutError(), 'later'],
+    [answer(401), 'signIn'],
+    [answer(400), 'refused'],
+    [answer(413), 'refused'],
+    [answer(403, { code: 'notAllowed' }), 'refused'],
+    [answer(403, { code: 'requestForged' }), 'later'],
+  ])('sorts %p as %s', (error, expected) => {
+    expect(deliveryFailure(error)).toBe(expected);
+  });
+});
+
+describe('refusalReason', () => {
+  it('is the sentence of the server', () => {
+    expect(refusalReason(answer(413, { detail: 'Too large.' }))).toBe('Too large.');
+    expect(refusalReason(answer(404))).toBe('HTTP 404');
+  });
+});
+
+describe('backOff', () => {
+  it('waits 20 s, then twice as long with each failure, up to 5 min', () => {
+    expect([0, 1, 2, 3, 9].map((failures) => backOff(failures, 0))).toEqual([
+      20_000, 20_000, 40_000, 80_000, 300_000,
+    ]);
+  });
+
+  it('spreads phones by up to a quarter', () => {
+    expect(backOff(1, 1)).toBe(25_000);
+  });
+});

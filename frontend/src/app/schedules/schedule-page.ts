@@ -1,0 +1,78 @@
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  DestroyRef,
+  inject,
+  input,
+  linkedSignal,
+  signal,
+} from '@angular/core';
+import { MatButton } from '@angular/material/button';
+import { RouterLink } from '@angular/router';
+import { TranslocoDirective } from '@jsverse/transloco';
+import type { OpeningId } from '#shared/plant/ids';
+import { Connectivity } from '../offline/connectivity';
+import { Session } from '../session/session';
+import { EmptyNote } from '../ui/notes/empty-note';
+import { OfflineNote } from '../ui/notes/offline-note';
+import { ProblemNote } from '../ui/notes/problem-note';
+import { exampleCsv, NEEDED_COLUMNS } from './schedule-example';
+import { findProblems } from './schedule-file';
+import { ScheduleUpload } from './schedule-upload';
+
+const MANY_PROBLEMS = 20;
+
+/** Takes the designer's schedule in: choose or drop a file, see what was read, import it, or see which rows are wrong. */
+@Component({
+  selector: 'app-schedule-page',
+  imports: [EmptyNote, MatButton, OfflineNote, ProblemNote, RouterLink, TranslocoDirective],
+  providers: [ScheduleUpload],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  templateUrl: './schedule-page.html',
+  styleUrl: './schedule-page.scss',
+})
+export class SchedulePage {
+  readonly openingId = input.required<OpeningId>();
+
+  private readonly session = inject(Session);
+  protected readonly upload = inject(ScheduleUpload);
+  protected readonly online = inject(Connectivity).online;
+
+  protected readonly columns = NEEDED_COLUMNS;
+  protected readonly parts = ['systems', 'suctionGroups', 'circuits', 'fixtures', 'coils'] as const;
+  protected readonly mayImport = computed(() => this.session.may('schedule.import', this.openingId()));
+  protected readonly isOver = signal(false);
+  protected readonly problems = computed(() => {
+    const state = this.upload.state();
+    return state.kind === 'refused' ? state.rows : [];
+  });
+  protected readonly isLong = computed(() => this.problems().length > MANY_PROBLEMS);
+  /** A new refusal starts unfiltered. */
+  protected readonly text = linkedSignal({ source: this.problems, computation: () => '' });
+  protected readonly found = computed(() => findProblems(this.problems(), this.text()));
+  protected readonly example = URL.createObjectURL(new Blob([exampleCsv()], { type: 'text/csv' }));
+
+  constructor() {
+    inject(DestroyRef).onDestroy(() => URL.revokeObjectURL(this.example));
+  }
+
+  protected choose(box: HTMLInputElement): void {
+    const file = box.files?.[0];
+    // So that the same file, corrected, can be chosen again.
+    box.value = '';
+    if (file) this.upload.check(this.openingId(), file);
+  }
+
+  protected drop(event: DragEvent): void {
+    event.preventDefault();
+    this.isOver.set(false);
+    const file = event.dataTransfer?.files[0];
+    if (file) this.upload.check(this.openingId(), file);
+  }
+
+  protected over(event: DragEvent): void {
+    event.preventDefault();
+    this.isOver.set(true);
+  }
+}

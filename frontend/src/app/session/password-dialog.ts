@@ -1,0 +1,92 @@
+import { ChangeDetectionStrategy, Component, inject, signal, type Injector } from '@angular/core';
+import { NonNullableFormBuilder, ReactiveFormsModule, Validators } from '@angular/forms';
+import { MatButtonModule } from '@angular/material/button';
+import { MAT_DIALOG_DATA, MatDialog, MatDialogModule, MatDialogRef } from '@angular/material/dialog';
+import { TranslocoPipe } from '@jsverse/transloco';
+import { firstValueFrom } from 'rxjs';
+import { PasswordField } from './password-field';
+import { Session } from './session';
+import { SessionApi } from './session-api';
+import { signInProblem } from './sign-in-problem';
+
+type Purpose = 'signature' | 'session';
+
+/** A small dialog with one box. It closes with `true` only when the server took the password. */
+@Component({
+  selector: 'app-password-dialog',
+  imports: [MatButtonModule, MatDialogModule, PasswordField, ReactiveFormsModule, TranslocoPipe],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  template: `
+    <form [formGroup]="form" (ngSubmit)="confirm()">
+      <h2 mat-dialog-title>{{ 'session.againTitle_' + purpose | transloco }}</h2>
+      <mat-dialog-content>
+        <p class="why">{{ 'session.againWhy_' + purpose | transloco }}</p>
+        <input
+          class="heard-only"
+          autocomplete="username"
+          readonly
+          tabindex="-1"
+          aria-hidden="true"
+          [value]="email"
+        />
+        <app-password-field [control]="form.controls.password" />
+        <p class="problem" role="alert">
+          @if (problem(); as key) {
+            {{ key | transloco }}
+          }
+        </p>
+      </mat-dialog-content>
+      <mat-dialog-actions align="end">
+        <button matButton type="button" [mat-dialog-close]="false">{{ 'session.cancel' | transloco }}</button>
+        <button matButton="filled" type="submit" [disabled]="isBusy()">
+          {{ 'session.confirm' | transloco }}
+        </button>
+      </mat-dialog-actions>
+    </form>
+  `,
+  styles: `
+    .why {
+      margin-bottom: var(--app-space-4);
+    }
+    .problem {
+      color: var(--app-plum);
+      font-weight: 500;
+      min-height: 1.5em;
+    }
+  `,
+})
+export class PasswordDialog {
+  private readonly session = inject(Session);
+  private readonly api = inject(SessionApi);
+  private readonly reference = inject<MatDialogRef<PasswordDialog, boolean>>(MatDialogRef);
+  protected readonly purpose = inject<Purpose>(MAT_DIALOG_DATA);
+  protected readonly email = this.session.me()?.email ?? '';
+  protected readonly form = inject(NonNullableFormBuilder).group({ password: ['', Validators.required] });
+  protected readonly problem = signal<string | null>(null);
+  protected readonly isBusy = signal(false);
+
+  protected async confirm(): Promise<void> {
+    if (this.form.invalid) return;
+    const { password } = this.form.getRawValue();
+    this.isBusy.set(true);
+    try {
+      if (this.purpose === 'signature') await this.api.confirmPassword(password);
+      else await this.session.signIn(this.email, password);
+      this.reference.close(true);
+    } catch (error) {
+      this.problem.set(signInProblem(error));
+    } finally {
+      this.isBusy.set(false);
+    }
+  }
+}
+
+/** Opens the dialog and waits for it. A function beside it, so that Material's dialogs load only when one opens. */
+export async function openPasswordDialog(injector: Injector, purpose: Purpose): Promise<boolean> {
+  const reference = injector.get(MatDialog).open<PasswordDialog, Purpose, boolean>(PasswordDialog, {
+    data: purpose,
+    width: '420px',
+    maxWidth: '94vw',
+  });
+  return (await firstValueFrom(reference.afterClosed())) === true;
+}

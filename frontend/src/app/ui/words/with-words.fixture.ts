@@ -1,0 +1,13 @@
+import { TranslocoTestingModule } from '@jsverse/transloco';
+import type { Language } from '#shared/checklist/text';
+import { WORDS as EN } from '../../../i18n/loader/en';
+import { WORDS as ES } from '../../../i18n/loader/es';
+
+/** The real words of both languages for a component's spec, so that a missing key shows as a failing sentence. */
+export function withWords(language: Language = 'en') {
+  return TranslocoTestingModule.forRoot({
+    langs: { en: EN, es: ES },
+    translocoConfig: { availableLangs: ['en', 'es'], defaultLang: language, reRenderOnLangChange: true },
+    preloadLangs: true,
+  });
+}

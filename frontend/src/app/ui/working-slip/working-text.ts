@@ -1,0 +1,19 @@
+import type { Judgement } from '#shared/checklist/judgement';
+import type { Language } from '#shared/checklist/text';
+import { formatQuantity } from '#shared/units/format';
+import { UNITS } from '#shared/units/unit';
+import { displayUnit, type UnitSystem } from '#shared/units/unit-system';
+
+export type WorkingLineText = { readonly label: string; readonly text: string };
+
+/** The lines of one working in the reader's units: SI inside, converted and rounded only here. */
+export function workingLines(
+  working: Judgement['working'][number],
+  unitSystem: UnitSystem,
+  language: Language,
+): readonly WorkingLineText[] {
+  return working.lines.map(({ label, value, unit }) => ({
+    label,
+    text: formatQuantity(value, displayUnit(UNITS[unit].dimension, unitSystem), language),
+  }));
+}

@@ -1,0 +1,7 @@
+import type { Routes } from '@angular/router';
+
+/** An installer's day: the circuits assigned to them, and the steps of one circuit. */
+export const WORK_ROUTES: Routes = [
+  { path: '', loadComponent: async () => (await import('./circuits/circuits-page')).CircuitsPage },
+  { path: ':sequenceId', loadComponent: async () => (await import('./sequence/sequence-page')).SequencePage },
+];
