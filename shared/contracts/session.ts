@@ -21,6 +21,9 @@ export const meSchema = z.object({
 });
 export type Me = z.infer<typeof meSchema>;
 
+/** `me` is null where nobody is signed in: asking who one is is no fault, and browsers would log one. */
+export const sessionSchema = z.object({ me: z.nullable(meSchema) });
+
 export const passwordRequestSchema = z.strictObject({
   password: z.string().check(z.minLength(1), z.maxLength(256)),
 });

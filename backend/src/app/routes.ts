@@ -37,7 +37,7 @@ export function listRoutes(services: Services): readonly AnyRoute[] {
     showHealth(services.health),
     showInstallationKey(services.key),
     signIn(services.door),
-    showSession(services.sessions),
+    showSession(services.door),
     signOut(services.door),
     givePasswordAgain(services.door, services.sessions),
     setLanguage(services.sessions),

@@ -51,6 +51,12 @@ export class SessionDoor {
     return toMe(person);
   }
 
+  /** The person of this browser's session, or `null`. */
+  async whoIsHere(request: Request, response: Response): Promise<Me | null> {
+    const caller = await this.desk.bySession(request, response);
+    return caller && this.service.me(caller.person.id);
+  }
+
   async signOut(request: Request, response: Response): Promise<void> {
     await new Promise<void>((resolve, reject) =>
       request.session.destroy((error) => (error ? reject(error) : resolve())),

@@ -1,14 +1,14 @@
-import { meSchema } from '#shared/contracts/session';
+import { sessionSchema } from '#shared/contracts/session';
 import { defineRoute } from '../../http/define-route';
-import type { SessionService } from '../session.service';
+import type { SessionDoor } from '../session-door';
 
 /** GET /session */
-export const showSession = (sessions: SessionService) =>
+export const showSession = (door: SessionDoor) =>
   defineRoute({
     method: 'get',
     path: '/session',
-    summary: 'Who is signed in',
-    access: { kind: 'self', reason: 'Everybody may know who they are.' },
-    response: meSchema,
-    handle: ({ caller }) => sessions.me(caller.person.id),
+    summary: 'Who is signed in, if anybody is',
+    access: { kind: 'public', reason: 'Says only whom the own cookie belongs to.' },
+    response: sessionSchema,
+    handle: async ({ exchange }) => ({ me: await door.whoIsHere(exchange.request, exchange.response) }),
   });

@@ -16,9 +16,10 @@ const contract = () => import('#shared/contracts/session');
 export class SessionApi {
   private readonly http = inject(HttpClient);
 
-  async read(): Promise<Me> {
+  /** Who is signed in; `null` when nobody is. */
+  async read(): Promise<Me | null> {
     const answer = await firstValueFrom(this.http.get('/api/session', { context: quietly() }));
-    return (await contract()).meSchema.parse(answer);
+    return (await contract()).sessionSchema.parse(answer).me;
   }
 
   async signIn(email: string, password: string): Promise<Me> {

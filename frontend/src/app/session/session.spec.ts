@@ -20,7 +20,7 @@ const ME = {
 const failing = (status: number) => new HttpErrorResponse({ status });
 
 describe('Session', () => {
-  const read = jest.fn<() => Promise<Me>>();
+  const read = jest.fn<() => Promise<Me | null>>();
   const registerDevice = jest.fn<(id: string | null) => Promise<unknown>>();
 
   beforeEach(() => {
@@ -59,7 +59,7 @@ describe('Session', () => {
   });
 
   it('leaves the own work to a phone whose session is over', async () => {
-    read.mockResolvedValueOnce(ME).mockRejectedValueOnce(failing(401));
+    read.mockResolvedValueOnce(ME).mockResolvedValueOnce(null);
     const session = await start();
     await session.verify();
     expect(session.standing()).toBe('phoneOnly');

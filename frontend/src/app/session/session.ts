@@ -47,12 +47,13 @@ export class Session {
   /** Asks the server who is signed in. Without a network everything stays as it is. */
   async verify(): Promise<void> {
     try {
-      await this.welcome(await this.api.read());
+      const me = await this.api.read();
+      if (me) await this.welcome(me);
+      else this.sessionOver();
     } catch (error) {
       const failure = httpFailure(error);
       if (!failure) throw error;
-      if (failure.status === 401) this.sessionOver();
-      else if (this.current() === 'asking') this.current.set('signedOut');
+      if (this.current() === 'asking') this.current.set('signedOut');
     }
   }
 
