@@ -99,7 +99,10 @@ export class StepSheet implements OnInit {
     const { current } = this.view();
     return !!current && isUnsent(current);
   });
-  protected readonly photoUrl = computed(() => this.photos.urlFor(this.detail().id));
+  protected readonly photoUrl = computed(() => {
+    const awaited = this.detail().photos.filter((photo) => photo.state === 'awaited');
+    return this.photos.urlFor(this.detail().id, new Set(awaited.map((photo) => photo.sha256)));
+  });
   protected readonly hasQuestion = computed(
     () => this.draft.refusals().length === 0 && (this.draft.judgement()?.doubts.length ?? 0) > 0,
   );

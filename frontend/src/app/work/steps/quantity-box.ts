@@ -10,15 +10,17 @@ const MAY_BE_NEGATIVE: ReadonlySet<Dimension> = new Set([
   'gaugePressure',
 ]);
 
+let boxes = 0;
+
 /** A large box for one number as an instrument shows it, its unit beside it, and a key that turns the sign. */
 @Component({
   selector: 'app-quantity-box',
   imports: [TranslocoPipe],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <label>
-      <span class="label">{{ label() }}</span>
-      <span class="row" [class.large]="size() === 'large'">
+    <div class="box">
+      <label class="label" [attr.for]="id">{{ label() }}</label>
+      <div class="row" [class.large]="size() === 'large'">
         @if (hasSign()) {
           <button
             type="button"
@@ -30,18 +32,19 @@ const MAY_BE_NEGATIVE: ReadonlySet<Dimension> = new Set([
         }
         <input
           class="figures"
+          [id]="id"
           type="text"
           inputmode="decimal"
           autocomplete="off"
           enterkeyhint="done"
           maxlength="40"
           [value]="text()"
-          [attr.aria-describedby]="describedBy()"
+          [attr.aria-describedby]="describedBy() ? id + '-unit ' + describedBy() : id + '-unit'"
           (input)="take($event)"
         />
-        <span class="unit figures">{{ unit() }}</span>
-      </span>
-    </label>
+        <span class="unit figures" [id]="id + '-unit'">{{ unit() }}</span>
+      </div>
+    </div>
   `,
   styleUrl: './quantity-box.scss',
 })
@@ -53,6 +56,9 @@ export class QuantityBox {
   /** Id of the element that says how the value is judged. */
   readonly describedBy = input<string | null>(null);
   readonly text = model.required<string>();
+
+  // The sign key stands beside the label, never in it: touching a label's words acts on the first control inside.
+  protected readonly id = `quantity-${(boxes += 1)}`;
 
   protected readonly unit = computed(() => UNITS[displayUnit(this.dimension(), this.unitSystem())].symbol);
   protected readonly hasSign = computed(() => MAY_BE_NEGATIVE.has(this.dimension()));

@@ -1,0 +1,158 @@
+import { expect } from '@jest/globals';
+import type { Page } from 'playwright-core';
+import type { Answer, Step } from '#shared/checklist/step';
+import type { SuperheatObservation } from '#shared/checklist/kinds/superheat';
+import type { SequenceDetail } from '#shared/contracts/sequences';
+import { demoAnswer } from '../../backend/src/demo/demo-answer';
+import { drawDemoPhoto } from '../../backend/src/demo/demo-photo';
+import { steadyNumbers } from '../../backend/src/demo/steady-numbers';
+import { drawSignature } from './browser';
+
+/** Works a circuit on a phone by touching what an installer touches; only the values to type are worked out here. */
+export class InstallerHands {
+  private readonly random = steadyNumbers(41);
+  readonly kinds = new Set<string>();
+
+  constructor(
+    private readonly page: Page,
+    private readonly detail: SequenceDetail,
+  ) {}
+
+  static async on(page: Page): Promise<InstallerHands> {
+    await page.locator('app-step-sheet h2').waitFor();
+    const id = new URL(page.url()).pathname.split('/').at(-1);
+    const detail = await page.evaluate(
+      async (sequenceId) => (await fetch(`/api/sequences/${sequenceId}`)).json(),
+      id,
+    );
+    return new InstallerHands(page, detail as SequenceDetail);
+  }
+
+  /** The step that the screen shows. */
+  currentStep(): Step {
+    const key = new URL(this.page.url()).searchParams.get('at');
+    const step = this.detail.stepList.steps.find((candidate) => candidate.key === key);
+    if (!step) throw new Error(`No step ${key} on ${this.page.url()}`);
+    return step;
+  }
+
+  /** Does up to `most` steps; ends at the sheet where everything is looked over. */
+  async work(most: number, superheatExcessK = 0): Promise<number> {
+    for (let done = 0; done < most; done += 1) {
+      if (!(await this.isAtStep())) return done;
+      const step = this.currentStep();
+      const before = this.page.url();
+      try {
+        await this.doStep(step, superheatExcessK);
+        await this.page.waitForFunction((url) => document.URL !== url, before);
+      } catch (error) {
+        const seen = await this.page.locator('main').innerText();
+        throw new Error(`Stuck at ${step.key} (${step.kind}), ${this.page.url()}\n${seen}`, { cause: error });
+      }
+    }
+    return most;
+  }
+
+  async doStep(step: Step, superheatExcessK = 0): Promise<void> {
+    this.kinds.add(step.kind);
+    const answer = await demoAnswer(step, {
+      specification: this.detail.specification,
+      facts: this.detail.stepList.facts,
+      author: '',
+      random: this.random,
+      photo: async () => ({
+        sha256: '',
+        originalSha256: null,
+        bytes: 1,
+        width: 1,
+        height: 1,
+        capturedAt: null,
+      }),
+      superheatExcessK,
+    });
+    await this.enter(step, answer);
+    await this.page.locator('app-step-sheet footer button.main').click();
+  }
+
+  private async isAtStep(): Promise<boolean> {
+    await this.page.locator('app-step-sheet h2, app-submit-sheet h2').first().waitFor();
+    return (await this.page.locator('app-step-sheet h2').count()) > 0;
+  }
+
+  private async enter(step: Step, answer: Answer): Promise<void> {
+    const { page } = this;
+    switch (answer.kind) {
+      case 'confirm':
+        return;
+      case 'choose': {
+        const label =
+          step.kind === 'choose'
+            ? step.options.find((option) => option.value === answer.value)?.label.en
+            : '';
+        await page
+          .locator('app-choose-step')
+          .getByText(label ?? '', { exact: true })
+          .click();
+        return;
+      }
+      case 'reading':
+        await page.locator('app-reading-step input').fill(answer.value.text);
+        return;
+      case 'superheat':
+        await this.enterSuperheat(answer.asFound, answer.asLeft);
+        return;
+      case 'photo':
+        await this.choosePhotos(answer.photos.length);
+        return;
+      case 'note':
+        await page.getByLabel('Your words').fill(answer.text);
+        return;
+      case 'override':
+        await this.setOverride();
+        return;
+      case 'signature':
+        await drawSignature(page);
+    }
+  }
+
+  private async enterSuperheat(
+    found: SuperheatObservation | null,
+    left: SuperheatObservation,
+  ): Promise<void> {
+    if (found) await this.enterPair(found);
+    await this.page.getByText('As left', { exact: true }).click();
+    await this.enterPair(left);
+    await expect(this.page.locator('app-live-judgement').innerText()).resolves.toMatch(/°F/);
+  }
+
+  private async enterPair(observation: SuperheatObservation): Promise<void> {
+    if (observation.valve !== 'steady') throw new Error('Only steady valves are typed here');
+    await this.page.getByLabel('Suction pressure at the coil').fill(observation.pair.pressure.text);
+    await this.page.getByLabel('Line temperature at the bulb').fill(observation.pair.temperature.text);
+  }
+
+  private async choosePhotos(count: number): Promise<void> {
+    for (let index = 0; index < count; index += 1) {
+      const buffer = await drawDemoPhoto(this.random, 400);
+      await this.page
+        .locator('app-photo-step input[type=file][multiple]')
+        .setInputFiles({ name: `photo-${index}.jpg`, mimeType: 'image/jpeg', buffer });
+      await this.page.locator(`app-photo-step li:nth-child(${index + 1}) img`).waitFor();
+    }
+  }
+
+  private async setOverride(): Promise<void> {
+    const action = this.page.locator('app-step-sheet footer button.main');
+    if ((await action.innerText()) !== 'Record: put by hand') return;
+    const key = this.currentStep().key;
+    await action.click();
+    // The stepper goes on to other work while it stands; come back to put it back.
+    await this.page
+      .waitForFunction((at) => new URL(document.URL).searchParams.get('at') !== at, key)
+      .catch(() => undefined);
+    const back = new URL(this.page.url());
+    back.searchParams.set('at', key);
+    await this.page.goto(back.toString());
+    await this.page.getByRole('button', { name: 'Record: put back' }).waitFor();
+  }
+}
