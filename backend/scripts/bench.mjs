@@ -12,11 +12,12 @@ import { Interrupted, Shutdown } from './shutdown.mjs';
  */
 
 const MEASURES = ['saving', 'memory', 'queue', 'opening', 'screen', 'saturation'];
-const USAGE = `npm run bench -- [--quick] [--only NAME]… [--profile]
+const USAGE = `npm run bench -- [--quick] [--only NAME]… [--profile] [--no-build]
 
   --quick     short rounds: shows whether everything works, its figures are rough
   --only      one of ${MEASURES.join(', ')}; may be given several times
-  --profile   also lists where the server spends its processor time (slows it down)`;
+  --profile   also lists where the server spends its processor time (slows it down)
+  --no-build  measures what was built last, even if the sources have changed since`;
 
 const shutdown = new Shutdown((line) => console.log(line));
 shutdown.listen();
@@ -27,8 +28,10 @@ try {
   const options = readOptions();
   await ensureDependencies({ log: shutdown.log });
   shutdown.check();
-  const { build } = await import('./build.mjs');
-  await build({ log: shutdown.log });
+  if (options.build) {
+    const { build } = await import('./build.mjs');
+    await build({ log: shutdown.log });
+  }
   shutdown.check();
   await Promise.race([measureAll(options), shutdown.requested.then(() => shutdown.check())]);
   await stopAndLeave(0);
@@ -39,12 +42,13 @@ try {
   await failAndStop(error);
 }
 
-/** @returns {{ quick: boolean, profile: boolean, wants: (...names: string[]) => boolean }} */
+/** @returns {{ quick: boolean, profile: boolean, build: boolean, wants: (...names: string[]) => boolean }} */
 function readOptions() {
   const { values } = parseArgs({
     options: {
       quick: { type: 'boolean', default: false },
       profile: { type: 'boolean', default: false },
+      'no-build': { type: 'boolean', default: false },
       help: { type: 'boolean', default: false },
       only: { type: 'string', multiple: true },
     },
@@ -61,11 +65,12 @@ function readOptions() {
   return {
     quick: values.quick,
     profile: values.profile,
+    build: !values['no-build'],
     wants: (...names) => names.some((name) => chosen.includes(name)),
   };
 }
 
-/** @param {ReturnType<typeof readOptions>} options */
+/** @param {Pick<ReturnType<typeof readOptions>, 'quick' | 'profile' | 'wants'>} options */
 async function measureAll({ quick, profile, wants }) {
   const rows = /** @type {import('./bench/report.mjs').Row[]} */ ([]);
   const { markdown } = await import('./bench/report.mjs');
@@ -82,7 +87,7 @@ async function measureAll({ quick, profile, wants }) {
 }
 
 /**
- * @param {ReturnType<typeof readOptions>} options
+ * @param {Pick<ReturnType<typeof readOptions>, 'quick' | 'profile' | 'wants'>} options
  * @returns {Promise<import('./bench/report.mjs').Row[]>}
  */
 async function measureServer({ quick, profile, wants }) {
@@ -95,9 +100,7 @@ async function measureServer({ quick, profile, wants }) {
   const stage = await setStage(shutdown, { profileDir });
   heading('Filling in');
   const seeded = await seed(stage, log);
-  shutdown.check();
   const rows = await measureLoad(stage, seeded, { quick, profile, wants });
-  shutdown.check();
   if (wants('queue')) {
     const { measureReviewQueue } = await import('./bench/review-queue.mjs');
     heading('From a submission to the open queue');
@@ -120,7 +123,7 @@ async function measureServer({ quick, profile, wants }) {
 /**
  * @param {import('./bench/stage.mjs').Stage} stage
  * @param {import('./bench/seed.mjs').Seeded} seeded
- * @param {ReturnType<typeof readOptions>} options
+ * @param {Pick<ReturnType<typeof readOptions>, 'quick' | 'profile' | 'wants'>} options
  * @returns {Promise<import('./bench/report.mjs').Row[]>}
  */
 async function measureLoad(stage, seeded, { quick, wants }) {
@@ -142,7 +145,6 @@ async function measureLoad(stage, seeded, { quick, wants }) {
     await load.open('bare', await startBareServer(stage, ids, shutdown), 0);
     rows.push(...(await measureSaving({ load, quick, log })));
   }
-  shutdown.check();
   if (wants('memory')) {
     const { measureMemory } = await import('./bench/memory.mjs');
     heading('Memory of the server');
@@ -155,7 +157,7 @@ async function measureLoad(stage, seeded, { quick, wants }) {
 /**
  * @param {import('./bench/stage.mjs').Stage} stage
  * @param {import('./bench/seed.mjs').Seeded} seeded
- * @param {ReturnType<typeof readOptions>} options
+ * @param {Pick<ReturnType<typeof readOptions>, 'quick' | 'profile' | 'wants'>} options
  * @returns {Promise<import('./bench/report.mjs').Row[]>}
  */
 async function measurePages({ port }, seeded, { quick, wants }) {
@@ -166,14 +168,12 @@ async function measurePages({ port }, seeded, { quick, wants }) {
   const { log } = shutdown;
   const visit = await visitPages(shutdown, { port, seeded });
   if (!visit) log('  No browser found: scripts loaded on demand are not counted.');
-  shutdown.check();
   if (wants('opening')) {
     const { measureOpening } = await import('./bench/open-circuit.mjs');
     heading('Opening a circuit');
     const stepperBytes = visit && packedBytes(PAGES_FOLDER, visit.circuit);
     rows.push(...(await measureOpening({ port, seeded, quick, log, stepperBytes })));
   }
-  shutdown.check();
   if (wants('screen')) {
     heading("The phone's first screen");
     rows.push(...(await measureFirstScreen(shutdown, visit)));
@@ -181,8 +181,12 @@ async function measurePages({ port }, seeded, { quick, wants }) {
   return rows;
 }
 
-/** @param {string} text */
+/**
+ * Begins a part, unless a person has asked to stop: nothing may be started behind the stop's back.
+ * @param {string} text
+ */
 function heading(text) {
+  shutdown.check();
   console.log(`\n${text}`);
 }
 

@@ -23,7 +23,7 @@ async function main(): Promise<void> {
   const services = wireServices(config, dataSource, logger);
   await services.storage.prepare();
   if (config.seedDemo) await seedDemo(services, logger);
-  services.worker.start(config.JOB_CONCURRENCY);
+  if (config.RUN_JOBS === '1') services.worker.start();
   const sweeping = setInterval(() => {
     services.sweep().catch((error: unknown) => logger.warn({ err: error }, 'could not sweep'));
   }, SWEEP_MS);

@@ -16,7 +16,7 @@ export const PERMISSIONS = {
   'sequence.read': { scope: 'opening', roles: ['admin', 'lead', 'installer'] },
   'entry.append': { scope: 'opening', roles: ['admin', 'lead', 'installer'] },
   'photo.add': { scope: 'opening', roles: ['admin', 'lead', 'installer'] },
-  'photo.read': { scope: 'opening', roles: ['admin', 'lead', 'installer', 'contractor'] },
+  'photo.read': { scope: 'opening', roles: ['admin', 'lead', 'installer'] },
   'review.read': { scope: 'opening', roles: ['admin', 'lead'] },
   'review.give': { scope: 'opening', roles: ['admin', 'lead'] },
   'package.issue': { scope: 'opening', roles: ['admin', 'lead'] },

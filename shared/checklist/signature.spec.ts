@@ -1,5 +1,5 @@
 import { describe, expect, it } from '@jest/globals';
-import { isSigned, signaturePath, signatureSchema } from './signature';
+import { isSigned, isSignedBy, signaturePath, signatureSchema } from './signature';
 import { buildSignature } from './step.fixture';
 
 describe('isSigned', () => {
@@ -11,6 +11,26 @@ describe('isSigned', () => {
 
   it('takes a typed name for a signature', () => {
     expect(isSigned(buildSignature({ strokes: [], typed: true }))).toBe(true);
+  });
+});
+
+describe('isSignedBy', () => {
+  const typed = (printedName: string) => buildSignature({ strokes: [], typed: true, printedName });
+
+  it.each(['Renée Quill', 'renée  quill ', 'Rene\u0301e Quill'])(
+    'takes the typed name %j for Renée Quill’s',
+    (name) => {
+      expect(isSignedBy(typed(name), 'Renée Quill')).toBe(true);
+    },
+  );
+
+  it.each(['R. Quill', 'Renée', 'Renée Quill Jr', ''])('takes the typed name %j for nobody’s', (name) => {
+    expect(isSignedBy(typed(name), 'Renée Quill')).toBe(false);
+  });
+
+  it('takes what was drawn for theirs whose hand it was, and an empty box for nobody’s', () => {
+    expect(isSignedBy(buildSignature(), 'Renée Quill')).toBe(true);
+    expect(isSignedBy(buildSignature({ strokes: [] }), 'R. Quill')).toBe(false);
   });
 });
 

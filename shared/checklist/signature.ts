@@ -23,6 +23,12 @@ export function isSigned(signature: Signature): boolean {
   return signature.typed || signature.strokes.some((stroke) => stroke.length >= 4);
 }
 
+/** Whether it is this person's: drawn, or typed as exactly the name (letters' case and spaces apart). */
+export function isSignedBy(signature: Signature, name: string): boolean {
+  const plain = (text: string): string => text.normalize('NFKC').replace(/\s+/g, ' ').trim().toLowerCase();
+  return isSigned(signature) && (!signature.typed || plain(signature.printedName) === plain(name));
+}
+
 /**
  * The strokes as an SVG path, the same on the screen and in the PDF.
  *

@@ -7,6 +7,7 @@ import { photoAnswerSchema, photoStepSchema } from './kinds/photo';
 import { readingAnswerSchema, readingStepSchema } from './kinds/reading';
 import { signatureAnswerSchema, signatureStepSchema } from './kinds/signature';
 import { superheatAnswerSchema, superheatStepSchema } from './kinds/superheat';
+import { circuitSpecificationSchema } from '../plant/plant';
 import { sequenceFactsSchema } from './facts';
 import { textSchema } from './text';
 
@@ -50,3 +51,13 @@ export const stepListSchema = z.object({
   steps: z.array(stepSchema),
 });
 export type StepList = z.infer<typeof stepListSchema>;
+
+/**
+ * What one expansion binds: the steps, and the specification that they were made from. A schedule may say something
+ * else by tomorrow; what was asked and approved stays as it was.
+ */
+export const expansionDocumentSchema = z.object({
+  stepList: stepListSchema,
+  specification: circuitSpecificationSchema,
+});
+export type ExpansionDocument = z.infer<typeof expansionDocumentSchema>;

@@ -6,6 +6,7 @@ import * as z from 'zod/mini';
 interface JsonSchema {
   readonly type?: string;
   readonly format?: string;
+  readonly pattern?: string;
   readonly properties?: Readonly<Record<string, JsonSchema>>;
   readonly items?: JsonSchema;
   readonly anyOf?: readonly JsonSchema[];
@@ -50,9 +51,16 @@ function fieldsOf(schema: JsonSchema, path: string, parent: string): Field[] {
 
 const holds = (schema: JsonSchema, test: (schema: JsonSchema) => boolean): boolean =>
   test(schema) ||
-  [...(schema.anyOf ?? []), ...(schema.oneOf ?? []), ...(schema.items ? [schema.items] : [])].some((part) =>
-    holds(part, test),
-  );
+  [
+    ...(schema.anyOf ?? []),
+    ...(schema.oneOf ?? []),
+    ...(schema.allOf ?? []),
+    ...(schema.items ? [schema.items] : []),
+  ].some((part) => holds(part, test));
+
+/** A UUID by its format, or by the pattern of one where a further pattern stands beside it. */
+const isUuid = ({ format, pattern }: JsonSchema) =>
+  format === 'uuid' || (pattern?.startsWith('^([0-9a-fA-F]{8}-[0-9a-fA-F]{4}-') ?? false);
 
 const isNumeric = (schema: JsonSchema) =>
   holds(schema, ({ type }) => type === 'number' || type === 'integer');
@@ -107,15 +115,13 @@ describe('every schema of the contracts', () => {
       /^(entryBatchResponseSchema\.results|entryResultSchema)\.id$|requestId$|^(jobSchema|jobListSchema\.items)\.id$/;
     const loose = fields
       .filter(({ name, path }) => /(^id|Ids?)$/.test(name) && !echoed.test(path))
-      .filter(({ schema }) => !holds(schema, ({ format }) => format === 'uuid'));
+      .filter(({ schema }) => !holds(schema, isUuid));
     expect(loose.map(({ path }) => path)).toEqual([]);
   });
 
   it('gives each hash the form of a SHA-256', () => {
     const hashes = fields.filter(({ name }) => /(^sha256|Sha256|Hash|^hash|fingerprint)$/.test(name));
-    const loose = hashes.filter(
-      ({ schema }) => !holds(schema, (part) => (part as { pattern?: string }).pattern === '^[0-9a-f]{64}$'),
-    );
+    const loose = hashes.filter(({ schema }) => !holds(schema, (part) => part.pattern === '^[0-9a-f]{64}$'));
     expect(hashes.length).toBeGreaterThan(10);
     expect(loose.map(({ path }) => path)).toEqual([]);
   });

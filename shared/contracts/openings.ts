@@ -36,13 +36,16 @@ export const openingSummarySchema = z.object({
 export type OpeningSummary = z.infer<typeof openingSummarySchema>;
 export const openingListSchema = pageOf(openingSummarySchema);
 
+/** One line of words: no control characters, which would end up in file names, mails and documents. */
+const line = (most: number) => z.string().check(z.trim(), z.maxLength(most), z.regex(/^[^\p{Cc}]*$/u));
+
 export const newOpeningSchema = z.strictObject({
-  name: z.string().check(z.minLength(1), z.maxLength(120)),
-  address: z.string().check(z.maxLength(300)),
+  name: line(120).check(z.minLength(1)),
+  address: line(300),
   elevationM: z.number().check(z.gte(-500), z.lte(5000)),
-  openingDate: z.iso.date(),
+  openingDate: z.iso.date().check(z.regex(/^2[01]\d\d-/, 'must be in this century or the next')),
   timeZone: z.string().check(z.minLength(1), z.maxLength(64)),
-  contractorName: z.string().check(z.maxLength(120)),
+  contractorName: line(120),
   unitSystem: z.enum(UNIT_SYSTEMS),
   language: z.enum(LANGUAGES),
 });

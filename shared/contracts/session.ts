@@ -4,7 +4,7 @@ import { ROLES } from '../access/roles';
 import { companyIdSchema, deviceIdSchema, openingIdSchema, personIdSchema } from '../plant/ids';
 
 export const signInRequestSchema = z.strictObject({
-  email: z.string().check(z.minLength(3), z.maxLength(254)),
+  email: z.string().check(z.minLength(3), z.maxLength(254), z.regex(/^[^\p{Cc}]*$/u)),
   password: z.string().check(z.minLength(1), z.maxLength(256)),
 });
 

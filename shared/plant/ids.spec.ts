@@ -6,6 +6,10 @@ describe('entryIdSchema', () => {
     expect(entryIdSchema.safeParse('01890a5d-ac96-774b-bcce-b302099a8057').success).toBe(true);
   });
 
+  it('refuses the same UUID in capitals: an id that can be written in two ways is two keys', () => {
+    expect(entryIdSchema.safeParse('01890A5D-AC96-774B-BCCE-B302099A8057').success).toBe(false);
+  });
+
   it.each(['', '1', '01890a5dac96774bbcceb302099a8057', "01890a5d-ac96-774b-bcce-b302099a805' OR 1", null])(
     'refuses %j',
     (id) => {

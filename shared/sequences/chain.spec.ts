@@ -15,6 +15,7 @@ function buildChain(): StoredEntry[] {
       receivedAt: '2027-01-15T12:00:01.000Z',
       judgement: null,
       judgingVersion: 1,
+      stateAfter: 'open',
     };
     const previousHash = chain.at(-1)?.hash ?? CHAIN_START;
     const hashOfBody = bodyHash(body);
@@ -61,6 +62,7 @@ describe('findBrokenLink', () => {
     ['time of arrival', { receivedAt: '2027-01-14T12:00:01.000Z' }],
     ['standing', { standing: 'late' }],
     ['judging version', { judgingVersion: 2 }],
+    ['state after it', { stateAfter: 'approved' }],
   ] as const)('finds a changed %s', (_name, change) => {
     const chain = tamper(1, (entry) => ({ ...entry, server: { ...entry.server, ...change } }));
     expect(findBrokenLink(chain)).toEqual({ position: 1, fault: 'hash' });

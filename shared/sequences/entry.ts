@@ -3,7 +3,11 @@ import { figureSchema, judgementSchema, OUTCOMES } from '../checklist/judgement'
 import { signatureSchema } from '../checklist/signature';
 import { answerSchema } from '../checklist/step';
 import { textSchema } from '../checklist/text';
+import { SEQUENCE_STATES } from './transitions';
 import { deviceIdSchema, entryIdSchema, personIdSchema, sequenceIdSchema, sha256Schema } from '../plant/ids';
+
+/** No device lives to make more; also what the database's integers hold. */
+const MOST_ENTRIES = 2_000_000_000;
 
 const stepKeySchema = z.string().check(z.minLength(1), z.maxLength(160));
 
@@ -72,8 +76,8 @@ export const entryBodySchema = z.object({
   sequenceId: sequenceIdSchema,
   authorId: personIdSchema,
   deviceId: z.nullable(deviceIdSchema),
-  deviceCount: z.int().check(z.gte(0)),
-  countOnSequence: z.int().check(z.gte(0)),
+  deviceCount: z.int().check(z.gte(0), z.lte(MOST_ENTRIES)),
+  countOnSequence: z.int().check(z.gte(0), z.lte(MOST_ENTRIES)),
   deviceTime: z.iso.datetime(),
   stepListHash: z.nullable(sha256Schema),
   supersedes: z.nullable(entryIdSchema),
@@ -95,6 +99,11 @@ export const serverPartSchema = z.object({
   receivedAt: z.iso.datetime(),
   judgement: z.nullable(judgementSchema),
   judgingVersion: z.int(),
+  /**
+   * Where the sequence stood after this entry. A submission was measured against the steps that were asked then; who
+   * folds the history later has other steps, so what came of it is part of the record.
+   */
+  stateAfter: z.enum(SEQUENCE_STATES),
 });
 export type ServerPart = z.infer<typeof serverPartSchema>;
 

@@ -31,8 +31,13 @@ export const foldStateSchema = z.object({
   stepListHash: z.nullable(sha256Schema),
   steps: z.record(z.string(), stepFoldSchema),
   arrived: z.record(deviceIdSchema, arrivedSchema),
-  pending: z.nullable(z.object({ entryId: entryIdSchema, restsOn: z.array(restsOnSchema) })),
-  /** Whoever recorded evidence: none of them may approve. */
+  /** Submissions that wait for what they rest on: one of each author, so that nobody's replaces another's. */
+  pending: z.array(
+    z.object({ entryId: entryIdSchema, authorId: personIdSchema, restsOn: z.array(restsOnSchema) }),
+  ),
+  /** Whose submission took effect last. */
+  submittedBy: z.nullable(personIdSchema),
+  /** Whoever recorded evidence or submitted it: none of them may approve. */
   recorders: z.array(personIdSchema),
   approvedHead: z.nullable(sha256Schema),
   lateCount: z.int(),

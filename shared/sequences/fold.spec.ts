@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from '@jest/globals';
 import type { Judgement } from '../checklist/judgement';
+import type { Step } from '../checklist/step';
 import { CHAIN_START } from './chain';
 import {
   confirmStep,
@@ -19,7 +20,7 @@ import {
 import { applyEntry, emptyFold, foldEntries, hasArrived, missingSteps, type FoldEntry } from './fold';
 import { foldStateSchema } from './fold-state';
 
-const STEPS = [
+const STEPS: readonly Step[] = [
   confirmStep('a'),
   confirmStep('b'),
   overrideStep('hold'),
@@ -66,7 +67,7 @@ describe('foldEntries', () => {
     expect(keys(state)).toEqual(['b', 'hold']);
   });
 
-  it('lists whoever recorded evidence once, and neither who only submitted nor who reviewed', () => {
+  it('lists whoever recorded or submitted once, and not who reviewed', () => {
     const story = new Story(STEPS);
     const entries = [
       story.answer(1, 'a'),
@@ -75,7 +76,7 @@ describe('foldEntries', () => {
       story.submission(3),
       story.review('sentBack', hashOf(1), ['a']),
     ];
-    expect(foldEntries(entries, STEPS).recorders).toEqual([personId(1), personId(2)]);
+    expect(foldEntries(entries, STEPS).recorders).toEqual([personId(1), personId(2), personId(3)]);
   });
 
   it('tells of two answers where the second author had not seen the first', () => {
@@ -88,7 +89,7 @@ describe('foldEntries', () => {
   });
 
   it('lets a correction that does not count open the step again', () => {
-    const steps = [noteStep('n')];
+    const steps: Step[] = [noteStep('n')];
     const story = new Story(steps);
     const good = story.answer(1, 'n', { kind: 'note', text: 'Words' });
     const empty = story.answer(1, 'n', { kind: 'note', text: ' ' }, good.body.id);
@@ -124,8 +125,8 @@ describe('an override', () => {
     const before = [done(story), set];
     expect(keys(foldEntries(before, steps), steps)).toEqual(['fan']);
     const waiting = foldEntries([...before, story.submission(1, [])], steps);
-    expect(waiting).toMatchObject({ state: 'open', pending: { restsOn: [] } });
-    expect(applyEntry(waiting, back, steps)).toMatchObject({ state: 'submitted', pending: null });
+    expect(waiting).toMatchObject({ state: 'open', pending: [{ restsOn: [] }] });
+    expect(applyEntry(waiting, back, steps)).toMatchObject({ state: 'submitted', pending: [] });
   });
 
   it('stands even where its step is not required', () => {
@@ -234,6 +235,23 @@ describe('applyEntry', () => {
         expect(forward).toEqual(state);
       }),
       { numRuns: 400 },
+    );
+  });
+
+  it('follows what the server wrote down, whatever steps are asked for by now', () => {
+    fc.assert(
+      fc.property(anyEntries, (entries) => {
+        let state = emptyFold();
+        const recorded = entries.map((entry) => {
+          state = applyEntry(state, entry, STEPS);
+          return { ...entry, server: { ...entry.server, stateAfter: state.state } };
+        });
+        expect(foldEntries(recorded, STEPS)).toEqual(state);
+        const otherSteps = [confirmStep('new'), confirmStep('newer')];
+        expect(foldEntries(recorded, otherSteps)).toEqual(state);
+        expect(foldEntries(recorded, [])).toEqual(state);
+      }),
+      { numRuns: 300 },
     );
   });
 

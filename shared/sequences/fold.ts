@@ -1,4 +1,5 @@
 import type { Step } from '../checklist/step';
+import type { PersonId } from '../plant/ids';
 import { unreachable } from '../failures/unreachable';
 import { CHAIN_START } from './chain';
 import type { EntryBody, EntryContent, RestsOn, ServerPart } from './entry';
@@ -8,7 +9,9 @@ import { transitionFor } from './transitions';
 /** What the fold needs of an entry. One that isn't on the server yet has position 0 and no hash. */
 export interface FoldEntry {
   readonly body: EntryBody;
-  readonly server: Pick<ServerPart, 'position' | 'standing' | 'judgement'>;
+  /** `stateAfter` is absent on an entry that the server hasn't seen: what it does is worked out here. */
+  readonly server: Pick<ServerPart, 'position' | 'standing' | 'judgement'> &
+    Partial<Pick<ServerPart, 'stateAfter'>>;
   readonly hash: string | null;
 }
 
@@ -22,7 +25,8 @@ export function emptyFold(): FoldState {
     stepListHash: null,
     steps: {},
     arrived: {},
-    pending: null,
+    pending: [],
+    submittedBy: null,
     recorders: [],
     approvedHead: null,
     lateCount: 0,
@@ -47,7 +51,8 @@ export function applyEntry(before: FoldState, entry: FoldEntry, steps: readonly 
   if (entry.server.standing === 'late') return { ...state, lateCount: state.lateCount + 1 };
   if (entry.server.standing === 'held') return { ...state, heldCount: state.heldCount + 1 };
   applyContent(state, entry, entry.body.content);
-  settlePending(state, steps);
+  if (entry.server.stateAfter === undefined) settlePending(state, steps);
+  else if (entry.server.stateAfter !== state.state) takeEffect(state, entry.server.stateAfter);
   return state;
 }
 
@@ -78,7 +83,7 @@ function applyContent(state: FoldState, entry: FoldEntry, content: EntryContent)
       });
       return;
     case 'submission':
-      state.pending = { entryId: entry.body.id, restsOn: content.restsOn };
+      addPending(state, entry.body, content.restsOn);
       return;
     case 'expansion':
       state.stepListHash = content.stepListHash;
@@ -97,6 +102,8 @@ function applyAnswer(
   content: Extract<EntryContent, { kind: 'answer' }>,
 ): void {
   const judged = entry.server.judgement ?? content.workedOut;
+  // Kept in the chain, but no place of its own: what nobody asked must not grow the state of what was asked.
+  if (entry.server.judgement?.doubts.some((doubt) => doubt.kind === 'unknownStep')) return;
   const standing = content.answer.kind === 'override' && content.answer.phase === 'set';
   setStep(state, content.stepKey, entry, {
     outcome: judged.outcome,
@@ -122,7 +129,17 @@ function setStep(
       reopenedBy: result.counts ? null : (known?.reopenedBy ?? null),
     },
   };
-  if (!state.recorders.includes(authorId)) state.recorders = [...state.recorders, authorId];
+  addRecorder(state, authorId);
+}
+
+function addRecorder(state: FoldState, id: PersonId): void {
+  if (!state.recorders.includes(id)) state.recorders = [...state.recorders, id];
+}
+
+function addPending(state: FoldState, { id, authorId }: EntryBody, restsOn: readonly RestsOn[]): void {
+  const others = state.pending.filter((pending) => pending.authorId !== authorId);
+  state.pending = [...others, { entryId: id, authorId, restsOn: [...restsOn] }];
+  addRecorder(state, authorId);
 }
 
 function applyReview(
@@ -134,7 +151,7 @@ function applyReview(
   if (!move) return;
   state.state = move.to;
   state.round += 1;
-  state.pending = null;
+  state.pending = [];
   state.approvedHead = content.verdict === 'approved' ? content.headHash : null;
   if (content.verdict !== 'sentBack') return;
   state.steps = { ...state.steps };
@@ -164,9 +181,16 @@ export function hasArrived(state: FoldState, restsOn: readonly RestsOn[]): boole
 
 /** A submission takes effect as soon as all it rests on is there and nothing is missing; until then it waits. */
 function settlePending(state: FoldState, steps: readonly Step[]): void {
-  if (!state.pending || !hasArrived(state, state.pending.restsOn)) return;
+  if (!state.pending.some((pending) => hasArrived(state, pending.restsOn))) return;
   const move = transitionFor(state.state, 'submission');
-  if (!move || missingSteps(state, steps).length > 0) return;
-  state.state = move.to;
-  state.pending = null;
+  if (move && missingSteps(state, steps).length === 0) takeEffect(state, move.to);
+}
+
+/** The sequence is submitted now, by whoever's submission has all that it rests on. */
+function takeEffect(state: FoldState, to: FoldState['state']): void {
+  state.state = to;
+  if (to !== 'submitted') return;
+  const settled = state.pending.find((pending) => hasArrived(state, pending.restsOn)) ?? state.pending.at(-1);
+  state.submittedBy = settled?.authorId ?? state.submittedBy;
+  state.pending = [];
 }

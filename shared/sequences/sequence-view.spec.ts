@@ -99,6 +99,23 @@ describe('viewSequence', () => {
     expect(ids(again.reviews)).toEqual(ids([review]));
   });
 
+  it('shows the lead’s remark on a step that nobody has answered yet', () => {
+    const story = new Story(STEPS);
+    const entries = [
+      story.answer(1, 'a'),
+      story.answer(1, 'b', WORDS),
+      story.answer(1, 'hold', override('putBack')),
+      story.answer(1, 'glass', { kind: 'choose', value: 'clear' }),
+      story.submission(1),
+      story.review('sentBack', hashOf(5), ['extra']),
+    ];
+    const view = viewSequence(list(), entries);
+    expect(view.fold.state).toBe('sentBack');
+    expect(view.steps[4]?.remark).toMatchObject({ text: 'Again: extra' });
+    const answered = viewSequence(list(), [...entries, story.answer(1, 'extra')]);
+    expect(answered.steps[4]?.remark).toBeNull();
+  });
+
   it('puts late and held entries beside the steps, not into their history', () => {
     const story = new Story(STEPS);
     const [late, held] = [standing(story.answer(1, 'a'), 'late'), standing(story.answer(1, 'a'), 'held')];

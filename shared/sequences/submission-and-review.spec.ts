@@ -1,5 +1,5 @@
 import { describe, expect, it } from '@jest/globals';
-import { confirmStep, entryId, hashOf, noteStep, standing, stored, Story } from './entries.fixture';
+import { confirmStep, entryId, hashOf, noteStep, personId, standing, stored, Story } from './entries.fixture';
 import { applyEntry, foldEntries, missingSteps, type FoldEntry } from './fold';
 
 const STEPS = [confirmStep('a'), noteStep('b'), confirmStep('extra', { required: false })];
@@ -19,7 +19,7 @@ const missing = (state: ReturnType<typeof foldEntries>) => missingSteps(state, S
 
 describe('a submission', () => {
   it('takes effect when everything it rests on is there', () => {
-    expect(submitted().state).toMatchObject({ state: 'submitted', pending: null, round: 1 });
+    expect(submitted().state).toMatchObject({ state: 'submitted', pending: [], round: 1 });
   });
 
   it('waits for entries of another phone, and takes effect with the last of them', () => {
@@ -31,11 +31,11 @@ describe('a submission', () => {
       [2, 2],
     ]);
     const waiting = foldEntries([mine, submission], STEPS);
-    expect(waiting).toMatchObject({ state: 'open', pending: { entryId: submission.body.id } });
+    expect(waiting).toMatchObject({ state: 'open', pending: [{ entryId: submission.body.id }] });
     // Out of order: nothing is missing after this one, but the entry before it has not arrived.
     const stillWaiting = apply(waiting, more);
     expect(stillWaiting.state).toBe('open');
-    expect(apply(stillWaiting, theirs)).toMatchObject({ state: 'submitted', pending: null });
+    expect(apply(stillWaiting, theirs)).toMatchObject({ state: 'submitted', pending: [] });
   });
 
   it('waits for entries it rests on even when no required step is missing', () => {
@@ -54,16 +54,37 @@ describe('a submission', () => {
       STEPS,
     );
     expect(waiting).toMatchObject({ state: 'open' });
-    expect(waiting.pending).not.toBeNull();
+    expect(waiting.pending).toHaveLength(1);
     expect(missing(waiting)).toEqual(['b']);
   });
 
-  it('replaces an earlier one that still waits', () => {
+  it('replaces an earlier one of the same author, and nobody else’s', () => {
     const story = new Story(STEPS);
-    const first = story.submission(1, [[2, 5]]);
-    const second = story.submission(1, []);
-    const state = foldEntries([first, second], STEPS);
-    expect(state.pending).toEqual({ entryId: second.body.id, restsOn: [] });
+    const first = story.submission(1, [[3, 5]]);
+    const theirs = story.submission(2, [[3, 6]]);
+    const second = story.submission(1, [[3, 7]]);
+    const ids = foldEntries([first, theirs, second], STEPS).pending.map((pending) => pending.entryId);
+    expect(ids.sort()).toEqual([theirs.body.id, second.body.id].sort());
+  });
+
+  it('is that of whoever’s submission has all that it rests on', () => {
+    const story = new Story(STEPS);
+    const entries = [
+      story.submission(1, [[3, 9]]),
+      story.submission(2, []),
+      story.answer(3, 'a'),
+      story.answer(3, 'b', WORDS),
+    ];
+    expect(foldEntries(entries.slice(0, 3), STEPS)).toMatchObject({ state: 'open', submittedBy: null });
+    expect(foldEntries(entries, STEPS)).toMatchObject({
+      state: 'submitted',
+      submittedBy: personId(2),
+      pending: [],
+    });
+  });
+
+  it('makes a recorder of whoever submits: the same person can’t approve', () => {
+    expect(foldEntries([new Story(STEPS).submission(4)], STEPS).recorders).toEqual([personId(4)]);
   });
 
   it('does nothing to the state when it comes twice', () => {
@@ -92,10 +113,21 @@ describe('a review', () => {
     const { story, state } = submitted();
     const review = story.review('sentBack', state.headHash, ['b']);
     const back = apply(state, review);
-    expect(back).toMatchObject({ state: 'sentBack', round: 2, approvedHead: null, pending: null });
+    expect(back).toMatchObject({ state: 'sentBack', round: 2, approvedHead: null, pending: [] });
     expect(missing(back)).toEqual(['b']);
     expect(back.steps['a']?.reopenedBy).toBeNull();
     expect(back.steps['b']).toMatchObject({ reopenedBy: review.body.id, counts: true });
+  });
+
+  it('keeps a submission waiting for a step that it asks for again, even one that is not required', () => {
+    const story = new Story(STEPS);
+    const done = [story.answer(1, 'a'), story.answer(1, 'b', WORDS), story.answer(1, 'extra')];
+    const state = foldEntries([...done, story.submission(1)], STEPS);
+    const back = apply(state, story.review('sentBack', state.headHash, ['extra']));
+    expect(missing(back)).toEqual(['extra']);
+    const waiting = apply(back, story.submission(1));
+    expect(waiting.state).toBe('sentBack');
+    expect(apply(waiting, story.answer(1, 'extra')).state).toBe('submitted');
   });
 
   it('is answered by a new answer that counts, and then submitted again', () => {
@@ -117,7 +149,7 @@ describe('a review', () => {
     const second = apply(state, story.submission(1));
     const back = apply(second, story.review('sentBack', state.headHash, ['b']));
     const answered = apply(back, story.answer(1, 'b', WORDS));
-    expect(answered).toMatchObject({ state: 'sentBack', pending: null });
+    expect(answered).toMatchObject({ state: 'sentBack', pending: [] });
   });
 
   it('is answered by saying that the step does not apply', () => {
@@ -158,7 +190,7 @@ describe('an entry outside the fold', () => {
     const approved = apply(state, story.review('approved', state.headHash));
     expect(apply(approved, standing(story.submission(2), 'late'))).toMatchObject({
       state: 'approved',
-      pending: null,
+      pending: [],
     });
   });
 

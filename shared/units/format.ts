@@ -64,15 +64,15 @@ export const decimalsFor = (unit: UnitId): number => DECIMALS[unit];
  *
  * @param value any number
  * @param decimals whole number, 0 or more
- * @param locale Spanish takes a decimal comma
+ * @param _locale English and the Spanish of North America both take a decimal point, as the instruments on site do
  * @returns text, an em dash for NaN and infinities; what rounds to zero has no sign
- * @example formatNumber(-3.25, 1, 'es') // '−3,3'
+ * @example formatNumber(-3.25, 1, 'es') // '−3.3'
  */
-export function formatNumber(value: number, decimals: number, locale: NumberLocale): string {
+export function formatNumber(value: number, decimals: number, _locale: NumberLocale): string {
   if (!Number.isFinite(value)) return '—';
   const rounded = roundTo(value, decimals);
   const digits = Math.abs(rounded).toFixed(decimals);
-  return `${rounded < 0 ? MINUS : ''}${locale === 'es' ? digits.replace('.', ',') : digits}`;
+  return `${rounded < 0 ? MINUS : ''}${digits}`;
 }
 
 /**

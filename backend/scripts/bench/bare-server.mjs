@@ -44,10 +44,10 @@ app.post('/entries', express.json({ limit: '2mb' }), async (request, response) =
         HASH,
       ],
     );
-    await connection.query('UPDATE bare_sequence SET head_position = head_position + 1, head_hash = ? WHERE id = ?', [
-      bodyHash,
-      body.sequenceId,
-    ]);
+    await connection.query(
+      'UPDATE bare_sequence SET head_position = head_position + 1, head_hash = ? WHERE id = ?',
+      [bodyHash, body.sequenceId],
+    );
     await connection.commit();
   } catch (error) {
     await connection.rollback();

@@ -58,6 +58,7 @@ export class Browser {
     return new Promise((resolve, reject) => {
       const request = http.get(this.#options('GET', '/api/events'), (response) => {
         let text = '';
+        if (response.statusCode !== 200) reject(new Error(`No stream of events: ${response.statusCode}`));
         response.setEncoding('utf8');
         response.on('data', (piece) => {
           text += piece;

@@ -77,7 +77,7 @@ export async function buildEmptyPage(shutdown) {
 function workspace() {
   const own = JSON.parse(fs.readFileSync(path.join(PROJECT_ROOT, 'angular.json'), 'utf8'));
   const { build } = own.projects.firstcold.architect;
-  const { budgets: _budgets, ...production } = build.configurations.production;
+  const production = { ...build.configurations.production, budgets: [] };
   const options = {
     browser: 'src/main.ts',
     index: 'src/index.html',
@@ -97,9 +97,16 @@ function workspace() {
 
 function compilerOptions() {
   const app = JSON.parse(fs.readFileSync(path.join(PROJECT_ROOT, 'frontend', 'tsconfig.app.json'), 'utf8'));
-  const { outDir: _outDir, rootDir: _rootDir, ...options } = app.compilerOptions;
+  const ownFolders = { outDir: 'out-tsc', rootDir: '.' };
   return {
-    compilerOptions: { ...options, target: 'ES2022', strict: true, skipLibCheck: true, isolatedModules: true },
+    compilerOptions: {
+      ...app.compilerOptions,
+      ...ownFolders,
+      target: 'ES2022',
+      strict: true,
+      skipLibCheck: true,
+      isolatedModules: true,
+    },
     angularCompilerOptions: app.angularCompilerOptions,
     files: ['src/main.ts'],
   };

@@ -8,28 +8,31 @@ const REFUSED = Buffer.from('"refused"');
  * answers than it must: the generator shares its cores with what it measures.
  */
 export class LoadConnection {
-  /** @param {net.Socket} socket */
-  constructor(socket) {
-    this.socket = socket;
+  /** @param {number} port */
+  constructor(port) {
+    this.port = port;
+    /** @type {net.Socket | undefined} */
+    this.socket = undefined;
     /** @type {Buffer[]} requests that wait */
     this.queue = [];
     this.next = 0;
     this.pending = /** @type {Buffer | null} */ (null);
     this.wake = /** @type {((answer: Buffer | Error) => void) | null} */ (null);
-    socket.setNoDelay(true);
-    socket.on('data', (piece) => this.#take(piece));
-    socket.on('error', (error) => this.wake?.(error));
-    socket.on('close', () => this.wake?.(new Error('The server closed the connection')));
   }
 
-  /** @param {number} port */
-  static open(port) {
+  /** Connects anew: servers close what was idle between two rounds. */
+  open() {
     return new Promise((resolve, reject) => {
-      const socket = net.connect(port, '127.0.0.1', () => {
+      const socket = net.connect(this.port, '127.0.0.1', () => {
         socket.off('error', reject);
-        resolve(new LoadConnection(socket));
+        socket.on('error', (error) => this.wake?.(error));
+        resolve(undefined);
       });
       socket.once('error', reject);
+      socket.setNoDelay(true);
+      socket.on('data', (piece) => this.#take(piece));
+      socket.on('close', () => this.wake?.(new Error('The server closed the connection')));
+      this.socket = socket;
     });
   }
 
@@ -56,14 +59,16 @@ export class LoadConnection {
       this.next += 1;
       latencies.push(performance.now() - begin);
       if (answer.subarray(9, 12).toString('latin1') !== '200' || answer.includes(REFUSED)) {
-        throw new Error(`A request was not answered as it should be: ${answer.toString('utf8').slice(0, 900)}`);
+        throw new Error(
+          `A request was not answered as it should be: ${answer.toString('utf8').slice(0, 900)}`,
+        );
       }
     }
   }
 
   close() {
     this.wake = null;
-    this.socket.destroy();
+    this.socket?.destroy();
   }
 
   /**
@@ -78,7 +83,7 @@ export class LoadConnection {
         if (answer instanceof Error) reject(answer);
         else resolve(answer);
       };
-      this.socket.write(request);
+      this.socket?.write(request);
     });
   }
 

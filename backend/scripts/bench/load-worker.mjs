@@ -14,11 +14,11 @@ const targets = new Map();
 
 /** @param {{ name: string, port: number, device: number }} order */
 async function open({ name, port, device }) {
-  const lanes = workerData.phones.map(async (/** @type {import('./phones.mjs').PlannedInstaller} */ person) => {
+  const lanes = workerData.phones.map((/** @type {import('./phones.mjs').PlannedInstaller} */ person) => {
     const plan = phoneOf(person, device);
-    return { plan, phone: new Phone(plan, bodyHash), connection: await LoadConnection.open(port) };
+    return { plan, phone: new Phone(plan, bodyHash), connection: new LoadConnection(port) };
   });
-  targets.set(name, await Promise.all(lanes));
+  targets.set(name, lanes);
 }
 
 /**
@@ -31,15 +31,17 @@ async function run({ name, path, batch, requests, durationMs }) {
   for (const { phone, plan, connection } of lanes) {
     const wanted = Math.ceil(requests / lanes.length) - connection.ready;
     connection.add(
-      Array.from({ length: Math.max(0, wanted) }, () =>
-        serialiseRequest(plan, path, phone.nextBatch(batch)),
-      ),
+      Array.from({ length: Math.max(0, wanted) }, () => serialiseRequest(plan, path, phone.nextBatch(batch))),
     );
   }
+  await Promise.all(lanes.map(({ connection }) => connection.open()));
   const latencies = /** @type {number[]} */ ([]);
   const begin = performance.now();
   await Promise.all(lanes.map(({ connection }) => connection.run(begin + durationMs, latencies)));
   const seconds = (performance.now() - begin) / 1000;
+  for (const { connection } of lanes) {
+    connection.close();
+  }
   return {
     seconds,
     requests: latencies.length,

@@ -41,19 +41,21 @@ export class Load {
     await this.worker.terminate();
   }
 
-  /** @param {object} order */
+  /**
+   * @param {object} order
+   * @returns {Promise<any>}
+   */
   #order(order) {
     return new Promise((resolve, reject) => {
-      const leave = () => this.worker.removeAllListeners();
-      this.worker.once('message', ({ result, failure }) => {
-        leave();
-        if (failure === undefined) resolve(result);
-        else reject(new ScriptFailure(failure));
-      });
-      this.worker.once('error', (error) => {
-        leave();
-        reject(error);
-      });
+      const settle = (/** @type {() => void} */ how) => {
+        this.worker.off('message', answered).off('error', broken).off('exit', ended);
+        how();
+      };
+      const answered = (/** @type {{ result: any, failure?: string }} */ { result, failure }) =>
+        settle(() => (failure === undefined ? resolve(result) : reject(new ScriptFailure(failure))));
+      const broken = (/** @type {Error} */ error) => settle(() => reject(error));
+      const ended = () => settle(() => reject(new ScriptFailure('The load generator ended.')));
+      this.worker.on('message', answered).on('error', broken).on('exit', ended);
       this.worker.postMessage(order);
     });
   }

@@ -29,10 +29,13 @@ export async function measureOpening({ port, seeded, quick, log, stepperBytes })
   const { body, headers } = await browser.get(`/api/sequences/${sequenceId}`);
   browser.close();
   const encoding = headers['content-encoding'] ?? 'uncompressed';
-  const raw = encoding === 'br' ? zlib.brotliDecompressSync(body) : encoding === 'gzip' ? zlib.gunzipSync(body) : body;
+  const raw =
+    encoding === 'br' ? zlib.brotliDecompressSync(body) : encoding === 'gzip' ? zlib.gunzipSync(body) : body;
   const [brotli, gzip] = [zlib.brotliCompressSync(raw).length, zlib.gzipSync(raw).length];
   const warm = times.slice(times.length / 5);
-  log(`  p50 ${milliseconds(percentile(warm, 0.5))}, p95 ${milliseconds(percentile(warm, 0.95))}; sent ${encoding}`);
+  log(
+    `  p50 ${milliseconds(percentile(warm, 0.5))}, p95 ${milliseconds(percentile(warm, 0.95))}; sent ${encoding}`,
+  );
   const scripts = stepperBytes === null ? '' : ` + ${kilobytes(stepperBytes)} of stepper scripts (once)`;
   return [
     {

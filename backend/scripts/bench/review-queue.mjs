@@ -18,7 +18,10 @@ const PATIENCE_MS = 20_000;
  */
 export async function measureReviewQueue({ port, seeded, log }) {
   const lead = new Browser(port);
-  await lead.signIn(seeded.lead.email, seeded.lead.password);
+  const { status } = await lead.signIn(seeded.lead.email, seeded.lead.password);
+  if (status !== 200) {
+    throw new ScriptFailure(`The lead could not sign in: status ${status}.`);
+  }
   const waiting = /** @type {Map<string, () => void>} */ (new Map());
   const stream = await lead.listen((event) => {
     if (event.state === 'submitted') waiting.get(event.sequenceId)?.();
@@ -76,7 +79,12 @@ async function submit({ phone, work, plan, sender, lead, waiting }) {
     });
   });
   const begin = performance.now();
-  await Promise.all([postEntries(sender, plan, [submission]), heard]);
+  const sent = postEntries(sender, plan, [submission]).then(([result]) => {
+    if (result.state !== 'submitted') {
+      throw new ScriptFailure(`A submission had no effect: ${JSON.stringify(result)}`);
+    }
+  });
+  await Promise.all([sent, heard]);
   for (;;) {
     const queue = JSON.parse((await lead.get('/api/review-queue')).body.toString('utf8'));
     const ms = performance.now() - begin;
@@ -94,17 +102,21 @@ async function submit({ phone, work, plan, sender, lead, waiting }) {
  * @param {Browser} sender
  * @param {import('./phones.mjs').PlannedPhone} plan
  * @param {readonly object[]} entries
+ * @returns {Promise<any[]>} what became of each
  */
 export async function postEntries(sender, plan, entries) {
   for (const pair of plan.cookie.split('; ')) {
     const at = pair.indexOf('=');
     sender.cookies.set(pair.slice(0, at), pair.slice(at + 1));
   }
+  const results = [];
   for (let at = 0; at < entries.length; at += 25) {
     const { status, body } = await sender.post('/api/entries', { entries: entries.slice(at, at + 25) });
     const text = body.toString('utf8');
     if (status !== 200 || text.includes('"refused"')) {
       throw new ScriptFailure(`Entries were refused: ${text.slice(0, 500)}`);
     }
+    results.push(...JSON.parse(text).results);
   }
+  return results;
 }

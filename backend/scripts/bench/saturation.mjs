@@ -31,7 +31,9 @@ export async function measureSaturation({ quick, log }) {
     rates.ours.push(callsPerSecond(ours, pressures));
   }
   const [own, bare] = [median(rates.ours), median(rates.search)];
-  log(`  ${count(own)} against ${count(bare)} calls/s; at 3 bar ${ours(3e5).toFixed(3)} and ${search(3e5).toFixed(3)} K`);
+  log(
+    `  ${count(own)} against ${count(bare)} calls/s; at 3 bar ${ours(3e5).toFixed(3)} and ${search(3e5).toFixed(3)} K`,
+  );
   return [
     {
       what: 'Dew temperatures worked out',

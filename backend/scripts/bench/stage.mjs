@@ -39,7 +39,11 @@ export async function setStage(shutdown, { profileDir }) {
   const mariadb = await startMariadb({ dataDir, log });
   shutdown.add('MariaDB', mariadb.stop, mariadb.kill);
   shutdown.check();
-  const objectStore = await startObjectStore({ dataDir, accessKeyId: secrets.s3AccessKeyId, buckets: [BUCKET] });
+  const objectStore = await startObjectStore({
+    dataDir,
+    accessKeyId: secrets.s3AccessKeyId,
+    buckets: [BUCKET],
+  });
   shutdown.add('The object store', objectStore.close);
   const inbox = await startInbox({ dataDir });
   shutdown.add('The inbox', inbox.close);
@@ -59,7 +63,8 @@ export async function setStage(shutdown, { profileDir }) {
   await waitUntilHealthy(server, localUrl, { log, isStopped: () => shutdown.isRequested });
   shutdown.check();
   void server.exited.then((how) => {
-    if (shutdown.parts.length > 0 && !shutdown.isRequested) log(`  The server ended (${how}):\n${server.lastWords()}`);
+    if (shutdown.parts.length > 0 && !shutdown.isRequested)
+      log(`  The server ended (${how}):\n${server.lastWords()}`);
   });
   return { dataDir, environment, mariadb, port, serverPid: /** @type {number} */ (server.pid) };
 }

@@ -35,7 +35,8 @@ const environmentSchema = z.object({
   TLS_KEY: z.optional(text),
   SEED_DEMO: z.optional(z.string()),
   LOG_LEVEL: z._default(z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'silent']), 'info'),
-  JOB_CONCURRENCY: z._default(z.coerce.number().check(z.int(), z.gte(0), z.lte(16)), 2),
+  /** '0' where background work has processes of its own. */
+  RUN_JOBS: z._default(z.enum(['0', '1']), '1'),
 });
 
 export type Config = ReturnType<typeof readConfig>;

@@ -55,7 +55,7 @@ export function listRoutes(services: Services): readonly AnyRoute[] {
     showSequence(services.sequences),
     appendEntries(services.entries),
     addPhoto(services.photos),
-    showPhoto(services.photos),
+    showPhoto(services.photos, services.sequences),
     listReviewQueue(services.queue),
     giveReview(services.reviews),
     listPackages(services.packages),

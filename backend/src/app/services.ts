@@ -124,20 +124,20 @@ export function wireServices(config: Config, dataSource: DataSource, logger: Log
     photosRepository,
     stepLists,
     openings,
-    plant,
     people,
   );
   const photos = new PhotosService(
     transactions,
     sequencesRepository,
     photosRepository,
+    people,
     storage,
     renderer,
     jobs,
     events,
   );
 
-  const reviewDesk = new SequenceReviewDesk(sequencesRepository, stepLists);
+  const reviewDesk = new SequenceReviewDesk(sequencesRepository, stepLists, photosRepository);
   const notice = new SentBackNotice(reviewDesk, openings, plant, people, jobs, config.publicUrl);
   const reviews = new ReviewsService(
     transactions,

@@ -21,6 +21,7 @@ export function staticFiles(folder: string): RequestHandler {
   const router = Router();
   const twins = findTwins(folder);
   router.use((request, response, next) => {
+    if (request.path.endsWith('.br')) throw new DomainFailure('notFound', 'There is no such file.');
     const type = TYPES[request.path.split('.').at(-1) ?? ''];
     if (
       !type ||

@@ -10,6 +10,7 @@ import type { LiveEventRow, LiveEventsRepository } from './live-events.repositor
 const POLL_MS = 400;
 const OVERLAP_S = 5;
 const KEEP_ALIVE_MS = 20_000;
+const MOST_STREAMS = 12;
 const MAX_STREAM_MS = 15 * 60_000;
 
 interface Listener {
@@ -47,6 +48,7 @@ export class LiveEventsService {
       'X-Accel-Buffering': 'no',
     });
     response.write('retry: 2000\n\n');
+    this.makeRoom(person);
     const listener: Listener = { person, response };
     if (this.listeners.size === 0) await this.remember();
     this.listeners.add(listener);
@@ -59,6 +61,12 @@ export class LiveEventsService {
       this.listeners.delete(listener);
       if (this.listeners.size === 0) this.stop();
     });
+  }
+
+  /** A person has a few tabs, not hundreds of streams: the oldest gives way. */
+  private makeRoom(person: Person): void {
+    const own = [...this.listeners].filter((listener) => listener.person.id === person.id);
+    if (own.length >= MOST_STREAMS) own[0]?.response.end();
   }
 
   /** Ends all streams: a server that shuts down must not wait for them. */

@@ -56,6 +56,8 @@ describe('LiveEventsService', () => {
   });
   afterEach(() => {
     for (const response of open.splice(0)) response.end();
+    here.close();
+    there.close();
   });
 
   const person = (store: TestStore, role: keyof TestStore['people']): Promise<Person> =>

@@ -11,7 +11,8 @@ const START = Buffer.from([0xff, 0xd8]);
 const END = Buffer.from([0xff, 0xd9]);
 const JFIF = segment(0xe0, Buffer.from('JFIF\0\x01\x01\0\0\x01\0\x01\0\0', 'latin1'));
 const EXIF = segment(0xe1, Buffer.from('Exif\0\0GPS', 'latin1'));
-const DATA = Buffer.alloc(200, 0x55);
+/** A scan header (B.2.3) and what could be its data. */
+const SCAN = Buffer.concat([segment(0xda, Buffer.alloc(10, 1)), Buffer.alloc(200, 0x55)]);
 
 /** A frame header (ITU-T T.81, B.2.2): precision, lines, samples a line, three components. */
 function frame(width: number, height: number, marker = 0xc0): Buffer {
@@ -22,7 +23,7 @@ function frame(width: number, height: number, marker = 0xc0): Buffer {
   return segment(marker, body);
 }
 
-const picture = (...parts: Buffer[]) => Buffer.concat([START, ...parts, DATA, END]);
+const picture = (...parts: Buffer[]) => Buffer.concat([START, ...parts, SCAN, END]);
 
 function codeFor(bytes: Buffer): string {
   try {
@@ -65,11 +66,11 @@ describe('checkJpeg', () => {
     ['a page', Buffer.from(`<script>alert(1)</script>${' '.repeat(300)}`)],
     ['a picture without a frame', picture(JFIF)],
     ['a picture without lines', picture(frame(100, 0))],
-    ['a picture whose end is missing', Buffer.concat([START, JFIF, frame(100, 100), DATA])],
+    ['a picture whose end is missing', Buffer.concat([START, JFIF, frame(100, 100), SCAN])],
     ['a picture with a film behind it', Buffer.concat([picture(frame(100, 100)), Buffer.alloc(5000, 7)])],
     [
       'a segment that points outside',
-      Buffer.concat([START, Buffer.from([0xff, 0xe0, 0xff, 0xff]), DATA, END]),
+      Buffer.concat([START, Buffer.from([0xff, 0xe0, 0xff, 0xff]), SCAN, END]),
     ],
     ['a picture with camera metadata', picture(EXIF, frame(100, 100))],
   ])('refuses %s', (_name, bytes) => {
@@ -77,11 +78,32 @@ describe('checkJpeg', () => {
   });
 
   it.each([
-    [7999, 5000, 'taken'],
-    [8000, 5000, 'tooLarge'],
+    [4999, 4000, 'taken'],
+    [5000, 4000, 'tooLarge'],
     [65_535, 65_535, 'tooLarge'],
   ])('answers to %i × %i pixels: %s', (width, height, code) => {
     expect(codeFor(picture(JFIF, frame(width, height)))).toBe(code);
+  });
+
+  it.each([
+    ['camera metadata (APP1) behind the frame', picture(frame(100, 100), EXIF)],
+    [
+      'captions with a place (APP13)',
+      picture(segment(0xed, Buffer.from('Photoshop 3.0\0City')), frame(100, 100)),
+    ],
+  ])('refuses %s, which should have been taken out', (_name, bytes) => {
+    expect(codeFor(bytes)).toBe('notAnImage');
+  });
+
+  it('takes a colour profile (APP2) and a colour transform (APP14)', () => {
+    const extras = [segment(0xe2, Buffer.from('ICC_PROFILE\0')), segment(0xee, Buffer.from('Adobe'))];
+    expect(codeFor(picture(JFIF, ...extras, frame(100, 100)))).toBe('taken');
+  });
+
+  it('refuses a picture of a few bytes without its end', () => {
+    expect(codeFor(Buffer.concat([START, frame(9, 9), segment(0xda, Buffer.alloc(10, 1))]))).toBe(
+      'notAnImage',
+    );
   });
 
   it('has a failure for any bytes, never an error of its own', () => {

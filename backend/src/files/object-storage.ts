@@ -39,7 +39,7 @@ export class ObjectStorage {
       ...(config.endpoint ? { endpoint: config.endpoint, forcePathStyle: true } : {}),
       credentials: { accessKeyId: config.accessKeyId, secretAccessKey: config.secretAccessKey },
       maxAttempts: 3,
-      requestHandler: { connectionTimeout: 3_000, requestTimeout: 60_000 },
+      requestHandler: { connectionTimeout: 3_000, requestTimeout: 20_000 },
       // Stores that don't know the SDK's trailing checksums keep their framing inside the object; ours are checked by hash.
       requestChecksumCalculation: 'WHEN_REQUIRED',
       responseChecksumValidation: 'WHEN_REQUIRED',

@@ -19,19 +19,24 @@ export interface Caller {
 }
 
 /**
+ * Whether a phone's 30-day device credential is enough, and when it is looked at: `first` on the paths that drain an
+ * outbox (one look-up where a session needs two), `fallback` where a session may show more than a device.
+ */
+export type DeviceUse = 'first' | 'fallback';
+
+/**
  * Who may call a route. There is no default: a route without a rule doesn't compile, and what no rule allows is refused.
  * `self` is for what concerns only the caller's own things; `param` names the path parameter that holds the subject.
  */
 export type AccessRule =
   | { readonly kind: 'public'; readonly reason: string }
-  | { readonly kind: 'self'; readonly reason: string; readonly device?: true }
+  | { readonly kind: 'self'; readonly reason: string; readonly device?: DeviceUse }
   | {
       readonly kind: 'action';
       readonly action: Action;
       readonly subject: SubjectKind;
       readonly param?: string;
-      /** Whether a phone's 30-day device credential is enough. */
-      readonly device?: true;
+      readonly device?: DeviceUse;
     };
 
 export interface UploadRule {

@@ -53,6 +53,17 @@ describe('problemFor', () => {
     });
   });
 
+  it.each(['ECONNREFUSED', 'ECONNRESET', 'PROTOCOL_CONNECTION_LOST'])(
+    'asks to try again, without saying where, when a driver throws %s',
+    (code) => {
+      const error = Object.assign(new Error('connect to 10.0.0.7:3306'), { code });
+      for (const thrown of [error, Object.assign(new Error('query failed'), { driverError: error })]) {
+        expect(problemFor(thrown, '')).toMatchObject({ status: 503, code: 'temporary' });
+        expect(JSON.stringify(problemFor(thrown, ''))).not.toContain('10.0.0.7');
+      }
+    },
+  );
+
   it.each([
     ['a bug', new Bug('SELECT secret FROM person')],
     ['an error', new Error('connect ECONNREFUSED 10.0.0.7:3306')],

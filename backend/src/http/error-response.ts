@@ -72,6 +72,8 @@ export function problemFor(error: unknown, requestId: string): Problem {
     return make(STATUS[error.code], error.code, error.message, requestId, error);
   }
   if (error instanceof TemporaryFailure) return make(503, 'temporary', error.message, requestId);
+  if (isUnreachable(error))
+    return make(503, 'temporary', 'The database does not answer. Try again shortly.', requestId);
   const edge = (error ?? {}) as EdgeError;
   if (edge.code === 'LIMIT_FILE_SIZE') return make(413, 'tooLarge', 'The file is too large.', requestId);
   if (edge.type === 'entity.too.large') return make(413, 'tooLarge', 'The request is too large.', requestId);
@@ -80,6 +82,25 @@ export function problemFor(error: unknown, requestId: string): Problem {
     return make(400, 'invalidInput', 'The request could not be read.', requestId);
   }
   return make(500, 'bug', 'Something went wrong on our side. It has been logged.', requestId);
+}
+
+/** What a driver throws when the other side is gone; all of it passes by itself. */
+const UNREACHABLE = new Set([
+  'ECONNREFUSED',
+  'ECONNRESET',
+  'EPIPE',
+  'ETIMEDOUT',
+  'ENOTFOUND',
+  'PROTOCOL_CONNECTION_LOST',
+  'ER_SERVER_SHUTDOWN',
+  'ER_CON_COUNT_ERROR',
+]);
+
+function isUnreachable(error: unknown): boolean {
+  const { code, driverError } = (error ?? {}) as { code?: unknown; driverError?: { code?: unknown } };
+  return [code, driverError?.code].some(
+    (candidate) => typeof candidate === 'string' && UNREACHABLE.has(candidate),
+  );
 }
 
 function make(

@@ -55,8 +55,10 @@ async function admit(
   response: Response,
 ): Promise<Caller | null> {
   if (rule.kind === 'public') return null;
-  // The device credential first: it needs one look-up where a session needs two.
-  const caller = (rule.device && (await desk.byDevice(request))) || (await desk.bySession(request, response));
+  const caller =
+    (rule.device === 'first' ? await desk.byDevice(request) : null) ??
+    (await desk.bySession(request, response)) ??
+    (rule.device === 'fallback' ? await desk.byDevice(request) : null);
   if (!caller) throw new DomainFailure('notSignedIn', 'Sign in first.');
   if (rule.kind === 'self') return caller;
   const subject = await subjectOf(rule, desk, request, caller);
@@ -113,6 +115,12 @@ function handler(route: AnyRoute, options: MountOptions): RequestHandler {
   };
 }
 
+/** multer names its limits; everything else it throws is a body that is no multipart form. */
+function isLimit(error: unknown): boolean {
+  const code = (error as { code?: unknown }).code;
+  return typeof code === 'string' && code.startsWith('LIMIT_');
+}
+
 function uploadReader(field: string, maxBytes: number): RequestHandler {
   const single = multer({
     storage: multer.memoryStorage(),
@@ -121,7 +129,8 @@ function uploadReader(field: string, maxBytes: number): RequestHandler {
   }).single(field);
   return (request: Request, response: Response, next: NextFunction) => {
     single(request, response, (error: unknown) => {
-      if (error) next(error);
+      if (error)
+        next(isLimit(error) ? error : new DomainFailure('invalidInput', 'The upload could not be read.'));
       else if (!request.file)
         next(new DomainFailure('invalidInput', `Send one file in the field "${field}".`));
       else next();

@@ -1,7 +1,7 @@
 import { afterEach, beforeEach, describe, expect, it, jest } from '@jest/globals';
 import { pino } from 'pino';
 import type { Transactions } from '../database/transactions';
-import { JOB_RULES, type MailPayload } from './job-kinds';
+import { JOB_RULES, type JobKind, type MailPayload } from './job-kinds';
 import { JobWorker, type JobHandlers, type JobRun } from './job-worker';
 import type { ClaimedJob, JobsRepository } from './jobs.repository';
 
@@ -14,10 +14,11 @@ class FakeJobs {
   claims = 0;
   isAway = false;
 
-  async claim(): Promise<ClaimedJob | null> {
+  async claim(_context: unknown, kind: JobKind): Promise<ClaimedJob | null> {
     this.claims += 1;
     if (this.isAway) throw new Error('database away');
-    return this.waiting.shift() ?? null;
+    const at = this.waiting.findIndex((job) => job.kind === kind);
+    return at < 0 ? null : (this.waiting.splice(at, 1)[0] ?? null);
   }
   async renew(_context: unknown, id: string, _kind: string, progress: number): Promise<void> {
     this.log.push(`renew ${id} ${progress}`);
@@ -34,12 +35,14 @@ describe('JobWorker', () => {
   let jobs: FakeJobs;
   let worker: JobWorker;
   let mail: jest.Mock<JobHandlers['mail']>;
+  let slow: jest.Mock<JobHandlers['package']>;
   const other = async () => undefined;
 
   beforeEach(() => {
     jest.useFakeTimers();
     jobs = new FakeJobs();
     mail = jest.fn<JobHandlers['mail']>(other);
+    slow = jest.fn<JobHandlers['package']>(other);
     const transactions = {
       outside: {},
       run: (work: (context: unknown) => Promise<unknown>) => work({}),
@@ -47,7 +50,11 @@ describe('JobWorker', () => {
     worker = new JobWorker(
       transactions,
       jobs as unknown as JobsRepository,
-      { mail: (payload, run) => mail(payload, run), photoCheck: other, package: other },
+      {
+        mail: (payload, run) => mail(payload, run),
+        photoCheck: other,
+        package: (payload, run) => slow(payload, run),
+      },
       pino({ level: 'silent' }),
     );
   });
@@ -60,12 +67,21 @@ describe('JobWorker', () => {
 
   const give = (id: string, attempts = 1) =>
     jobs.waiting.push({ id, companyId: 'c', kind: 'mail', payload: MAIL, attempts });
+  /** For a job that never ends: nothing to wait for. */
+  const forgetWorker = () => {
+    worker = new JobWorker(
+      {} as Transactions,
+      {} as JobsRepository,
+      {} as JobHandlers,
+      pino({ level: 'silent' }),
+    );
+  };
   const pass = (ms: number) => jest.advanceTimersByTimeAsync(ms);
 
   it('runs what is waiting, one after the other, and finishes it', async () => {
     give('a');
     give('b');
-    worker.start(1);
+    worker.start();
     await pass(10);
     expect(mail.mock.calls.map(([payload, run]) => [payload.to, run.id])).toEqual([
       [MAIL.to, 'a'],
@@ -74,8 +90,19 @@ describe('JobWorker', () => {
     expect(jobs.log).toEqual(['finish a', 'finish b']);
   });
 
+  it('lets no mail wait behind a package', async () => {
+    slow.mockReturnValue(new Promise(() => undefined));
+    jobs.waiting.push({ id: 'p', companyId: 'c', kind: 'package', payload: {}, attempts: 1 });
+    give('a');
+    worker.start();
+    await pass(10);
+    expect(slow).toHaveBeenCalledTimes(1);
+    expect(jobs.log).toEqual(['finish a']);
+    forgetWorker();
+  });
+
   it('looks again by itself within a second', async () => {
-    worker.start(1);
+    worker.start();
     await pass(10);
     give('a');
     await pass(1000);
@@ -83,7 +110,7 @@ describe('JobWorker', () => {
   });
 
   it('looks at once when it is nudged', async () => {
-    worker.start(1);
+    worker.start();
     await pass(10);
     give('a');
     worker.nudge();
@@ -98,7 +125,7 @@ describe('JobWorker', () => {
   ])('tries again after attempt %i in %i s', async (attempts, waitS) => {
     mail.mockRejectedValue(new Error('away'));
     give('a', attempts);
-    worker.start(1);
+    worker.start();
     await pass(10);
     expect(jobs.log).toEqual([`fail a away ${waitS}`]);
   });
@@ -111,7 +138,7 @@ describe('JobWorker', () => {
     });
     give('a', JOB_RULES.mail.maxAttempts - 1);
     give('b', JOB_RULES.mail.maxAttempts);
-    worker.start(1);
+    worker.start();
     await pass(10);
     expect(lasts).toEqual([false, true]);
     expect(jobs.log).toEqual(['fail a away 2048', 'fail b away null']);
@@ -121,14 +148,14 @@ describe('JobWorker', () => {
     mail.mockRejectedValueOnce('no error at all');
     give('a');
     give('b');
-    worker.start(1);
+    worker.start();
     await pass(10);
     expect(jobs.log).toEqual(['fail a no error at all 2', 'finish b']);
   });
 
   it('outlives a database that is away', async () => {
     jobs.isAway = true;
-    worker.start(1);
+    worker.start();
     await pass(5000);
     jobs.isAway = false;
     give('a');
@@ -143,7 +170,7 @@ describe('JobWorker', () => {
       return new Promise((resolve) => (done = resolve));
     });
     give('a');
-    worker.start(1);
+    worker.start();
     await pass(11_000);
     expect(jobs.log).toEqual(['renew a 0.25', 'renew a 0.25']);
     done();
@@ -154,17 +181,11 @@ describe('JobWorker', () => {
   it('renews well within the shortest lease', async () => {
     mail.mockImplementation(() => new Promise(() => undefined));
     give('a');
-    worker.start(1);
+    worker.start();
     const shortest = Math.min(...Object.values(JOB_RULES).map((rule) => rule.leaseS));
     await pass((shortest * 1000) / 3);
     expect(jobs.log.length).toBeGreaterThan(1);
-    // This job never ends: nothing to wait for.
-    worker = new JobWorker(
-      {} as Transactions,
-      {} as JobsRepository,
-      {} as JobHandlers,
-      pino({ level: 'silent' }),
-    );
+    forgetWorker();
   });
 
   it('stops: tells what runs, puts it back without a wait, and takes nothing more', async () => {
@@ -176,7 +197,7 @@ describe('JobWorker', () => {
     );
     give('a', JOB_RULES.mail.maxAttempts);
     give('b');
-    worker.start(1);
+    worker.start();
     await pass(10);
     const stopped = worker.stop();
     await pass(10);
@@ -189,7 +210,7 @@ describe('JobWorker', () => {
   });
 
   it('stops at once when nothing runs', async () => {
-    worker.start(3);
+    worker.start();
     await pass(10);
     const stopped = worker.stop();
     await pass(1);
@@ -198,8 +219,10 @@ describe('JobWorker', () => {
   });
 
   it('does not grow while nobody nudges it', async () => {
-    worker.start(2);
+    worker.start();
     await pass(700 * 200);
-    expect((Reflect.get(worker, 'wake') as unknown[]).length).toBeLessThanOrEqual(2);
+    expect((Reflect.get(worker, 'wake') as unknown[]).length).toBeLessThanOrEqual(
+      Object.keys(JOB_RULES).length,
+    );
   });
 });

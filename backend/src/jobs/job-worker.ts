@@ -35,8 +35,9 @@ export class JobWorker {
     private readonly logger: Logger,
   ) {}
 
-  start(concurrency: number): void {
-    for (let index = 0; index < concurrency; index += 1) this.loops.push(this.loop());
+  /** One loop a kind: a mail never waits behind photos, nor a package behind either. */
+  start(): void {
+    for (const kind of Object.keys(this.handlers) as JobKind[]) this.loops.push(this.loop(kind));
   }
 
   /** Looks for work now rather than at the next tick. */
@@ -51,17 +52,17 @@ export class JobWorker {
     await Promise.all(this.loops);
   }
 
-  private async loop(): Promise<void> {
+  private async loop(kind: JobKind): Promise<void> {
     while (!this.abort.signal.aborted) {
-      const job = await this.claim();
+      const job = await this.claim(kind);
       if (job) await this.run(job);
       else await this.idle();
     }
   }
 
-  private async claim(): Promise<ClaimedJob | null> {
+  private async claim(kind: JobKind): Promise<ClaimedJob | null> {
     try {
-      return await this.transactions.run((context) => this.jobs.claim(context));
+      return await this.transactions.run((context) => this.jobs.claim(context, kind));
     } catch (error) {
       // The database is away or restarting: the worker must outlive that.
       if (!this.abort.signal.aborted) this.logger.warn({ err: error }, 'could not look for jobs');

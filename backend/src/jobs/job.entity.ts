@@ -13,7 +13,7 @@ import {
 /** Background work, written in the transaction that causes it. */
 @Entity('job')
 @Unique('UQ_job_key', ['uniqueKey'])
-@Index('IX_job_due', ['state', 'runAfter'])
+@Index('IX_job_due', ['kind', 'state', 'runAfter'])
 export class JobEntity {
   @IdColumn() id!: string;
   @RefColumn() companyId!: string;

@@ -21,7 +21,7 @@ describe('JobsRepository', () => {
   beforeEach(() => server.sql('DELETE FROM job'));
 
   const insert = (key: string, context = outside) => jobs.insert(context, companyId, 'mail', key, MAIL);
-  const claim = () => server.services.transactions.run((context) => jobs.claim(context));
+  const claim = () => server.services.transactions.run((context) => jobs.claim(context, 'mail'));
   const row = async (id: string) =>
     (
       await server.sql<{
@@ -45,6 +45,12 @@ describe('JobsRepository', () => {
     await insert('one');
     expect(await claim()).toMatchObject({ kind: 'mail', companyId, payload: MAIL, attempts: 1 });
     expect(await claim()).toBeNull();
+  });
+
+  it('gives a worker no job of another kind', async () => {
+    await insert('one');
+    expect(await server.services.transactions.run((context) => jobs.claim(context, 'package'))).toBeNull();
+    expect(await claim()).not.toBeNull();
   });
 
   it('takes the same key twice for one job, even when the first is done', async () => {
@@ -71,10 +77,10 @@ describe('JobsRepository', () => {
     await insert('two');
     const { transactions } = server.services;
     const first = await transactions.run(async (one) => {
-      const mine = await jobs.claim(one);
+      const mine = await jobs.claim(one, 'mail');
       // The first claim is not committed yet: the second must step over its row.
       const started = Date.now();
-      const theirs = await transactions.run((two) => jobs.claim(two));
+      const theirs = await transactions.run((two) => jobs.claim(two, 'mail'));
       expect(Date.now() - started).toBeLessThan(2000);
       expect(theirs).not.toBeNull();
       expect(theirs?.id).not.toBe(mine?.id);

@@ -29,17 +29,18 @@ export class JobsRepository {
   }
 
   /**
-   * Claims the next due job: one that waits, or one whose worker has gone silent. Other workers' rows are skipped, not
+   * Claims the next due job of a kind: one that waits, or one whose worker has gone silent. Other workers' rows are skipped, not
    * waited for; the claim is committed before the work begins.
    */
-  async claim(context: Context): Promise<ClaimedJob | null> {
+  async claim(context: Context, kind: JobKind): Promise<ClaimedJob | null> {
     const manager = managerOf(context);
     const rows: { id: string; company_id: string; kind: JobKind; payload: string; attempts: number }[] =
       await manager.query(
         `SELECT id, company_id, kind, payload, attempts FROM job
-          WHERE (state = 'waiting' AND run_after <= UTC_TIMESTAMP(3))
-             OR (state = 'running' AND lease_until < UTC_TIMESTAMP(3))
+          WHERE kind = ? AND ((state = 'waiting' AND run_after <= UTC_TIMESTAMP(3))
+             OR (state = 'running' AND lease_until < UTC_TIMESTAMP(3)))
           ORDER BY run_after LIMIT 1 FOR UPDATE SKIP LOCKED`,
+        [kind],
       );
     const row = rows[0];
     if (!row) return null;

@@ -46,7 +46,7 @@ export class OpeningsService {
       person.memberships.map((membership) => membership.openingId),
       person.companyRole === 'admin' ? person.companyId : null,
       limit,
-      date && id ? { date, id } : null,
+      /^\d{4}-\d\d-\d\d$/.test(date ?? '') && id ? { date: date ?? '', id } : null,
     );
     const summaries = await this.summarise(outside, page);
     const last = page.at(-1);
@@ -127,7 +127,7 @@ export class OpeningsService {
       person.id,
       person.memberships.map((membership) => membership.openingId),
       limit,
-      openingId && ordinal ? { openingId, ordinal: Number(ordinal) } : null,
+      openingId && /^\d{1,9}$/.test(ordinal ?? '') ? { openingId, ordinal: Number(ordinal) } : null,
     );
     const last = rows.at(-1);
     return {

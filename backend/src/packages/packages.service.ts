@@ -1,5 +1,5 @@
 import { uuidv7 } from 'uuidv7';
-import { isSigned, type Signature } from '#shared/checklist/signature';
+import { isSignedBy, type Signature } from '#shared/checklist/signature';
 import type { Language } from '#shared/checklist/text';
 import type { HandoverPackage } from '#shared/contracts/packages';
 import { DomainFailure } from '#shared/failures/failure';
@@ -9,6 +9,7 @@ import type { AuditService } from '../audit/audit.service';
 import { isDuplicate, type Context, type Transactions } from '../database/transactions';
 import type { LiveEventsService } from '../events/live-events.service';
 import type { ObjectStorage, StoredObject } from '../files/object-storage';
+import { byteRange } from '../http/byte-range';
 import type { Caller } from '../http/define-route';
 import { requireFreshPassword } from '../http/password-age';
 import type { JobsService } from '../jobs/jobs.service';
@@ -111,13 +112,19 @@ export class PackagesService {
     return this.show(id);
   }
 
-  /** The document's bytes, or a range of them. */
-  async read(id: PackageId, range: string | undefined): Promise<StoredObject & { fileName: string }> {
+  /** The document's bytes, or a range of them; `null` for a range that isn't in it. */
+  async read(
+    id: PackageId,
+    header: string | undefined,
+  ): Promise<(StoredObject & { fileName: string }) | null> {
     const row = await this.find(id);
     if (row.state !== 'issued') {
       throw new DomainFailure('wrongState', 'This package is not issued.', [], { state: row.state });
     }
-    const object = await this.storage.get(packageKey(row.companyId, id), range);
+    const range = byteRange(header, row.bytes ?? 0);
+    if (range === 'unsatisfiable') return null;
+    const part = range === 'whole' ? undefined : `bytes=${range.first}-${range.last}`;
+    const object = await this.storage.get(packageKey(row.companyId, id), part);
     if (!object) throw new DomainFailure('notFound', 'The document is not in the store.');
     return { ...object, fileName: `${fileNameOf(row.openingName)}-handover-${row.version}.pdf` };
   }
@@ -134,7 +141,8 @@ export class PackagesService {
     signature: Signature,
   ): Promise<HandoverPackage> {
     requireFreshPassword(caller);
-    if (!isSigned(signature)) throw new DomainFailure('invalidInput', 'The signature box is empty.');
+    if (!isSignedBy(signature, caller.personName))
+      throw new DomainFailure('invalidInput', 'The signature box is empty.');
     const row = await this.find(id);
     if (row.state !== 'issued') {
       throw new DomainFailure('wrongState', 'This package is not issued.', [], { state: row.state });

@@ -39,6 +39,10 @@ export class DevicesRepository {
     return (result.affected ?? 0) > 0;
   }
 
+  async expire(context: Context, deviceId: DeviceId): Promise<void> {
+    await managerOf(context).update(DeviceEntity, { id: deviceId }, { expiresAt: new Date() });
+  }
+
   async insert(context: Context, device: Omit<DeviceEntity, 'lastCount' | 'revokedAt'>): Promise<void> {
     await managerOf(context).insert(DeviceEntity, { ...device, lastCount: 0, revokedAt: null });
   }

@@ -5,6 +5,7 @@ import { DomainFailure } from '#shared/failures/failure';
 import type { CompanyId, OpeningId, PersonId } from '#shared/plant/ids';
 import type { Transactions } from '../database/transactions';
 import type { TemplatesService } from '../templates/templates.service';
+import { plainEmail } from './plain-email';
 import { hashPassword } from './passwords';
 import type { KnownPerson, PeopleRepository } from './people.repository';
 
@@ -53,7 +54,7 @@ export class PeopleRegister {
     await this.people.insertPerson(this.transactions.outside, {
       id,
       ...facts,
-      email: email.trim().toLowerCase(),
+      email: plainEmail(email),
       passwordHash,
       isActive: true,
       createdAt: new Date(),

@@ -1,3 +1,4 @@
+import { In } from 'typeorm';
 import type { Membership, Person, Role } from '#shared/access/roles';
 import type { Language } from '#shared/checklist/text';
 import type { CompanyId, OpeningId, PersonId } from '#shared/plant/ids';
@@ -6,6 +7,7 @@ import { managerOf, type Context } from '../database/transactions';
 import { CompanyEntity } from './company.entity';
 import { MembershipEntity } from './membership.entity';
 import { PersonEntity } from './person.entity';
+import { plainEmail } from './plain-email';
 
 /** A person with what access decisions and the screens' headings need. */
 export interface KnownPerson extends Person {
@@ -61,7 +63,7 @@ export class PeopleRepository {
     email: string,
   ): Promise<{ id: PersonId; passwordHash: string; isActive: boolean } | null> {
     const person = await managerOf(context).findOne(PersonEntity, {
-      where: { email: email.trim().toLowerCase() },
+      where: { email: plainEmail(email) },
       select: { id: true, passwordHash: true, isActive: true },
     });
     return person && { ...person, id: person.id as PersonId };
@@ -97,7 +99,9 @@ export class PeopleRepository {
 
   /** Whether the person ever had a role in the opening that records evidence. */
   async wasEverMember(context: Context, openingId: OpeningId, personId: PersonId): Promise<boolean> {
-    return managerOf(context).exists(MembershipEntity, { where: { openingId, personId } });
+    return managerOf(context).exists(MembershipEntity, {
+      where: { openingId, personId, role: In(['installer', 'lead', 'admin']) },
+    });
   }
 
   async findNames(context: Context, ids: readonly PersonId[]): Promise<{ id: PersonId; name: string }[]> {

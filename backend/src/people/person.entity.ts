@@ -9,7 +9,7 @@ export class PersonEntity {
   @RefColumn() companyId!: string;
   @TextColumn(120) name!: string;
   /** Lower case. */
-  @TextColumn(254) email!: string;
+  @TextColumn(254, { charset: 'utf8mb4', collation: 'utf8mb4_bin' }) email!: string;
   @WordColumn(255) passwordHash!: string;
   @WordColumn(16) companyRole!: string;
   @WordColumn(8) language!: string;

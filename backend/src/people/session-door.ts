@@ -57,7 +57,11 @@ export class SessionDoor {
     return caller && this.service.me(caller.person.id);
   }
 
+  /** Signs out, also where the session has ended by itself: the cookies go, and the device's credential ends. */
   async signOut(request: Request, response: Response): Promise<void> {
+    const device = await this.desk.byDevice(request);
+    if (device?.deviceId) await this.service.endCredential(device.deviceId);
+    await run(this.session, request, response);
     await new Promise<void>((resolve, reject) =>
       request.session.destroy((error) => (error ? reject(error) : resolve())),
     );

@@ -31,16 +31,15 @@ export class SessionService {
    * @throws {DomainFailure} wrongCredentials for either, without saying which; tooManyTries
    */
   async signIn(email: string, password: string, address: string): Promise<KnownPerson> {
-    await this.limit.check(email, address);
+    await this.limit.begin(email, address);
     const known = await this.people.findCredentials(this.transactions.outside, email);
     const right = await isPassword(known?.passwordHash ?? null, password);
     const person =
       right && known?.isActive ? await this.people.findActive(this.transactions.outside, known.id) : null;
     if (!person) {
-      await this.limit.countFailure(email, address);
       throw new DomainFailure('wrongCredentials', 'The address or the password is not right.');
     }
-    await this.limit.forget(email, address);
+    await this.limit.forgive(email, address);
     await this.audit.append(this.transactions.outside, {
       companyId: person.companyId,
       personId: person.id,
@@ -57,10 +56,9 @@ export class SessionService {
     password: string,
     address: string,
   ): Promise<void> {
-    await this.limit.check(email, address);
+    await this.limit.begin(email, address);
     const hash = await this.people.findPasswordHash(this.transactions.outside, personId);
-    if (await isPassword(hash, password)) return;
-    await this.limit.countFailure(email, address);
+    if (await isPassword(hash, password)) return this.limit.forgive(email, address);
     throw new DomainFailure('wrongCredentials', 'The password is not right.');
   }
 
@@ -72,6 +70,11 @@ export class SessionService {
 
   async setLanguage(personId: PersonId, language: Language): Promise<void> {
     await this.people.setLanguage(this.transactions.outside, personId, language);
+  }
+
+  /** Ends a device's credential; the device itself is taken up again at the next sign-in. */
+  async endCredential(deviceId: DeviceId): Promise<void> {
+    await this.devices.expire(this.transactions.outside, deviceId);
   }
 
   /** Registers this browser as a device of the person, or takes its earlier one up again with a new secret. */

@@ -2,6 +2,7 @@ import { createHash } from 'node:crypto';
 import type { Pool } from 'mysql2';
 import { RateLimiterMySQL, RateLimiterRes } from 'rate-limiter-flexible';
 import { DomainFailure } from '#shared/failures/failure';
+import { plainEmail } from './plain-email';
 import { managerOf, type Context } from '../database/transactions';
 
 const WINDOW_S = 900;
@@ -27,41 +28,41 @@ export class SignInLimit {
     this.perPlace = new RateLimiterMySQL({ ...shared, keyPrefix: 'place', points: 60 });
   }
 
-  /** @throws {DomainFailure} tooManyTries, with the seconds to wait */
-  async check(email: string, place: string): Promise<void> {
-    const states = await Promise.all([
-      this.perAccount.get(accountKey(email, place)),
-      this.perPlace.get(place),
-    ]);
-    const spent = states.find((state) => state !== null && state.remainingPoints <= 0);
-    if (spent) throw tooMany(spent);
+  /**
+   * Counts a try before the password is looked at, so that many at once can't slip through between looking and counting.
+   *
+   * @throws {DomainFailure} tooManyTries, with the seconds to wait
+   */
+  async begin(email: string, place: string): Promise<void> {
+    await Promise.all([spend(this.perAccount, accountKey(email, place)), spend(this.perPlace, place)]);
   }
 
-  async countFailure(email: string, place: string): Promise<void> {
-    await Promise.all([count(this.perAccount, accountKey(email, place)), count(this.perPlace, place)]);
+  /** Gives the try back: it was the right password. */
+  async forgive(email: string, place: string): Promise<void> {
+    await Promise.all([this.perAccount.delete(accountKey(email, place)), this.perPlace.reward(place)]);
   }
 
   /** Removes what has run out. */
   async sweep(context: Context): Promise<void> {
     await managerOf(context).query('DELETE FROM sign_in_limit WHERE expire < ? LIMIT 5000', [Date.now()]);
   }
-
-  async forget(email: string, place: string): Promise<void> {
-    await this.perAccount.delete(accountKey(email, place));
-  }
 }
 
-async function count(limiter: RateLimiterMySQL, key: string): Promise<void> {
+async function spend(limiter: RateLimiterMySQL, key: string): Promise<void> {
   try {
     await limiter.consume(key);
   } catch (error) {
-    // The library rejects with its result once the points are spent; the failure itself is answered by the caller.
-    if (!(error instanceof RateLimiterRes)) throw error;
+    // The library rejects with its result once the points are spent.
+    if (error instanceof RateLimiterRes) throw tooMany(error);
+    throw error;
   }
 }
 
 function accountKey(email: string, place: string): string {
-  return createHash('sha256').update(`${email.trim().toLowerCase()}\n${place}`).digest('hex').slice(0, 40);
+  return createHash('sha256')
+    .update(`${plainEmail(email)}\n${place}`)
+    .digest('hex')
+    .slice(0, 40);
 }
 
 function tooMany(state: RateLimiterRes): DomainFailure {

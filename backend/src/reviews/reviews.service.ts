@@ -1,12 +1,13 @@
 import { uuidv7 } from 'uuidv7';
 import type { Step } from '#shared/checklist/step';
-import { isSigned, type Signature } from '#shared/checklist/signature';
+import { isSignedBy, type Signature } from '#shared/checklist/signature';
 import type { ReviewRequest } from '#shared/contracts/sequences';
 import { DomainFailure } from '#shared/failures/failure';
 import type { CompanyId, EntryId, SequenceId } from '#shared/plant/ids';
 import { canonicalJson } from '#shared/sequences/canonical-json';
 import { bodyHash } from '#shared/sequences/chain';
 import type { EntryBody, EntryContent } from '#shared/sequences/entry';
+import { missingSteps } from '#shared/sequences/fold';
 import type { FoldState } from '#shared/sequences/fold-state';
 import { transitionFor, type SequenceState } from '#shared/sequences/transitions';
 import type { AuditService } from '../audit/audit.service';
@@ -47,12 +48,12 @@ export class ReviewsService {
   ): Promise<{ state: SequenceState; headHash: string }> {
     if (request.verdict === 'approved') {
       requireFreshPassword(caller);
-      checkSignature(request.signature);
+      checkSignature(request.signature, caller.personName);
     }
     return this.transactions.run(async (context) => {
       const locked = await this.desk.lock(context, id);
-      const { fold, steps } = locked;
-      checkVerdict(fold, steps, request, caller);
+      checkVerdict(locked.fold, locked.steps, request, caller);
+      if (request.verdict === 'approved') await this.checkEvidence(context, locked);
       const body = this.bodyOf(caller, id, locked.stepListHash, request);
       const after = await this.desk.append(context, locked, body, bodyHash(body));
       await this.reviews.insert(context, {
@@ -65,6 +66,27 @@ export class ReviewsService {
       await this.tell(context, caller, locked, request, after);
       return { state: after.state, headHash: after.headHash };
     });
+  }
+
+  /** What was submitted may have come apart since: an override set, a reading corrected into one that doesn't count. */
+  private async checkEvidence(context: Context, locked: LockedForReview): Promise<void> {
+    const missing = missingSteps(locked.fold, locked.steps).map((step) => step.key);
+    if (missing.length > 0) {
+      throw new DomainFailure(
+        'wrongState',
+        'Some steps lack an answer that counts, or something stands by hand.',
+        [],
+        {
+          missing,
+        },
+      );
+    }
+    const awaitedPhotos = await this.desk.countAwaitedPhotos(context, locked);
+    if (awaitedPhotos > 0) {
+      throw new DomainFailure('wrongState', 'Photos that count as evidence have not arrived yet.', [], {
+        awaitedPhotos,
+      });
+    }
   }
 
   private bodyOf(
@@ -151,8 +173,8 @@ export class ReviewsService {
   }
 }
 
-function checkSignature(signature: Signature): void {
-  if (isSigned(signature)) return;
+function checkSignature(signature: Signature, name: string): void {
+  if (isSignedBy(signature, name)) return;
   throw new DomainFailure('invalidInput', 'The signature box is empty.', [
     { path: 'body.signature', message: 'Sign, or type the name in its place.' },
   ]);

@@ -1,13 +1,17 @@
 import { afterAll, beforeAll, describe, expect, it } from '@jest/globals';
+import { uuidv7 } from 'uuidv7';
 import type { SequenceDetail } from '#shared/contracts/sequences';
-import type { SequenceId } from '#shared/plant/ids';
+import type { Step } from '#shared/checklist/step';
+import type { DeviceId, EntryId, SequenceId } from '#shared/plant/ids';
 import { findBrokenLink } from '#shared/sequences/chain';
-import { demoSignature } from '../demo/demo-answer';
+import { foldEntries } from '#shared/sequences/fold';
+import { viewSequence } from '#shared/sequences/sequence-view';
+import { demoAnswer, demoSignature } from '../demo/demo-answer';
 import { steadyNumbers } from '../demo/steady-numbers';
 import type { TestClient } from '../testing/test-client';
 import { finishSequence } from '../testing/finish-sequence';
 import { startTestServer, type TestServer } from '../testing/test-server';
-import { importSmallSchedule, makeStore, type TestStore } from '../testing/test-store';
+import { importSmallSchedule, makeStore, SMALL_SCHEDULE, type TestStore } from '../testing/test-store';
 import { until } from '../testing/until';
 
 let server: TestServer;
@@ -157,6 +161,63 @@ describe('POST /sequences/:sequenceId/reviews', () => {
     expect((await admin.get('/api/review-queue')).body.items[0].fourEyesBlocked).toBe(false);
   });
 
+  it('refuses an approval while something stands by hand or no longer counts', async () => {
+    const second = await store.client('lead2');
+    const before = await second.sequence(id());
+    const override = before.stepList.steps.find((step) => step.kind === 'override') as Step;
+    const known = before.fold.steps[override.key]?.entryId ?? null;
+    const set = installer.answer(before, override, { kind: 'override', phase: 'set', remark: '' }, known);
+    await installer.post([set]);
+    const refused = await second.send(
+      'post',
+      `/api/sequences/${id()}/reviews`,
+      approval(await second.sequence(id())),
+    );
+    expect([refused.status, refused.body.code, refused.body.facts.missing]).toEqual([
+      409,
+      'wrongState',
+      [override.key],
+    ]);
+    const back = installer.answer(
+      before,
+      override,
+      { kind: 'override', phase: 'putBack', remark: '' },
+      set.id,
+    );
+    await installer.post([back]);
+  });
+
+  it('refuses an approval while a photo that counts has not arrived', async () => {
+    const second = await store.client('lead2');
+    const detail = await second.sequence(id());
+    const step = detail.stepList.steps.find((candidate) => candidate.kind === 'photo') as Step;
+    const entry = detail.fold.steps[step.key]?.entryId as EntryId;
+    const row = detail.entries.find((candidate) => candidate.body.id === entry);
+    const named = row?.body.content.kind === 'answer' && row.body.content.answer;
+    const photos = named && named.kind === 'photo' ? named.photos : [];
+    const away = photos.map((photo) => ({ ...photo, sha256: 'd'.repeat(64) }));
+    const gone = installer.answer(detail, step, { kind: 'photo', photos: [...away, ...photos] }, entry);
+    await installer.post([gone]);
+    const refused = await second.send(
+      'post',
+      `/api/sequences/${id()}/reviews`,
+      approval(await second.sequence(id())),
+    );
+    expect([refused.body.code, refused.body.facts.awaitedPhotos]).toEqual(['wrongState', 1]);
+    await installer.post([installer.answer(detail, step, { kind: 'photo', photos: [...photos] }, gone.id)]);
+  });
+
+  it('takes a typed name only when it is the reviewer’s own', async () => {
+    const second = await store.client('lead2');
+    const detail = await second.sequence(id());
+    const typed = { ...demoSignature('Somebody Else', random), strokes: [], typed: true };
+    const refused = await second.send('post', `/api/sequences/${id()}/reviews`, {
+      ...approval(detail),
+      signature: typed,
+    });
+    expect(refused.body.code).toBe('invalidInput');
+  });
+
   it('refuses an empty signature, and remarks on steps that are not there', async () => {
     const second = await store.client('lead2');
     const detail = await second.sequence(id());
@@ -202,5 +263,89 @@ describe('POST /sequences/:sequenceId/reviews', () => {
     ]);
     expect(answers.map((answer) => answer.status).sort()).toEqual([201, 409]);
     expect(findBrokenLink((await one.sequence(id())).entries)).toBeNull();
+  });
+});
+
+describe('a schedule that changes while a circuit is with the installer again', () => {
+  it('keeps the state, the remark and the rounds the same for whoever folds the history later', async () => {
+    const other = await makeStore(server, 'reimport');
+    const id = (await importSmallSchedule(server, other)).get('A2') as SequenceId;
+    const [phone, chief] = [await other.client('installer'), await other.client('lead')];
+    await finishSequence(phone, id, random);
+    const seen = await chief.sequence(id);
+    const stepKey = seen.stepList.steps[0]?.key as string;
+    await chief.send('post', `/api/sequences/${id}/reviews`, {
+      verdict: 'sentBack',
+      headHash: seen.fold.headHash,
+      remarks: [{ stepKey, text: 'Again' }],
+    });
+    const person = await server.services.register.find(other.people.lead.id);
+    const revised = Buffer.from(
+      SMALL_SCHEDULE.toString('utf8').replace('Deli,20,29,6,8,1', 'Deli,20,29,6,8,2'),
+    );
+    await server.services.schedules.import(person, other.openingId, revised, true);
+    const after = await phone.sequence(id);
+    expect(after.stepListHash).not.toBe(seen.stepListHash);
+    expect(foldEntries(after.entries, after.stepList.steps)).toEqual(after.fold);
+    const view = viewSequence(after.stepList, after.entries);
+    expect([view.fold.state, view.fold.round]).toEqual(['sentBack', 2]);
+    expect(view.steps.find((step) => step.step.key === stepKey)?.remark?.text).toBe('Again');
+  });
+
+  it('shows an approved circuit with the specification that was approved, and a dropped one still', async () => {
+    const other = await makeStore(server, 'redesign');
+    const id = (await importSmallSchedule(server, other)).get('A2') as SequenceId;
+    const [phone, chief] = [await other.client('installer'), await other.client('lead')];
+    await finishSequence(phone, id, random);
+    await chief.send('post', `/api/sequences/${id}/reviews`, approval(await chief.sequence(id)));
+    const person = await server.services.register.find(other.people.lead.id);
+    const lines = SMALL_SCHEDULE.toString('utf8');
+    const redesigned = Buffer.from(lines.replaceAll('R-448A', 'R-744'));
+    await server.services.schedules.import(person, other.openingId, redesigned, true);
+    expect((await chief.sequence(id)).specification.system.refrigerant).toBe('R-448A');
+    const dropped = Buffer.from(lines.split('\n').slice(0, 3).join('\n'));
+    await server.services.schedules.import(person, other.openingId, dropped, true);
+    expect((await chief.sequence(id)).fold.state).toBe('approved');
+  });
+});
+
+describe('a submission', () => {
+  it('waits for its own entries, whatever a colleague submits, and keeps its author’s name', async () => {
+    const other = await makeStore(server, 'submission');
+    const id = (await importSmallSchedule(server, other)).get('A2') as SequenceId;
+    const phone = await other.client('installer');
+    const colleague = await other.client('lead2');
+    await colleague.registerDevice();
+    const detail = await phone.sequence(id);
+    const steps = detail.stepList.steps.filter((step) => step.required);
+    const scene = {
+      specification: detail.specification,
+      facts: detail.stepList.facts,
+      author: 'x',
+      random,
+      photo: async () => ({
+        sha256: 'e'.repeat(64),
+        originalSha256: null,
+        bytes: 9,
+        width: 9,
+        height: 9,
+        capturedAt: null,
+      }),
+    };
+    const bodies = [];
+    for (const step of steps) bodies.push(phone.answer(detail, step, await demoAnswer(step, scene)));
+    const submission = phone.submission(id);
+    const [late, ...early] = bodies;
+    await phone.post([...early, submission]);
+    const vain = colleague.body(id, {
+      kind: 'submission',
+      restsOn: [{ deviceId: uuidv7() as DeviceId, count: 9 }],
+    });
+    expect(await colleague.post([vain])).toMatchObject([{ result: 'stored', state: 'open' }]);
+    expect(await phone.post([late as (typeof bodies)[number]])).toMatchObject([{ state: 'submitted' }]);
+    const { body } = await colleague.get('/api/review-queue');
+    expect(body.items.find((item: { sequenceId: string }) => item.sequenceId === id).submittedBy).toBe(
+      'installer of submission',
+    );
   });
 });

@@ -1,3 +1,4 @@
+import { canonicalJson } from '#shared/sequences/canonical-json';
 import type { CircuitEntity } from '../plant/circuit.entity';
 import type { CoilEntity } from '../plant/coil.entity';
 import type { FixtureEntity } from '../plant/fixture.entity';
@@ -62,7 +63,47 @@ export function mergeSchedule(
       }
     }
   }
+  countRevisions(out, known);
   return withRemoved(out, known, now);
+}
+
+/** A circuit's revision goes up when something about it, its fixtures or coils is other than it was. */
+function countRevisions(out: Lists, known: PlantRows): void {
+  const [before, after] = [factsByCircuit(known), factsByCircuit(out)];
+  for (const circuit of out.circuits) {
+    if (before.get(circuit.id) !== after.get(circuit.id)) circuit.revision += 1;
+  }
+}
+
+function factsByCircuit(rows: PlantRows): ReadonlyMap<string, string> {
+  const groups = new Map(rows.suctionGroups.map((group) => [group.id, group]));
+  const systems = new Map(rows.systems.map((system) => [system.id, system]));
+  const parts = new Map<string, unknown[]>();
+  for (const circuit of rows.circuits) {
+    const group = groups.get(circuit.suctionGroupId);
+    const { revision: _revision, ordinal: _ordinal, assigneeId: _assignee, ...facts } = circuit;
+    const { ordinal: _groupOrdinal, ...groupFacts } = group ?? { ordinal: 0 };
+    const { ordinal: _systemOrdinal, ...systemFacts } = (group && systems.get(group.systemId)) ?? {
+      ordinal: 0,
+    };
+    parts.set(circuit.id, [facts, groupFacts, systemFacts]);
+  }
+  for (const { ordinal: _ordinal, ...fixture } of standing(rows.fixtures))
+    parts.get(fixture.circuitId)?.push(fixture);
+  for (const coil of standing(rows.coils)) parts.get(coil.circuitId)?.push(coil);
+  return new Map(
+    [...parts].map(([id, facts]) => [
+      id,
+      facts
+        .map((fact) => canonicalJson(fact))
+        .sort()
+        .join(),
+    ]),
+  );
+}
+
+function standing<T extends { readonly removedAt: Date | null }>(rows: readonly T[]): readonly T[] {
+  return rows.filter((row) => row.removedAt === null);
 }
 
 function addCircuit(
@@ -85,7 +126,7 @@ function addCircuit(
     defrostTerminationTemperatureK: defrost.terminationTemperatureK,
     defrostDripS: defrost.dripS,
     assigneeId: before?.assigneeId ?? null,
-    revision: (before?.revision ?? 0) + 1,
+    revision: before?.revision ?? 0,
     removedAt: null,
   };
   out.circuits.push(row);

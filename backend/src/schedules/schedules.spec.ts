@@ -136,10 +136,11 @@ describe('POST /openings/:openingId/schedule-imports', () => {
     await importFile(dropped);
     expect((await circuits()).map((row) => row.code)).toEqual(['A1']);
     const kept = await server.sql<{ n: number }>(
-      `SELECT COUNT(*) AS n FROM entry e JOIN sequence s ON s.id = e.sequence_id WHERE s.opening_id = ?`,
+      `SELECT COUNT(*) AS n FROM entry e JOIN sequence s ON s.id = e.sequence_id JOIN circuit c ON c.id = s.circuit_id
+        WHERE s.opening_id = ? AND c.code = 'A2'`,
       [store.openingId],
     );
-    expect(Number(kept[0]?.n)).toBe(2);
+    expect(Number(kept[0]?.n)).toBe(1);
     await importFile(SMALL_SCHEDULE);
     expect((await circuits()).map((row) => row.code)).toEqual(['A1', 'A2']);
   });

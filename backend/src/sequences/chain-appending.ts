@@ -37,12 +37,12 @@ export function appendToChain(
   receivedAt: Date,
 ): { fold: FoldState; appended: AppendedEntry } {
   const { body, bodyHash } = item;
+  const placed = { position: fold.headPosition + 1, standing: item.standing, judgement: item.judgement };
   const server: ServerPart = {
-    position: fold.headPosition + 1,
-    standing: item.standing,
+    ...placed,
     receivedAt: receivedAt.toISOString(),
-    judgement: item.judgement,
     judgingVersion: JUDGING_VERSION,
+    stateAfter: applyEntry(fold, { body, server: placed, hash: null }, steps).state,
   };
   const hash = chainHash(fold.headHash, bodyHash, server);
   const row: EntryEntity = {

@@ -117,6 +117,7 @@ export class EntriesService {
     const known: [number, EntryResult][] = [];
     const missing: Item[] = [];
     const inThisBatch = new Set<EntryId>();
+    const twins: Item[] = [];
     for (const entry of items) {
       const row = byId.get(entry.body.id);
       if (row && row.bodyHash !== entry.bodyHash) {
@@ -127,16 +128,12 @@ export class EntriesService {
       } else if (row)
         known.push([entry.index, storedResult('alreadyStored', row, JSON.parse(row.serverPart), state)]);
       else if (!inThisBatch.has(entry.body.id)) missing.push(entry);
-      else
-        known.push([
-          entry.index,
-          { result: 'refused', id: entry.body.id, reason: 'It stands twice in this batch.' },
-        ]);
+      else twins.push(entry);
       inThisBatch.add(entry.body.id);
     }
-    return missing.length === 0
-      ? known
-      : [...known, ...(await this.write(context, caller, sequenceId, missing))];
+    if (missing.length > 0) known.push(...(await this.write(context, caller, sequenceId, missing)));
+    for (const twin of twins) known.push([twin.index, twinResult(known, twin)]);
+    return known;
   }
 
   private async write(
@@ -153,14 +150,15 @@ export class EntriesService {
         { result: 'refused', id: body.id, reason: 'There is no such sequence for you.' },
       ]);
     }
-    const { steps, facts } = await this.stepLists.find(context, sequence.companyId, sequence.stepListHash);
+    const { stepList } = await this.stepLists.find(context, sequence.companyId, sequence.stepListHash);
+    const { steps } = stepList;
     const before = JSON.parse(sequence.fold) as FoldState;
     let fold = before;
     const appended: AppendedEntry[] = [];
     const now = new Date();
     for (const { body, bodyHash: hash } of items) {
       const standing: Standing = allowed === 'held' ? 'held' : fold.state === 'approved' ? 'late' : 'inOrder';
-      const judgement = judgeContent(body, { steps, facts });
+      const judgement = judgeContent(body, stepList);
       const next = appendToChain(
         fold,
         sequence.companyId,
@@ -178,7 +176,7 @@ export class EntriesService {
     const submitted = fold.state === 'submitted' && before.state !== 'submitted';
     await this.sequences.update(context, sequenceId, {
       ...foldColumns(fold, steps),
-      ...(submitted ? { submittedAt: now, submittedBy: caller.person.id } : {}),
+      ...(submitted ? { submittedAt: now, submittedBy: fold.submittedBy } : {}),
     });
     await this.announce(context, sequence, before, fold);
     return items.map(({ index }, at) => {
@@ -221,16 +219,20 @@ function item(index: number, body: EntryBody, sent: { readonly bodyHash: string 
   return { index, body, bodyHash: sent.bodyHash };
 }
 
+/** The same entry twice in one batch: the second is answered by what became of the first. */
+function twinResult(known: readonly [number, EntryResult][], twin: Item): EntryResult {
+  const first = known.find(([, result]) => result.id === twin.body.id)?.[1];
+  if (first?.result === 'stored') return { ...first, result: 'alreadyStored' };
+  return first ?? { result: 'refused', id: twin.body.id, reason: 'It stands twice in this batch.' };
+}
+
 function idOf(body: unknown): string | null {
   const id = (body as { id?: unknown } | null)?.id;
   return typeof id === 'string' ? id.slice(0, 64) : null;
 }
 
 /** The server's own judgement; the device's stays in the body as what it was. */
-function judgeContent(
-  body: EntryBody,
-  { steps, facts }: Pick<StepList, 'steps' | 'facts'>,
-): Judgement | null {
+function judgeContent(body: EntryBody, { steps, facts }: StepList): Judgement | null {
   const { content } = body;
   if (content.kind === 'notApplicable') return plainJudgement('notApplicable');
   if (content.kind !== 'answer') return null;

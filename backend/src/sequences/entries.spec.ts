@@ -192,6 +192,33 @@ describe('POST /entries', () => {
     expect((await installer.sequence(a1())).entries.length).toBe(detail.entries.length);
   });
 
+  it('takes nothing from a contractor', async () => {
+    const contractor = await store.client('contractor');
+    await contractor.registerDevice();
+    const detail = await installer.sequence(a1());
+    const body = contractor.answer(detail, stepOf(detail, 'note'), { kind: 'note', text: 'Hello' });
+    expect(await contractor.post([body])).toMatchObject([{ result: 'refused' }]);
+  });
+
+  it('refuses an id in upper case, and a count that no device reaches', async () => {
+    const detail = await installer.sequence(a1());
+    const good = installer.answer(detail, stepOf(detail, 'note'), { kind: 'note', text: 'x' });
+    const loud = { ...good, id: good.id.toUpperCase() as EntryId };
+    const many = { ...good, deviceCount: 2_147_483_648 };
+    expect((await installer.post([loud, many])).map((result) => result.result)).toEqual([
+      'refused',
+      'refused',
+    ]);
+  });
+
+  it('answers the same entry twice in one batch by what became of the first', async () => {
+    const detail = await installer.sequence(a1());
+    const body = installer.answer(detail, stepOf(detail, 'note'), { kind: 'note', text: 'Once' });
+    const results = await installer.post([body, body]);
+    expect(results.map((result) => result.result)).toEqual(['stored', 'alreadyStored']);
+    expect(new Set(positions(results)).size).toBe(1);
+  });
+
   it('answers a body that is no batch with the exact places', async () => {
     const response = await installer.send('post', '/api/entries', {
       entries: [{ bodyHash: 'short' }],
@@ -213,7 +240,31 @@ describe('the device credential', () => {
     expect(await phone.post([body])).toMatchObject([{ result: 'stored' }]);
     expect((await phone.get('/api/my/circuits')).status).toBe(200);
     expect((await phone.get('/api/openings')).status).toBe(401);
+    // A1 has entries of this person; A2 of this opening has some too, the other opening's none.
+    expect((await phone.get(`/api/sequences/${a1()}`)).status).toBe(200);
     expect((await phone.send('post', `/api/sequences/${a1()}/reviews`, {})).status).toBe(401);
+  });
+
+  it('reads no circuit that is not its person’s', async () => {
+    const other = await makeStore(server, 'devices');
+    const theirs = await importSmallSchedule(server, other);
+    const phone = await other.client('installer');
+    await server.sql('DELETE FROM session');
+    const response = await phone.get(`/api/sequences/${theirs.get('A1')}`);
+    expect([response.status, response.body.code]).toEqual([404, 'notFound']);
+  });
+
+  it('ends with signing out, also where the session has ended by itself', async () => {
+    const phone = await store.client('installer');
+    const cookie = (
+      (await phone.send('post', '/api/devices', { deviceId: phone.deviceId, label: 'x' })).headers[
+        'set-cookie'
+      ] as unknown as string[]
+    )[0]?.split(';')[0] as string;
+    await server.sql('DELETE FROM session');
+    expect((await phone.send('delete', '/api/session')).status).toBe(204);
+    const copied = await fetch(`${server.url}/api/my/circuits`, { headers: { cookie } });
+    expect(copied.status).toBe(401);
   });
 
   it('speaks no more once it is revoked', async () => {

@@ -1,5 +1,5 @@
 import { uuidv7 } from 'uuidv7';
-import type { StepList } from '#shared/checklist/step';
+import type { ExpansionDocument } from '#shared/checklist/step';
 import type { CompanyId, EntryId, OpeningId, PersonId, SequenceId } from '#shared/plant/ids';
 import type { CircuitSpecification } from '#shared/plant/plant';
 import { canonicalJson } from '#shared/sequences/canonical-json';
@@ -16,9 +16,10 @@ import type { SequenceEntity } from './sequence.entity';
 import type { SequencesRepository } from './sequences.repository';
 import type { StepListEntity } from './step-list.entity';
 
-interface Expanded {
-  readonly specification: CircuitSpecification;
-  readonly stepList: StepList;
+/** Circuits expanded before others get their turn; also rows in one statement, which bounds its size. */
+const SLICE = 25;
+
+interface Expanded extends ExpansionDocument {
   readonly hash: string;
   readonly content: string;
 }
@@ -46,7 +47,10 @@ export class ExpansionService {
   ): Promise<number> {
     const expanded = await this.expandAll(context, owner.companyId, specifications);
     const now = new Date();
-    await this.sequences.insertStepLists(context, stepListRows(owner, expanded, now));
+    const stepLists = stepListRows(owner, expanded, now);
+    for (let at = 0; at < stepLists.length; at += SLICE) {
+      await this.sequences.insertStepLists(context, stepLists.slice(at, at + SLICE));
+    }
     const known = await this.sequences.findByCircuits(
       context,
       expanded.map(({ specification }) => specification.circuit.id),
@@ -58,9 +62,9 @@ export class ExpansionService {
       if (sequence) await this.renew(context, sequence.id as SequenceId, item, authorId, now);
       else begin(owner, item, authorId, now, rows, entries);
     }
-    for (let at = 0; at < rows.length; at += 100) {
-      await this.sequences.insert(context, rows.slice(at, at + 100));
-      await this.sequences.insertEntries(context, entries.slice(at, at + 100));
+    for (let at = 0; at < rows.length; at += SLICE) {
+      await this.sequences.insert(context, rows.slice(at, at + SLICE));
+      await this.sequences.insertEntries(context, entries.slice(at, at + SLICE));
     }
     return expanded.length;
   }
@@ -70,13 +74,18 @@ export class ExpansionService {
     companyId: CompanyId,
     specifications: readonly CircuitSpecification[],
   ): Promise<Expanded[]> {
-    const stepLists = await this.templates.expand(context, companyId, specifications);
-    return stepLists.flatMap((stepList, index) => {
-      const specification = specifications[index];
-      if (!stepList || !specification) return [];
-      const content = canonicalJson(stepList);
-      return [{ specification, stepList, content, hash: sha256OfText(content) }];
-    });
+    const expanded: Expanded[] = [];
+    for (let at = 0; at < specifications.length; at += SLICE) {
+      const slice = specifications.slice(at, at + SLICE);
+      const stepLists = await this.templates.expand(context, companyId, slice);
+      for (const [index, stepList] of stepLists.entries()) {
+        const specification = slice[index];
+        if (stepList && specification) expanded.push(bind({ stepList, specification }));
+      }
+      // A large store takes seconds of work: others get their turn in between.
+      await new Promise((resolve) => setImmediate(resolve));
+    }
+    return expanded;
   }
 
   private async renew(
@@ -97,6 +106,11 @@ export class ExpansionService {
       stepListHash: item.hash,
     });
   }
+}
+
+function bind(document: ExpansionDocument): Expanded {
+  const content = canonicalJson(document);
+  return { ...document, content, hash: sha256OfText(content) };
 }
 
 function begin(

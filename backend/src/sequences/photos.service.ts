@@ -1,6 +1,7 @@
 import { createHash } from 'node:crypto';
 import { DomainFailure, TemporaryFailure } from '#shared/failures/failure';
-import type { SequenceId } from '#shared/plant/ids';
+import { may } from '#shared/access/may';
+import type { CompanyId, OpeningId, SequenceId } from '#shared/plant/ids';
 import type { Transactions } from '../database/transactions';
 import type { LiveEventsService } from '../events/live-events.service';
 import { checkJpeg } from '../files/jpeg-check';
@@ -10,6 +11,7 @@ import type { Caller } from '../http/define-route';
 import type { JobPayloads } from '../jobs/job-kinds';
 import type { JobRun } from '../jobs/job-worker';
 import type { JobsService } from '../jobs/jobs.service';
+import type { PeopleService } from '../people/people.service';
 import type { PhotosRepository } from './photos.repository';
 import type { SequencesRepository } from './sequences.repository';
 
@@ -26,6 +28,7 @@ export class PhotosService {
     private readonly transactions: Transactions,
     private readonly sequences: SequencesRepository,
     private readonly photos: PhotosRepository,
+    private readonly people: PeopleService,
     private readonly storage: ObjectStorage,
     private readonly renderer: PhotoRenderer,
     private readonly jobs: JobsService,
@@ -50,7 +53,9 @@ export class PhotosService {
       ]);
     }
     const sequence = await this.sequences.find(this.transactions.outside, sequenceId);
-    if (!sequence) throw new DomainFailure('notFound', 'There is no such sequence.');
+    if (!sequence || !(await this.mayAdd(caller, sequence))) {
+      throw new DomainFailure('notFound', 'There is no such sequence here.');
+    }
     const known = await this.photos.find(this.transactions.outside, sequenceId, sha256);
     if (known) return { sha256, alreadyThere: true };
     // The bytes first: a row without bytes would be a promise that can't be kept.
@@ -76,6 +81,15 @@ export class PhotosService {
       });
     });
     return { sha256, alreadyThere: false };
+  }
+
+  private async mayAdd(caller: Caller, sequence: { companyId: string; openingId: string }): Promise<boolean> {
+    const subject = {
+      companyId: sequence.companyId as CompanyId,
+      openingId: sequence.openingId as OpeningId,
+    };
+    if (may(caller.person, 'photo.add', subject)) return true;
+    return this.people.wasEverMember(this.transactions.outside, subject.openingId, caller.person.id);
   }
 
   /** A photo's bytes; a thumbnail that isn't made yet is answered by the photo itself. */

@@ -80,6 +80,7 @@ describe('PUT /sequences/:sequenceId/photos/:sha256', () => {
     ['is a PNG', () => Buffer.from('89504e470d0a1a0a0000000d49484452', 'hex'), 415, 'notAnImage'],
     ['is cut off half-way', () => photo.subarray(0, photo.length >> 1), 415, 'notAnImage'],
     ['has 40 megapixels', () => withSize(photo, 8000, 5000), 413, 'tooLarge'],
+    ['holds other application data', () => withSegment(photo, 0xed, Buffer.from('Photo')), 415, 'notAnImage'],
     [
       'still holds camera metadata',
       () => withSegment(photo, 0xe1, Buffer.from('Exif\0\0')),
@@ -105,6 +106,22 @@ describe('PUT /sequences/:sequenceId/photos/:sha256', () => {
     const path = `/api/sequences/${id}/photos/${'b'.repeat(64)}`;
     const response = await installer.upload('put', path, 'photo', photo, 'photo.jpg');
     expect([response.status, response.body.code]).toEqual([400, 'invalidInput']);
+  });
+
+  it('takes nothing from a contractor or a stranger, and says nothing to them', async () => {
+    const other = await makeStore(server, 'photostrangers');
+    for (const client of [await store.client('contractor'), await other.client('installer')]) {
+      const response = await client.addPhoto(id, await drawDemoPhoto(steadyNumbers(5), 64));
+      expect([response.status, response.body.code]).toEqual([404, 'notFound']);
+    }
+  });
+
+  it('takes what somebody recorded before their role ended', async () => {
+    const phone = await store.client('installer');
+    await server.services.register.endMember(store.openingId, store.people.installer.id);
+    const late = await drawDemoPhoto(steadyNumbers(6), 64);
+    expect((await phone.addPhoto(id, late)).status).toBe(200);
+    await server.sql('UPDATE membership SET ended_at = NULL');
   });
 
   it('refuses a request without a file, in words', async () => {

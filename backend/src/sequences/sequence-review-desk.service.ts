@@ -5,6 +5,8 @@ import type { EntryBody } from '#shared/sequences/entry';
 import type { FoldState } from '#shared/sequences/fold-state';
 import type { Context } from '../database/transactions';
 import { appendToChain, foldColumns } from './chain-appending';
+import { photosNamedBy } from './photo-statuses';
+import type { PhotosRepository } from './photos.repository';
 import type { SequencesRepository } from './sequences.repository';
 import type { StepLists } from './step-lists';
 
@@ -24,14 +26,15 @@ export class SequenceReviewDesk {
   constructor(
     private readonly sequences: SequencesRepository,
     private readonly stepLists: StepLists,
+    private readonly photos: PhotosRepository,
   ) {}
 
   /** @throws {DomainFailure} notFound */
   async lock(context: Context, id: SequenceId): Promise<LockedForReview> {
     const locked = await this.sequences.lock(context, id);
     if (!locked) throw new DomainFailure('notFound', 'There is no such sequence.');
-    const { steps } = await this.stepLists.find(context, locked.companyId, locked.stepListHash);
-    return { ...locked, fold: JSON.parse(locked.fold) as FoldState, steps };
+    const { stepList } = await this.stepLists.find(context, locked.companyId, locked.stepListHash);
+    return { ...locked, fold: JSON.parse(locked.fold) as FoldState, steps: stepList.steps };
   }
 
   /** Appends a review entry; returns the fold after it. */
@@ -46,6 +49,17 @@ export class SequenceReviewDesk {
     await this.sequences.insertEntries(context, [appended.row]);
     await this.sequences.update(context, locked.id, foldColumns(fold, locked.steps));
     return fold;
+  }
+
+  /** How many photos that count as evidence have not arrived: their phone still has them, or nobody has. */
+  async countAwaitedPhotos(context: Context, locked: LockedForReview): Promise<number> {
+    const current = Object.values(locked.fold.steps).map((step) => step.entryId);
+    const rows = await this.sequences.findEntriesById(context, current);
+    const arrived = new Set(
+      (await this.photos.findOfSequence(context, locked.id)).map((photo) => photo.sha256),
+    );
+    const named = rows.flatMap((row) => photosNamedBy(JSON.parse(row.body) as EntryBody));
+    return new Set(named.filter((sha256) => !arrived.has(sha256))).size;
   }
 
   /** Whoever recorded or submitted something on it. */

@@ -94,6 +94,17 @@ export class SequencesRepository {
       .execute();
   }
 
+  /** Whether the circuit is assigned to the person, or the person recorded something on it. */
+  async isWorkOf(context: Context, id: SequenceId, personId: PersonId): Promise<boolean> {
+    const rows: unknown[] = await managerOf(context).query(
+      `SELECT 1 FROM sequence s JOIN circuit c ON c.id = s.circuit_id
+        WHERE s.id = ? AND (c.assignee_id = ?
+           OR EXISTS (SELECT 1 FROM entry e WHERE e.sequence_id = s.id AND e.author_id = ?))`,
+      [id, personId, personId],
+    );
+    return rows.length > 0;
+  }
+
   /** Who last submitted a sequence and to whom a lead's remarks go. */
   async findRecorders(context: Context, sequenceId: SequenceId): Promise<PersonId[]> {
     const rows: { id: PersonId }[] = await managerOf(context).query(

@@ -1,13 +1,13 @@
 import type { SequenceDetail } from '#shared/contracts/sequences';
 import { Bug, DomainFailure } from '#shared/failures/failure';
-import type { CircuitId, CompanyId, EntryId, PersonId, SequenceId } from '#shared/plant/ids';
+import type { CompanyId, EntryId, PersonId, SequenceId } from '#shared/plant/ids';
 import type { EntryBody, StoredEntry } from '#shared/sequences/entry';
 import type { FoldState } from '#shared/sequences/fold-state';
 import { foldEntries } from '#shared/sequences/fold';
 import type { Context, Transactions } from '../database/transactions';
+import type { Caller } from '../http/define-route';
 import type { OpeningsService } from '../openings/openings.service';
 import type { PeopleService } from '../people/people.service';
-import type { PlantService } from '../plant/plant.service';
 import type { EntryEntity } from './entry.entity';
 import { photoStatuses } from './photo-statuses';
 import type { PhotosRepository } from './photos.repository';
@@ -22,9 +22,25 @@ export class SequencesService {
     private readonly photos: PhotosRepository,
     private readonly stepLists: StepLists,
     private readonly openings: OpeningsService,
-    private readonly plant: PlantService,
     private readonly people: PeopleService,
   ) {}
+
+  /**
+   * One sequence, to whoever asks. A phone without a session reads its person's circuits and no others.
+   *
+   * @throws {DomainFailure} notFound
+   */
+  async showTo(caller: Caller, id: SequenceId): Promise<SequenceDetail> {
+    await this.checkOwnWork(caller, id);
+    return this.show(id);
+  }
+
+  /** @throws {DomainFailure} notFound for a device credential on somebody else's circuit */
+  async checkOwnWork(caller: Caller, id: SequenceId): Promise<void> {
+    if (caller.via === 'session') return;
+    if (await this.sequences.isWorkOf(this.transactions.outside, id, caller.person.id)) return;
+    throw new DomainFailure('notFound', 'This is not a circuit of yours. Sign in to see it.');
+  }
 
   /**
    * One sequence with everything in it.
@@ -39,13 +55,11 @@ export class SequencesService {
     const row = await this.sequences.find(context, id);
     if (!row) throw new DomainFailure('notFound', 'There is no such sequence.');
     const opening = await this.openings.find(context, row.openingId as never);
-    const circuitId = row.circuitId as CircuitId;
-    const [specification] = await this.plant.specifications(context, opening, [circuitId]);
-    if (!specification) throw new DomainFailure('notFound', 'This circuit was removed by a later schedule.');
     const entries = (await this.sequences.findEntries(context, id, upTo)).map(toStored);
     const fold = upTo === undefined ? (JSON.parse(row.fold) as FoldState) : null;
     const stepListHash = fold ? row.stepListHash : lastStepList(entries);
-    const stepList = await this.stepLists.find(context, row.companyId as CompanyId, stepListHash);
+    const document = await this.stepLists.find(context, row.companyId as CompanyId, stepListHash);
+    const { stepList, specification } = document;
     return {
       id,
       openingId: opening.id as never,

@@ -1,4 +1,4 @@
-import type { StepList } from '#shared/checklist/step';
+import type { ExpansionDocument } from '#shared/checklist/step';
 import { Bug } from '#shared/failures/failure';
 import type { CompanyId } from '#shared/plant/ids';
 import type { Context } from '../database/transactions';
@@ -6,21 +6,21 @@ import type { SequencesRepository } from './sequences.repository';
 
 const MAX_CACHED = 400;
 
-/** Expanded step lists by hash. What a hash stands for never changes, so every server may keep the ones in use. */
+/** Expanded step lists, each with the specification it was made from, by hash. What a hash stands for never changes, so every server may keep the ones in use. */
 export class StepLists {
-  private readonly cache = new Map<string, StepList>();
+  private readonly cache = new Map<string, ExpansionDocument>();
 
   constructor(private readonly sequences: SequencesRepository) {}
 
-  async find(context: Context, companyId: CompanyId, hash: string): Promise<StepList> {
+  async find(context: Context, companyId: CompanyId, hash: string): Promise<ExpansionDocument> {
     const key = `${companyId} ${hash}`;
     const cached = this.cache.get(key);
     if (cached) return cached;
     const content = await this.sequences.findStepList(context, companyId, hash);
     if (content === null) throw new Bug(`The step list ${hash} is missing`);
-    const stepList = JSON.parse(content) as StepList;
+    const document = JSON.parse(content) as ExpansionDocument;
     if (this.cache.size >= MAX_CACHED) this.cache.delete(this.cache.keys().next().value as string);
-    this.cache.set(key, stepList);
-    return stepList;
+    this.cache.set(key, document);
+    return document;
   }
 }

@@ -31,8 +31,7 @@ export class InstallationKey {
     if (!existsSync(file)) {
       mkdirSync(dirname(file), { recursive: true, mode: 0o700 });
       const { privateKey } = generateKeyPairSync('ed25519');
-      // `wx`: two servers that start together must not each keep a key of their own.
-      writeFileSync(file, privateKey.export({ format: 'pem', type: 'pkcs8' }), { mode: 0o600, flag: 'wx' });
+      keep(file, privateKey.export({ format: 'pem', type: 'pkcs8' }) as string);
     }
     return new InstallationKey(createPrivateKey(readFileSync(file)));
   }
@@ -49,5 +48,14 @@ export class InstallationKey {
       createPublicKey(this.key),
       Buffer.from(signature, 'base64'),
     );
+  }
+}
+
+/** `wx`: of two servers that start together the first one's key is kept, and the other reads that. */
+function keep(file: string, pem: string): void {
+  try {
+    writeFileSync(file, pem, { mode: 0o600, flag: 'wx' });
+  } catch (error) {
+    if ((error as NodeJS.ErrnoException).code !== 'EEXIST') throw error;
   }
 }

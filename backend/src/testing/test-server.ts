@@ -62,7 +62,7 @@ export async function startTestServer(options: { readonly jobs?: boolean } = {})
   const logger = pino({ level: process.env['TEST_LOG'] ?? 'silent' });
   const services = wireServices(config, dataSource, logger);
   await services.storage.prepare();
-  if (options.jobs) services.worker.start(1);
+  if (options.jobs) services.worker.start();
   const server = createServer(createApp(services, logger, { secure: false, checkResponses: true }));
   await new Promise<void>((resolve) => server.listen(0, '127.0.0.1', resolve));
   const url = `http://127.0.0.1:${(server.address() as AddressInfo).port}`;

@@ -11,7 +11,7 @@ const TABLES = [
     \`id\` uuid NOT NULL,
     \`company_id\` uuid NOT NULL,
     \`name\` varchar(120) NOT NULL,
-    \`email\` varchar(254) NOT NULL,
+    \`email\` varchar(254) CHARACTER SET utf8mb4 COLLATE utf8mb4_bin NOT NULL,
     \`password_hash\` varchar(255) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
     \`company_role\` varchar(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
     \`language\` varchar(8) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,

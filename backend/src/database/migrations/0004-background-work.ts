@@ -14,7 +14,7 @@ const TABLES = [
     \`run_after\` datetime(3) NOT NULL,
     \`lease_until\` datetime(3) NULL,
     \`last_error\` varchar(1000) NULL,
-    INDEX \`IX_job_due\` (\`state\`, \`run_after\`),
+    INDEX \`IX_job_due\` (\`kind\`, \`state\`, \`run_after\`),
     UNIQUE INDEX \`UQ_job_key\` (\`unique_key\`),
     PRIMARY KEY (\`id\`)
   ) ENGINE=InnoDB`,

@@ -10,7 +10,7 @@ export const listMyCircuits = (openings: OpeningsService) =>
     method: 'get',
     path: '/my/circuits',
     summary: 'The circuits assigned to the caller',
-    access: { kind: 'self', reason: 'Lists only the own work.', device: true },
+    access: { kind: 'self', reason: 'Lists only the own work.', device: 'fallback' },
     query: z.object(pageQueryShape),
     response: circuitListSchema,
     handle: ({ caller, query }) => openings.listAssigned(caller.person, query.limit ?? 200, query.after),

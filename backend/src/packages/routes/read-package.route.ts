@@ -4,9 +4,6 @@ import { defineRoute } from '../../http/define-route';
 import { streamFile } from '../../http/stream-file';
 import type { PackagesService } from '../packages.service';
 
-/** One range, as a download that goes on after a break asks for. Others are answered by the whole file. */
-const ONE_RANGE = /^bytes=(\d+-\d*|-\d+)$/;
-
 /** GET /packages/:packageId/document */
 export const readPackage = (packages: PackagesService) =>
   defineRoute({
@@ -18,8 +15,11 @@ export const readPackage = (packages: PackagesService) =>
     query: z.object({ download: z.optional(z.enum(['true', 'false'])) }),
     response: 'stream',
     async handle({ params, query, headers, exchange }) {
-      const range = headers.range && ONE_RANGE.test(headers.range) ? headers.range : undefined;
-      const file = await packages.read(params.packageId, range);
+      const file = await packages.read(params.packageId, headers.range);
+      if (!file) {
+        exchange.response.status(416).end();
+        return;
+      }
       await streamFile(exchange.response, file, {
         'Content-Type': 'application/pdf',
         'Cache-Control': 'private, max-age=0, must-revalidate',

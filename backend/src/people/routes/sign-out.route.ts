@@ -7,7 +7,7 @@ export const signOut = (door: SessionDoor) =>
     method: 'delete',
     path: '/session',
     summary: 'Sign out of this browser',
-    access: { kind: 'self', reason: 'Everybody may leave.' },
+    access: { kind: 'public', reason: 'Everybody may leave, also with a session that has ended.' },
     response: 'nothing',
     handle: ({ exchange }) => door.signOut(exchange.request, exchange.response),
   });

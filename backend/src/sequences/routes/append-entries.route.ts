@@ -8,7 +8,11 @@ export const appendEntries = (entries: EntriesService) =>
     method: 'post',
     path: '/entries',
     summary: 'Append entries; each is authorised by its own sequence and answered by itself',
-    access: { kind: 'self', reason: 'Each entry is checked against what its author may do.', device: true },
+    access: {
+      kind: 'self',
+      reason: 'Each entry is checked against what its author may do.',
+      device: 'first',
+    },
     body: entryBatchSchema,
     response: entryBatchResponseSchema,
     handle: async ({ caller, body }) => ({ results: await entries.append(caller, body.entries) }),

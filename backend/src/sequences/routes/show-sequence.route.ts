@@ -15,9 +15,9 @@ export const showSequence = (sequences: SequencesService) =>
       action: 'sequence.read',
       subject: 'sequence',
       param: 'sequenceId',
-      device: true,
+      device: 'fallback',
     },
     params: z.object({ sequenceId: sequenceIdSchema }),
     response: sequenceDetailSchema,
-    handle: ({ params }) => sequences.show(params.sequenceId),
+    handle: ({ caller, params }) => sequences.showTo(caller, params.sequenceId),
   });
