@@ -9,7 +9,16 @@ import { Bug } from '../failures/failure';
  * @example canonicalJson({ b: 1, a: [true] }) === '{"a":[true],"b":1}'
  */
 export function canonicalJson(value: unknown): string {
-  const text = canonicalize(value);
+  const text = attempt(value);
   if (text === undefined) throw new Bug('A value without a JSON form can not be hashed');
   return text;
+}
+
+function attempt(value: unknown): string | undefined {
+  try {
+    return canonicalize(value);
+  } catch (error) {
+    // The library throws a plain error for NaN and infinities.
+    throw new Bug(error instanceof Error ? error.message : String(error));
+  }
 }

@@ -65,8 +65,9 @@ export function foldEntries(entries: readonly FoldEntry[], steps: readonly Step[
 export function missingSteps(state: FoldState, steps: readonly Step[]): readonly Step[] {
   return steps.filter((step) => {
     const fold = state.steps[step.key];
-    if (fold?.overrideStanding) return true;
-    return step.required && (!fold || !fold.counts || fold.reopenedBy !== null);
+    // What a lead asked for again is needed, required or not.
+    if (fold && (fold.overrideStanding || fold.reopenedBy !== null)) return true;
+    return step.required && (!fold || !fold.counts);
   });
 }
 
@@ -76,6 +77,7 @@ function applyContent(state: FoldState, entry: FoldEntry, content: EntryContent)
       applyAnswer(state, entry, content);
       return;
     case 'notApplicable':
+      if (isUnknownStep(entry)) return;
       setStep(state, content.stepKey, entry, {
         outcome: 'notApplicable',
         counts: true,
@@ -102,14 +104,18 @@ function applyAnswer(
   content: Extract<EntryContent, { kind: 'answer' }>,
 ): void {
   const judged = entry.server.judgement ?? content.workedOut;
-  // Kept in the chain, but no place of its own: what nobody asked must not grow the state of what was asked.
-  if (entry.server.judgement?.doubts.some((doubt) => doubt.kind === 'unknownStep')) return;
+  if (isUnknownStep(entry)) return;
   const standing = content.answer.kind === 'override' && content.answer.phase === 'set';
   setStep(state, content.stepKey, entry, {
     outcome: judged.outcome,
     counts: judged.counts,
     overrideStanding: standing,
   });
+}
+
+/** Kept in the chain, but without a place here: what nobody asked must not grow the state of what was asked. */
+function isUnknownStep(entry: FoldEntry): boolean {
+  return entry.server.judgement?.doubts.some((doubt) => doubt.kind === 'unknownStep') ?? false;
 }
 
 function setStep(

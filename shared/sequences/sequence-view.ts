@@ -45,10 +45,17 @@ export function viewSequence(stepList: StepList, entries: readonly FoldEntry[]):
     }
   }
   const byId = new Map(entries.map((entry) => [entry.body.id, entry]));
+  // A step without an answer has no state of its own: while the sequence is sent back, the last remarks are for it too.
+  const sentBack =
+    fold.state === 'sentBack'
+      ? entries.findLast(
+          ({ body: { content } }) => content.kind === 'review' && content.verdict === 'sentBack',
+        )
+      : undefined;
   const steps = stepList.steps.map((step): StepView => {
     const stepFold = fold.steps[step.key] ?? null;
     const history = byKey.get(step.key) ?? [];
-    const reopening = stepFold?.reopenedBy ? byId.get(stepFold.reopenedBy) : undefined;
+    const reopening = stepFold?.reopenedBy ? byId.get(stepFold.reopenedBy) : stepFold ? undefined : sentBack;
     return {
       step,
       fold: stepFold,

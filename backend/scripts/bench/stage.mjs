@@ -57,7 +57,8 @@ export async function setStage(shutdown, { profileDir }) {
     TLS_CERT: '',
     TLS_KEY: '',
   };
-  const profiling = profileDir ? { NODE_OPTIONS: `--cpu-prof --cpu-prof-dir=${profileDir}` } : {};
+  const profiler = new URL('./profiler.mjs', import.meta.url).href;
+  const profiling = profileDir ? { NODE_OPTIONS: `--import=${profiler}`, BENCH_PROFILE_DIR: profileDir } : {};
   const server = startServer({ environment: { ...environment, ...profiling }, dataDir });
   shutdown.add('The server', server.stop, server.kill);
   await waitUntilHealthy(server, localUrl, { log, isStopped: () => shutdown.isRequested });

@@ -1,5 +1,7 @@
 import { join } from 'node:path';
-import express, { type Express } from 'express';
+import { constants } from 'node:zlib';
+import compression from 'compression';
+import express, { type Express, type RequestHandler } from 'express';
 import type { Logger } from 'pino';
 import { pinoHttp } from 'pino-http';
 import { DomainFailure } from '#shared/failures/failure';
@@ -15,6 +17,8 @@ import { staticFiles } from './static-files';
 
 /** The largest body of JSON: 50 entries with signatures. */
 const JSON_LIMIT = '2mb';
+/** Batches of entries stay below: what is written often is not worth the processor's time. */
+const COMPRESS_FROM_BYTES = 24_000;
 
 export interface AppOptions {
   readonly secure: boolean;
@@ -35,6 +39,7 @@ export function createApp(services: Services, logger: Logger, options: AppOption
   app.use(securityHeaders(options.secure));
   const routes = listRoutes(services);
   const document = openApiDocument(routes);
+  app.use('/api', compressLargeAnswers());
   app.use('/api', services.forgery.issue);
   app.get('/api/openapi.json', (_request, response) => {
     response.json(document);
@@ -53,6 +58,15 @@ export function createApp(services: Services, logger: Logger, options: AppOption
   app.use(staticFiles(join(PROJECT_FOLDER, 'dist', 'frontend', 'browser')));
   app.use(errorResponse(logger));
   return app;
+}
+
+/** A circuit is 85 kB of JSON and 11 kB on the air. Small answers and the event stream go out as they are. */
+function compressLargeAnswers(): RequestHandler {
+  return compression({
+    threshold: COMPRESS_FROM_BYTES,
+    filter: (_request, response) => String(response.getHeader('Content-Type')).startsWith('application/json'),
+    brotli: { params: { [constants.BROTLI_PARAM_QUALITY]: 4 } },
+  });
 }
 
 /** One line a request, without cookies, bodies or query strings: logs hold no secrets. */

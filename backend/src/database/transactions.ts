@@ -40,15 +40,20 @@ export class Transactions {
   /**
    * Runs `work` in a transaction.
    *
+   * @param isolation `READ COMMITTED` for queues: the database's own level locks the gaps between rows too, and workers
+   *   would wait for each other where they are meant to step over
    * @throws {TemporaryFailure} when the database refused it for its locks again and again
    */
-  async run<T>(work: (context: Context) => Promise<T>): Promise<T> {
+  async run<T>(work: (context: Context) => Promise<T>, isolation?: 'READ COMMITTED'): Promise<T> {
     for (let attempt = 1; ; attempt += 1) {
       try {
-        const { context, result } = await this.dataSource.transaction(async (manager) => {
+        const attemptWork = async (manager: EntityManager) => {
           const inside = new Context(manager);
           return { context: inside, result: await work(inside) };
-        });
+        };
+        const { context, result } = await (isolation
+          ? this.dataSource.transaction(isolation, attemptWork)
+          : this.dataSource.transaction(attemptWork));
         for (const action of context.afterCommit) action();
         return result;
       } catch (error) {

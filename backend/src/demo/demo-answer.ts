@@ -57,8 +57,10 @@ export async function demoAnswer(step: Step, scene: DemoScene): Promise<Answer> 
 function readingValue(step: StepOf<'reading'>, random: () => number): number {
   const { low, high } = step.limits;
   if (low !== null && high !== null) return low + (high - low) * (0.25 + 0.5 * random());
-  if (low !== null) return low + Math.max(0.5, Math.abs(low) * 0.05) * (0.3 + random());
-  if (high !== null) return high - Math.max(0.5, Math.abs(high) * 0.05) * (0.3 + random());
+  // A few degrees inside on the kelvin scale; a few per cent for everything that begins at zero.
+  const isTemperature = step.dimension === 'temperature';
+  if (low !== null) return isTemperature ? low + 0.5 + 2 * random() : low * (1.02 + 0.08 * random());
+  if (high !== null) return isTemperature ? high - 0.5 - 2 * random() : high * (0.9 + 0.08 * random());
   return (ORDINARY[step.dimension] ?? 1) * (0.97 + 0.06 * random());
 }
 

@@ -49,8 +49,14 @@ export class LiveEventsService {
     });
     response.write('retry: 2000\n\n');
     this.makeRoom(person);
+    let isGone = false;
+    response.once('close', () => {
+      isGone = true;
+    });
     const listener: Listener = { person, response };
     if (this.listeners.size === 0) await this.remember();
+    // The browser went away meanwhile: its 'close' won't come again.
+    if (isGone) return;
     this.listeners.add(listener);
     this.timer ??= setInterval(() => void this.poll(), POLL_MS);
     const keepAlive = setInterval(() => response.write(': here\n\n'), KEEP_ALIVE_MS);

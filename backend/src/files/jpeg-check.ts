@@ -20,7 +20,8 @@ export function checkJpeg(bytes: Buffer): { width: number; height: number } {
   if (bytes.length < 4 || bytes.readUInt16BE(0) !== 0xffd8) {
     throw new DomainFailure('notAnImage', 'This is not a JPEG picture.');
   }
-  if (bytes.lastIndexOf(Buffer.from([0xff, 0xd9])) < bytes.length - 64) {
+  const end = bytes.lastIndexOf(Buffer.from([0xff, 0xd9]));
+  if (end < 0 || end < bytes.length - 64) {
     throw new DomainFailure('notAnImage', 'The picture is cut off: its end is missing.');
   }
   const size = findFrame(bytes);

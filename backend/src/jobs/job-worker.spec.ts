@@ -26,6 +26,9 @@ class FakeJobs {
   async finish(_context: unknown, id: string): Promise<void> {
     this.log.push(`finish ${id}`);
   }
+  async giveBack(_context: unknown, id: string): Promise<void> {
+    this.log.push(`giveBack ${id}`);
+  }
   async fail(_context: unknown, id: string, error: string, retryAfterS: number | null): Promise<void> {
     this.log.push(`fail ${id} ${error} ${retryAfterS}`);
   }
@@ -202,7 +205,7 @@ describe('JobWorker', () => {
     const stopped = worker.stop();
     await pass(10);
     await stopped;
-    expect(jobs.log).toEqual(['fail a told to stop 0']);
+    expect(jobs.log).toEqual(['giveBack a']);
     expect(jobs.waiting.map((job) => job.id)).toEqual(['b']);
     const { claims } = jobs;
     await pass(10_000);

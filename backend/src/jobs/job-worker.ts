@@ -62,7 +62,7 @@ export class JobWorker {
 
   private async claim(kind: JobKind): Promise<ClaimedJob | null> {
     try {
-      return await this.transactions.run((context) => this.jobs.claim(context, kind));
+      return await this.transactions.run((context) => this.jobs.claim(context, kind), 'READ COMMITTED');
     } catch (error) {
       // The database is away or restarting: the worker must outlive that.
       if (!this.abort.signal.aborted) this.logger.warn({ err: error }, 'could not look for jobs');
@@ -102,10 +102,11 @@ export class JobWorker {
     const stopping = this.abort.signal.aborted;
     const givenUp = !stopping && job.attempts >= maxAttempts;
     this.logger[givenUp ? 'error' : 'warn']({ err: error, job: job.id, kind: job.kind }, 'job failed');
-    const retryAfterS = stopping ? 0 : givenUp ? null : Math.min(3600, 2 ** job.attempts);
+    const retryAfterS = givenUp ? null : Math.min(3600, 2 ** job.attempts);
     const text = error instanceof Error ? error.message : String(error);
     try {
-      await this.jobs.fail(this.transactions.outside, job.id, text, retryAfterS);
+      if (stopping) await this.jobs.giveBack(this.transactions.outside, job.id);
+      else await this.jobs.fail(this.transactions.outside, job.id, text, retryAfterS);
     } catch (failure) {
       // Its lease runs out by itself and another worker takes it.
       this.logger.warn({ err: failure, job: job.id }, 'could not put a job back');
@@ -114,11 +115,13 @@ export class JobWorker {
 
   private idle(): Promise<void> {
     return new Promise((resolve) => {
-      const timer = setTimeout(resolve, IDLE_MS);
-      this.wake.push(() => {
+      const wake = () => {
         clearTimeout(timer);
+        this.wake = this.wake.filter((other) => other !== wake);
         resolve();
-      });
+      };
+      const timer = setTimeout(wake, IDLE_MS);
+      this.wake.push(wake);
     });
   }
 }

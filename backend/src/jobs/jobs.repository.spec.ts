@@ -21,7 +21,8 @@ describe('JobsRepository', () => {
   beforeEach(() => server.sql('DELETE FROM job'));
 
   const insert = (key: string, context = outside) => jobs.insert(context, companyId, 'mail', key, MAIL);
-  const claim = () => server.services.transactions.run((context) => jobs.claim(context, 'mail'));
+  const claim = () =>
+    server.services.transactions.run((context) => jobs.claim(context, 'mail'), 'READ COMMITTED');
   const row = async (id: string) =>
     (
       await server.sql<{
@@ -80,12 +81,12 @@ describe('JobsRepository', () => {
       const mine = await jobs.claim(one, 'mail');
       // The first claim is not committed yet: the second must step over its row.
       const started = Date.now();
-      const theirs = await transactions.run((two) => jobs.claim(two, 'mail'));
+      const theirs = await transactions.run((two) => jobs.claim(two, 'mail'), 'READ COMMITTED');
       expect(Date.now() - started).toBeLessThan(2000);
       expect(theirs).not.toBeNull();
       expect(theirs?.id).not.toBe(mine?.id);
       return mine;
-    });
+    }, 'READ COMMITTED');
     expect(first).not.toBeNull();
   });
 

@@ -11,6 +11,23 @@ export interface ClaimedJob {
   readonly attempts: number;
 }
 
+interface JobRow {
+  readonly id: string;
+  readonly company_id: string;
+  readonly kind: JobKind;
+  readonly payload: string;
+  readonly attempts: number;
+}
+
+async function lockFirst(context: Context, kind: JobKind, due: string): Promise<JobRow | undefined> {
+  const rows: JobRow[] = await managerOf(context).query(
+    `SELECT id, company_id, kind, payload, attempts FROM job FORCE INDEX (IX_job_due)
+      WHERE kind = ? AND ${due} ORDER BY run_after LIMIT 1 FOR UPDATE SKIP LOCKED`,
+    [kind],
+  );
+  return rows[0];
+}
+
 export class JobsRepository {
   /** Writes a job in the transaction that causes it. The same key twice is one job. */
   async insert<K extends JobKind>(
@@ -33,18 +50,17 @@ export class JobsRepository {
    * waited for; the claim is committed before the work begins.
    */
   async claim(context: Context, kind: JobKind): Promise<ClaimedJob | null> {
-    const manager = managerOf(context);
-    const rows: { id: string; company_id: string; kind: JobKind; payload: string; attempts: number }[] =
-      await manager.query(
-        `SELECT id, company_id, kind, payload, attempts FROM job
-          WHERE kind = ? AND ((state = 'waiting' AND run_after <= UTC_TIMESTAMP(3))
-             OR (state = 'running' AND lease_until < UTC_TIMESTAMP(3)))
-          ORDER BY run_after LIMIT 1 FOR UPDATE SKIP LOCKED`,
-        [kind],
-      );
-    const row = rows[0];
+    // Two statements: one with OR sorts, and then locks every row that it looked at, not only the one it returns.
+    const row =
+      (await lockFirst(context, kind, "state = 'waiting' AND run_after <= UTC_TIMESTAMP(3)")) ??
+      (await lockFirst(context, kind, "state = 'running' AND lease_until < UTC_TIMESTAMP(3)"));
     if (!row) return null;
-    await manager.query(
+    // A job whose worker dies with it every time must not go on for ever.
+    if (row.attempts >= JOB_RULES[row.kind].maxAttempts) {
+      await managerOf(context).update(JobEntity, { id: row.id }, { state: 'failed', leaseUntil: null });
+      return null;
+    }
+    await managerOf(context).query(
       `UPDATE job SET state = 'running', attempts = attempts + 1,
               lease_until = UTC_TIMESTAMP(3) + INTERVAL ? SECOND WHERE id = ?`,
       [JOB_RULES[row.kind].leaseS, row.id],
@@ -74,23 +90,38 @@ export class JobsRepository {
     );
   }
 
+  /** Puts a job back that was only interrupted by an orderly end: it hasn't used up a try. */
+  async giveBack(context: Context, id: string): Promise<void> {
+    await managerOf(context).query(
+      `UPDATE job SET state = 'waiting', lease_until = NULL, attempts = attempts - 1, run_after = UTC_TIMESTAMP(3)
+        WHERE id = ? AND state = 'running'`,
+      [id],
+    );
+  }
+
   /** Puts a job that failed back for later, or gives it up. */
   async fail(context: Context, id: string, error: string, retryAfterS: number | null): Promise<void> {
     await managerOf(context).query(
       `UPDATE job SET state = ?, lease_until = NULL, last_error = ?,
-              run_after = UTC_TIMESTAMP(3) + INTERVAL ? SECOND WHERE id = ?`,
+              run_after = UTC_TIMESTAMP(3) + INTERVAL ? SECOND WHERE id = ? AND state = 'running'`,
       [retryAfterS === null ? 'failed' : 'waiting', error.slice(0, 1000), retryAfterS ?? 0, id],
     );
   }
 
   /** Newest first. */
-  async list(context: Context, companyId: string, limit: number, before: Date | null): Promise<JobEntity[]> {
+  async list(
+    context: Context,
+    companyId: string,
+    limit: number,
+    before: { createdAt: Date; id: string } | null,
+  ): Promise<JobEntity[]> {
     const query = managerOf(context)
       .createQueryBuilder(JobEntity, 'job')
       .where('job.companyId = :companyId', { companyId })
       .orderBy('job.createdAt', 'DESC')
+      .addOrderBy('job.id', 'DESC')
       .take(limit);
-    if (before) query.andWhere('job.createdAt < :before', { before });
+    if (before) query.andWhere('(job.createdAt, job.id) < (:createdAt, :id)', before);
     return query.getMany();
   }
 

@@ -34,8 +34,10 @@ export class JobsService {
     limit: number,
     after: string | undefined,
   ): Promise<z.infer<typeof jobListSchema>> {
-    const before = after ? new Date(after) : null;
+    const [createdAt, id] = (after ?? '').split('_');
+    const before = createdAt && id ? { createdAt: new Date(createdAt), id } : null;
     const rows = await this.jobs.list(this.transactions.outside, companyId, limit, before);
+    const last = rows.at(-1);
     return {
       items: rows.map((row) => ({
         id: row.id,
@@ -46,7 +48,7 @@ export class JobsService {
         runAfter: row.runAfter.toISOString(),
         lastError: row.lastError,
       })),
-      next: rows.length === limit ? (rows.at(-1)?.createdAt.toISOString() ?? null) : null,
+      next: rows.length === limit ? (last ? `${last.createdAt.toISOString()}_${last.id}` : null) : null,
     };
   }
 }

@@ -33,7 +33,7 @@ export class Mailer {
     const domain = /@([^>\s]+)/.exec(this.config.from)?.[1] ?? 'localhost';
     await this.transporter.sendMail({
       from: this.config.from,
-      to: mail.to,
+      to: { name: '', address: mail.to },
       subject: mail.subject,
       text: mail.text,
       html: mail.html,

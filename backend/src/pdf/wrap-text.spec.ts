@@ -9,6 +9,8 @@ describe('wrapText', () => {
   it('breaks a word that is wider than a line', () =>
     expect(wrap('abcdefgh ij', 3)).toEqual(['abc', 'def', 'gh', 'ij']));
   it('keeps line feeds and empty lines', () => expect(wrap('a\n\nb', 9)).toEqual(['a', '', 'b']));
+  it('keeps a number with its unit', () =>
+    expect(wrap('at most 24 °F, dew', 10)).toEqual(['at most', '24 °F, dew']));
   it('answers one empty line for no text', () => expect(wrap('', 9)).toEqual(['']));
   it('loses no letter of a long text', () => {
     const text = Array.from({ length: 400 }, (_, index) => `w${index}`).join(' ');

@@ -1,5 +1,7 @@
+import { UNITS } from '#shared/units/unit';
+
 /**
- * Breaks text into lines. Line feeds are kept; a word wider than a line is broken inside.
+ * Breaks text into lines. Line feeds are kept; a number is never parted from its unit; a word wider than a line is broken inside.
  *
  * @param text printable text
  * @param width of the line, in the unit of `measure`
@@ -17,7 +19,7 @@ function wrapParagraph(paragraph: string, width: number, measure: (piece: string
   const lines: string[] = [];
   let line = '';
   let used = 0;
-  for (const word of paragraph.split(' ').filter((piece) => piece !== '')) {
+  for (const word of wordsOf(paragraph)) {
     for (const piece of breakWord(word, width, measure)) {
       const size = measure(piece);
       if (line !== '' && used + space + size <= width) {
@@ -32,6 +34,20 @@ function wrapParagraph(paragraph: string, width: number, measure: (piece: string
   }
   lines.push(line);
   return lines;
+}
+
+const SYMBOLS: ReadonlySet<string> = new Set(Object.values(UNITS).map(({ symbol }) => symbol));
+
+/** What stands between spaces, a number and its unit as one. */
+function wordsOf(paragraph: string): string[] {
+  const words: string[] = [];
+  for (const piece of paragraph.split(' ').filter((part) => part !== '')) {
+    const last = words.at(-1);
+    const isUnit = SYMBOLS.has(piece.replace(/[,;.:]$/, ''));
+    if (last !== undefined && isUnit && /\d$/.test(last)) words[words.length - 1] = `${last} ${piece}`;
+    else words.push(piece);
+  }
+  return words;
 }
 
 /** Longer than any word that fits a line: measuring it whole would lay it out for nothing. */

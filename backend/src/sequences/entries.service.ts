@@ -234,8 +234,8 @@ function idOf(body: unknown): string | null {
 /** The server's own judgement; the device's stays in the body as what it was. */
 function judgeContent(body: EntryBody, { steps, facts }: StepList): Judgement | null {
   const { content } = body;
-  if (content.kind === 'notApplicable') return plainJudgement('notApplicable');
-  if (content.kind !== 'answer') return null;
+  if (content.kind !== 'answer' && content.kind !== 'notApplicable') return null;
   const step = steps.find((candidate) => candidate.key === content.stepKey);
-  return step ? judge(step, content.answer, facts) : refusedJudgement('unknownStep');
+  if (!step) return refusedJudgement('unknownStep');
+  return content.kind === 'answer' ? judge(step, content.answer, facts) : plainJudgement('notApplicable');
 }

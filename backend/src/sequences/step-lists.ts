@@ -4,7 +4,8 @@ import type { CompanyId } from '#shared/plant/ids';
 import type { Context } from '../database/transactions';
 import type { SequencesRepository } from './sequences.repository';
 
-const MAX_CACHED = 400;
+/** A few stores' worth; one document takes some 50 kB. */
+const MAX_CACHED = 1000;
 
 /** Expanded step lists, each with the specification it was made from, by hash. What a hash stands for never changes, so every server may keep the ones in use. */
 export class StepLists {
@@ -15,7 +16,12 @@ export class StepLists {
   async find(context: Context, companyId: CompanyId, hash: string): Promise<ExpansionDocument> {
     const key = `${companyId} ${hash}`;
     const cached = this.cache.get(key);
-    if (cached) return cached;
+    if (cached) {
+      // Least recently used goes first: what is in use moves to the end.
+      this.cache.delete(key);
+      this.cache.set(key, cached);
+      return cached;
+    }
     const content = await this.sequences.findStepList(context, companyId, hash);
     if (content === null) throw new Bug(`The step list ${hash} is missing`);
     const document = JSON.parse(content) as ExpansionDocument;

@@ -11,7 +11,7 @@ export const listJobs = (jobs: JobsService) =>
     summary: 'Background work of the company, newest first',
     access: { kind: 'action', action: 'job.read', subject: 'company' },
     query: z.object({
-      after: z.optional(z.iso.datetime()),
+      after: z.optional(z.string().check(z.regex(/^\d{4}-\d\d-\d\dT\d\d:\d\d:\d\d\.\d{3}Z_[0-9a-f-]{36}$/))),
       limit: z.optional(z.coerce.number().check(z.int(), z.gte(1), z.lte(200))),
     }),
     response: jobListSchema,

@@ -15,6 +15,7 @@ import type { PackageCircuitRef } from './package-content';
 import { reviewBlocks } from './review-blocks';
 import { specificationBlocks } from './specification-blocks';
 import { earlierBlocks, stepBlocks } from './step-blocks';
+import { stillOpenBlocks } from './still-open-blocks';
 
 /** The rest of the line is the state's. */
 const CODE_ROOM = TEXT_WIDTH - 150;
@@ -45,6 +46,7 @@ export async function drawCircuit(
   await sheet.place(headBlocks(context, reference, detail, view));
   await sheet.place([...specificationBlocks(context, detail.specification), gap(18)]);
   await drawSteps(circuit, view);
+  await sheet.place(stillOpenBlocks(circuit, view));
   await sheet.place(asideBlocks(circuit, view));
   await sheet.place(reviewBlocks(circuit, view.reviews));
   sheet.closePart();
@@ -118,7 +120,8 @@ async function drawSteps(circuit: CircuitContext, view: SequenceView): Promise<v
       .map((key) => ({ key, title: key })),
   ];
   for (const section of sections) {
-    const steps = numbered.filter(({ step }) => step.step.section === section.key);
+    // A step that nobody answered has nothing to show; one that is required is named once, among those still open.
+    const steps = numbered.filter(({ step }) => step.step.section === section.key && step.current !== null);
     for (const [index, { step, number }] of steps.entries()) {
       const head = index === 0 ? sectionHead(circuit, section.title) : [];
       await sheet.place([...head, ...stepBlocks(circuit, step, number)]);

@@ -4,7 +4,7 @@ import { drawJoint } from '../../pdf/joint';
 import { PAGE, TEXT_WIDTH } from '../../pdf/page-geometry';
 import { baselineOf, paragraph } from '../../pdf/paragraph';
 import { STYLES } from '../../pdf/text-style';
-import { circuitKey, HASHES_KEY, SUMMARY_KEY, type DocumentContext } from './document-context';
+import { chaptersOf, circuitKey, HASHES_KEY, SUMMARY_KEY, type DocumentContext } from './document-context';
 import type { PackageCircuitRef } from './package-content';
 
 const ROW_HEIGHT = 17;
@@ -12,14 +12,14 @@ const CODE_WIDTH = 78;
 
 /** The contents: every chapter with its page, as links. */
 export async function drawContents(context: DocumentContext): Promise<void> {
-  const { sheet, content, words } = context;
+  const { sheet, words } = context;
   sheet.newPage();
   sheet.runningHead = words.contents;
   sheet.openPart('TOC');
   await sheet.place([...paragraph(sheet, words.contents, STYLES.chapter, { tag: 'H1' }), gap(10)]);
   await sheet.place([plainRow(context, SUMMARY_KEY, words.summary)]);
   let system: string | null = null;
-  for (const circuit of content.circuits) {
+  for (const circuit of chaptersOf(context)) {
     const rows: Block[] = [];
     if (circuit.systemName !== system) {
       rows.push(gap(8), ...paragraph(sheet, circuit.systemName, STYLES.label, { keepWithNext: true }));

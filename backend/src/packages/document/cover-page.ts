@@ -1,7 +1,8 @@
 import { gap, type Block } from '../../pdf/block';
 import { COLOURS } from '../../pdf/colours';
 import { factGrid } from '../../pdf/fact-grid';
-import { drawJoint, isReached, type JointState } from '../../pdf/joint';
+import { drawJoint, type JointState } from '../../pdf/joint';
+import { openingLine } from '../../pdf/opening-line';
 import { PAGE, TEXT_WIDTH } from '../../pdf/page-geometry';
 import { baselineOf, paragraph } from '../../pdf/paragraph';
 import { STYLES, type TextStyle } from '../../pdf/text-style';
@@ -35,7 +36,7 @@ export async function drawCover(context: DocumentContext): Promise<void> {
     ...paragraph(sheet, opening.name, STYLES.display, { tag: 'H1' }),
     ...paragraph(sheet, opening.address, STYLES.lead),
     gap(22),
-    openingLine(context),
+    wholeLine(context),
     gap(18),
     ...factGrid(
       sheet,
@@ -50,7 +51,7 @@ export async function drawCover(context: DocumentContext): Promise<void> {
             content.package.createdByName,
           ),
         },
-        { label: words.cover.elevation, value: format.ofDimension(opening.elevationM, 'length') },
+        { label: words.cover.elevation, value: format.wholeLength(opening.elevationM) },
         { label: words.cover.units, value: words.cover.unitSystems[opening.unitSystem] },
       ],
       2,
@@ -91,35 +92,15 @@ export function countApproved(circuits: readonly SummaryCircuit[]): { approved: 
   };
 }
 
-/** The whole opening as one copper line, a joint a system: brazed when all of its circuits are approved. */
-function openingLine(context: DocumentContext): Block {
+/** The whole opening as one copper line: what each system has approved of all that it has. */
+function wholeLine(context: DocumentContext): Block {
   const { content, words } = context;
-  const states = content.summary.systems.map((system) => systemState(system.circuits));
   const { approved, total } = countApproved(circuitsOf(content));
-  return {
-    height: 24,
-    draw: (sheet, top) =>
-      sheet.tagged(
-        'Figure',
-        () => {
-          const y = top + 12;
-          const step = TEXT_WIDTH / Math.max(1, states.length);
-          states.forEach((state, index) => {
-            const from = PAGE.left + index * step;
-            const colour = isReached(state) ? COLOURS.copperLine : COLOURS.faintRule;
-            sheet.line(from, y, from + step, y, colour, 3);
-          });
-          states.forEach((state, index) => drawJoint(sheet, PAGE.left + (index + 0.5) * step, y, 6, state));
-        },
-        words.lineAlt(content.opening.name, approved, total),
-      ),
-  };
-}
-
-function systemState(circuits: readonly SummaryCircuit[]): JointState {
-  if (circuits.length > 0 && circuits.every((circuit) => circuit.state === 'approved')) return 'approved';
-  if (circuits.some((circuit) => circuit.state === 'sentBack')) return 'sentBack';
-  return circuits.some((circuit) => isReached(circuit.state)) ? 'underWay' : 'open';
+  const segments = content.summary.systems.map(({ name, circuits }) => ({
+    name,
+    ...countApproved(circuits),
+  }));
+  return openingLine(segments, words.lineAlt(content.opening.name, approved, total));
 }
 
 function completeness(context: DocumentContext): Block[] {

@@ -4,7 +4,8 @@ import { PAGE } from '../../pdf/page-geometry';
 import type { Sheet } from '../../pdf/sheet';
 import type { DocumentFormat } from './document-format';
 import type { DocumentWords } from './document-words';
-import type { PackageContent } from './package-content';
+import type { Survey } from './circuit-survey';
+import type { PackageCircuitRef, PackageContent } from './package-content';
 
 /** What every part of the document draws with. */
 export interface DocumentContext {
@@ -13,6 +14,7 @@ export interface DocumentContext {
   readonly format: DocumentFormat;
   readonly language: Language;
   readonly content: PackageContent;
+  readonly survey: Survey;
   /** Page of each chapter as the measuring pass found it; empty during that pass. */
   readonly knownPages: ReadonlyMap<string, number>;
   /** Page of each chapter as this pass finds it. */
@@ -25,6 +27,11 @@ export interface DocumentContext {
 export function say(context: DocumentContext, text: Text): string {
   const other = context.language === 'en' ? text.es : text.en;
   return text[context.language].trim() === '' ? other : text[context.language];
+}
+
+/** The circuits that have a chapter, in the order of the chapters. */
+export function chaptersOf(context: DocumentContext): readonly PackageCircuitRef[] {
+  return context.content.circuits.filter(({ sequenceId }) => context.survey.get(sequenceId)?.isBegun);
 }
 
 /** Notes that a chapter begins on this page: for the contents, for links and for the outline. */

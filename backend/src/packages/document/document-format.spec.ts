@@ -9,8 +9,12 @@ const plain = (text: string): string => text.replace(/[\u202f\u00a0]/g, ' ');
 describe('DocumentFormat', () => {
   it('writes a quantity in the units of the opening', () => {
     expect(english.quantity(266.98, 'K')).toBe('20.9 °F');
-    expect(spanish.quantity(266.98, 'K')).toBe('−6,2 °C');
+    expect(spanish.quantity(266.98, 'K')).toBe('−6.2 °C');
     expect(english.quantity(5, 'K_diff')).toBe('9.0 °F');
+  });
+  it('writes an elevation in whole feet or metres', () => {
+    expect(english.wholeLength(1608.98)).toBe('5279 ft');
+    expect(spanish.wholeLength(1608.98)).toBe('1609 m');
   });
   it('writes limits with their unit once, and open ends in words', () => {
     expect(english.range(10 / 3, 50 / 9, 'temperatureDifference')).toBe('6.0 to 10.0 °F');

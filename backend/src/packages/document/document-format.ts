@@ -35,6 +35,12 @@ export class DocumentFormat {
     return formatQuantity(siValue, displayUnit(dimension, this.unitSystem), this.language);
   }
 
+  /** A length in whole feet or metres: an elevation isn't known any closer. */
+  wholeLength(metres: number): string {
+    const unit = displayUnit('length', this.unitSystem);
+    return `${formatNumber(fromSi(metres, unit), 0, this.language)} ${UNITS[unit].symbol}`;
+  }
+
   /** A number exactly as somebody typed it. */
   typed(value: TypedValue): string {
     return `${value.text} ${UNITS[value.unit].symbol}`.trim();

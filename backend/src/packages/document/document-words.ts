@@ -58,6 +58,7 @@ export interface DocumentWords {
     | 'superheat'
     | 'coils'
     | 'valve'
+    | 'steps'
     | 'approvedHead'
   >;
   readonly lineAlt: Said<[name: string, approved: number, total: number]>;
@@ -97,8 +98,10 @@ export interface DocumentWords {
   readonly outcomes: Named<MarkKind>;
   readonly sides: Named<'low' | 'high'>;
   readonly confirmed: string;
-  readonly notRecorded: string;
-  readonly notRequired: string;
+  /** Over the required steps of a chapter that nobody answered yet. */
+  readonly stillOpen: string;
+  readonly notBegun: string;
+  readonly notBegunNote: string;
   readonly doesNotCount: string;
   readonly askedAgain: string;
   readonly reopened: Said<[who: string]>;

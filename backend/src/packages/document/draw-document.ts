@@ -2,7 +2,7 @@ import { beginCircuitPage, drawCircuit } from './circuit-chapter';
 import type { CircuitSource } from './circuit-source';
 import { drawContents } from './contents-pages';
 import { drawCover } from './cover-page';
-import type { DocumentContext } from './document-context';
+import { chaptersOf, type DocumentContext } from './document-context';
 import { drawHashes, type CircuitHash } from './hash-page';
 import { drawSummary } from './summary-pages';
 import { sourcesOf } from './superheat-blocks';
@@ -10,14 +10,14 @@ import { sourcesOf } from './superheat-blocks';
 /**
  * Draws the whole document, one circuit in memory at a time: the same for measuring and for writing.
  *
- * @param onCircuit called with the number of circuits drawn
+ * @param onCircuit called with the number of chapters drawn
  */
 export async function drawDocument(
   context: DocumentContext,
   source: Pick<CircuitSource, 'load'>,
   onCircuit: (drawn: number) => void,
 ): Promise<void> {
-  const { content, sheet } = context;
+  const { sheet } = context;
   await drawCover(context);
   await drawContents(context);
   await drawSummary(context);
@@ -25,7 +25,7 @@ export async function drawDocument(
   const sources = new Set<string>();
   let systemName: string | null = null;
   let outline = sheet.doc.outline;
-  for (const [index, circuit] of content.circuits.entries()) {
+  for (const [index, circuit] of chaptersOf(context).entries()) {
     const detail = await source.load(circuit.sequenceId);
     beginCircuitPage(sheet);
     // After the page began: the outline's entry of a system leads to its first circuit.

@@ -3,7 +3,7 @@ import type { Joint } from '#shared/contracts/openings';
 import type { SequenceDetail } from '#shared/contracts/sequences';
 import type { PackageId, SequenceId } from '#shared/plant/ids';
 
-/** A circuit that has a sequence, and with it a chapter of its own. */
+/** A circuit that has a sequence; it gets a chapter of its own once anything was recorded on it. */
 export interface PackageCircuitRef {
   readonly sequenceId: SequenceId;
   readonly code: string;
@@ -53,7 +53,7 @@ export interface PackageContent {
   readonly summary: { readonly systems: readonly SummarySystem[] };
   /** In the order of the chapters. */
   readonly circuits: readonly PackageCircuitRef[];
-  /** Called once in each of the two passes. */
+  /** Called once for each circuit to survey it, then once in each of the two passes for one that gets a chapter. */
   loadCircuit(sequenceId: SequenceId): Promise<SequenceDetail>;
   /** A JPEG of at most 1200 px; `null` when it isn't there or is broken, which the document says in its place. */
   loadPhoto(sequenceId: SequenceId, sha256: string): Promise<Buffer | null>;

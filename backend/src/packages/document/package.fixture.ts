@@ -78,12 +78,19 @@ export class CircuitBuilder {
       supersedes: earlier.at(-1)?.body.id ?? null,
       content,
     } as unknown as EntryBody;
+    const before = {
+      position,
+      standing: options.standing ?? ('inOrder' as const),
+      judgement: options.judgement ?? null,
+    };
+    const unsent = { body, server: before, hash: null };
     const server = {
       position,
       standing: options.standing ?? ('inOrder' as const),
       receivedAt: position % 5 === 0 ? new Date(Date.parse(time) + 5_400_000).toISOString() : time,
       judgement: options.judgement ?? null,
       judgingVersion: 1,
+      stateAfter: foldEntries([...this.entries, unsent], this.steps.steps).state,
     };
     const previousHash = this.entries.at(-1)?.hash ?? CHAIN_START;
     const hash = chainHash(previousHash, bodyHash(body), server);

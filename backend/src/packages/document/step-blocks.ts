@@ -12,6 +12,7 @@ import { answerBlocks } from './answer-blocks';
 import { summarizeEntry } from './answer-summary';
 import { say } from './document-context';
 import { authorOf, judgedOf, whoAndWhen, type CircuitContext } from './judged-entry';
+import { sourceInWords } from './source-words';
 
 const OUTCOME_ROOM = 150;
 
@@ -19,8 +20,7 @@ const OUTCOME_ROOM = 150;
 const KEPT_WHOLE = 170;
 
 interface Standing {
-  /** `null`: nothing was asked for and nothing is there. */
-  readonly mark: MarkKind | null;
+  readonly mark: MarkKind;
   readonly side: 'low' | 'high' | null;
   readonly word: string;
 }
@@ -36,12 +36,11 @@ export function stepBlocks(circuit: CircuitContext, view: StepView, number: numb
       tag: 'H4',
       width: TEXT_WIDTH - OUTCOME_ROOM,
       ornament: (page, baseline) => {
-        if (standing.mark === null) return;
         drawOutcomeMark(page, PAGE.markX, baseline - STYLES.step.size * 0.33, standing.mark, standing.side);
       },
       aside: {
         text: standing.word,
-        style: { ...STYLES.strong, colour: MARK_COLOURS[standing.mark ?? 'notApplicable'] },
+        style: { ...STYLES.strong, colour: MARK_COLOURS[standing.mark] },
       },
     }),
     ...placeAndInstruction(circuit, step),
@@ -64,11 +63,9 @@ export function stepBlocks(circuit: CircuitContext, view: StepView, number: numb
 
 function standingOf(circuit: CircuitContext, view: StepView): Standing {
   const { words } = circuit.context;
-  const { fold, current, step } = view;
+  const { fold, current } = view;
   const waiting = (word: string): Standing => ({ mark: 'waiting', side: null, word });
-  if (!fold || !current) {
-    return step.required ? waiting(words.notRecorded) : { mark: null, side: null, word: words.notRequired };
-  }
+  if (!fold || !current) return waiting(words.outcomes.waiting);
   if (fold.reopenedBy !== null) return waiting(words.askedAgain);
   if (fold.overrideStanding) return waiting(words.override.standing);
   if (!isDone(fold)) return waiting(words.doesNotCount);
@@ -99,7 +96,9 @@ function notices(circuit: CircuitContext, view: StepView, current: FoldEntry): B
   const source = judged?.limit?.source ?? '';
   return [
     ...cautions.flatMap((caution) => cautionBlocks(circuit, caution)),
-    ...(source === '' ? [] : paragraph(sheet, words.criterion(source), STYLES.small)),
+    ...(source === ''
+      ? []
+      : paragraph(sheet, words.criterion(sourceInWords(source, circuit.context.language)), STYLES.small)),
   ];
 }
 

@@ -6,7 +6,7 @@ import { ruledTable } from '../../pdf/ruled-table';
 import { STYLES } from '../../pdf/text-style';
 import { countApproved } from './cover-page';
 import { beginChapter, SUMMARY_KEY, type DocumentContext } from './document-context';
-import type { SummarySystem } from './package-content';
+import type { SummaryCircuit, SummarySystem } from './package-content';
 
 const ORDER = [
   'approved',
@@ -39,21 +39,9 @@ function systemBlocks(context: DocumentContext, system: SummarySystem): Block[] 
     state,
     count: system.circuits.filter((circuit) => circuit.state === state).length,
   })).filter(({ count }) => count > 0);
-  const columns = [
-    { title: words.columns.circuit, share: 16, style: STYLES.mono },
-    { title: words.columns.description, share: 40 },
-    { title: words.columns.area, share: 22 },
-    { title: words.columns.state, share: 26 },
-  ];
-  const rows = system.circuits.map((circuit) => [
-    { text: circuit.code },
-    { text: circuit.description },
-    { text: circuit.area },
-    {
-      text: words.states[circuit.state],
-      mark: (page: typeof sheet, x: number, y: number) => drawJoint(page, x, y, 3.2, circuit.state),
-    },
-  ]);
+  const stepCounts = notBegunIn(context, system);
+  const begun = system.circuits.filter((circuit) => !stepCounts.has(circuit));
+  const notBegun = system.circuits.filter((circuit) => stepCounts.has(circuit));
   const line = copperLine(system.circuits, words.lineAlt(system.name, approved, total));
   return [
     gap(14),
@@ -74,7 +62,60 @@ function systemBlocks(context: DocumentContext, system: SummarySystem): Block[] 
     ),
     ...line,
     gap(6),
-    ...(rows.length > 0 ? ruledTable(sheet, columns, rows, { hasRowHeads: true }) : []),
+    ...circuitTable(context, begun),
+    ...(notBegun.length > 0
+      ? [
+          gap(12),
+          ...paragraph(sheet, words.notBegun, STYLES.step, { tag: 'H3' }),
+          ...paragraph(sheet, words.notBegunNote, STYLES.small, { keepWithNext: true }),
+          { ...gap(4), keepWithNext: true },
+          ...circuitTable(context, notBegun, stepCounts),
+        ]
+      : []),
     gap(10),
   ];
+}
+
+/** The circuits of a system that have a checklist and nothing on it, each with the number of its steps. */
+function notBegunIn(context: DocumentContext, system: SummarySystem): ReadonlyMap<SummaryCircuit, number> {
+  const { content, survey } = context;
+  const found = new Map<SummaryCircuit, number>();
+  for (const circuit of system.circuits) {
+    const reference = content.circuits.find(
+      ({ systemName, code }) => systemName === system.name && code === circuit.code,
+    );
+    const surveyed = reference && survey.get(reference.sequenceId);
+    if (surveyed && !surveyed.isBegun) found.set(circuit, surveyed.stepCount);
+  }
+  return found;
+}
+
+/** One line a circuit; with the number of steps where that is all there is to say of its work. */
+function circuitTable(
+  context: DocumentContext,
+  circuits: readonly SummaryCircuit[],
+  stepCounts: ReadonlyMap<SummaryCircuit, number> | null = null,
+): Block[] {
+  const { sheet, words } = context;
+  if (circuits.length === 0) return [];
+  const columns = [
+    { title: words.columns.circuit, share: 16, style: STYLES.mono },
+    { title: words.columns.description, share: 40 },
+    { title: words.columns.area, share: 22 },
+    { title: words.columns.state, share: 26 },
+    ...(stepCounts
+      ? [{ title: words.columns.steps, share: 10, style: STYLES.mono, align: 'right' as const }]
+      : []),
+  ];
+  const rows = circuits.map((circuit) => [
+    { text: circuit.code },
+    { text: circuit.description },
+    { text: circuit.area },
+    {
+      text: words.states[circuit.state],
+      mark: (page: typeof sheet, x: number, y: number) => drawJoint(page, x, y, 3.2, circuit.state),
+    },
+    ...(stepCounts ? [{ text: String(stepCounts.get(circuit) ?? '') }] : []),
+  ]);
+  return ruledTable(sheet, columns, rows, { hasRowHeads: true, padding: 2.5 });
 }

@@ -29,11 +29,12 @@ export function superheatBlocks(circuit: CircuitContext, entry: FoldEntry): Bloc
   const judged = judgedOf(entry);
   if (!judged) return [];
   const { answer } = content;
-  return [
+  // A result and how it was worked out are read together: they never stand on two pages.
+  return kept([
     ...resultBlocks(circuit, answer, judged),
     gap(3),
     ...workingBlocks(circuit.context, columnsOf(circuit.context, answer, judged.working)),
-  ];
+  ]);
 }
 
 function resultBlocks(circuit: CircuitContext, answer: SuperheatAnswer, judged: Judgement): Block[] {

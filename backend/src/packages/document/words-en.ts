@@ -23,13 +23,13 @@ export const ENGLISH: DocumentWords = {
     complete:
       'Every circuit of this opening has been commissioned, reviewed and approved by a second person.',
     incomplete:
-      'This package is not complete. The circuits listed here are not approved; what was recorded on them so far is in their chapters and may change.',
+      'This package is not complete. The circuits listed here are not approved; what was recorded on them so far is in their chapters and may change. Those not begun have no chapter.',
     noCircuits: 'This opening has no circuits yet.',
     standsAbove:
       'Local codes and the judgement of licensed practice stand above this document. It records what was done and measured; it is not a permit, an inspection by an authority or a warranty.',
   },
   states: {
-    open: 'Open',
+    open: 'Not begun',
     underWay: 'Under way',
     submitted: 'Submitted',
     sentBack: 'Sent back',
@@ -48,6 +48,7 @@ export const ENGLISH: DocumentWords = {
     superheat: 'Superheat',
     coils: 'Coils',
     valve: 'Valve',
+    steps: 'Steps',
     approvedHead: 'Hash of the approved record',
   },
   lineAlt: (name, approved, total) => `Copper line of ${name}: ${approved} of ${total} circuits approved`,
@@ -98,8 +99,9 @@ export const ENGLISH: DocumentWords = {
   },
   sides: { low: 'Below limits', high: 'Above limits' },
   confirmed: 'Confirmed',
-  notRecorded: 'Nothing recorded',
-  notRequired: 'Not required; nothing recorded',
+  stillOpen: 'Still open',
+  notBegun: 'Not begun',
+  notBegunNote: 'Nothing was recorded on these circuits; they have no chapter.',
   doesNotCount: 'Recorded, does not count yet',
   askedAgain: 'Asked again',
   reopened: (who) => `Asked again by ${who}:`,

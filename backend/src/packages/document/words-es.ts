@@ -23,15 +23,15 @@ export const SPANISH: DocumentWords = {
     complete:
       'Todos los circuitos de esta apertura fueron puestos en marcha, revisados y aprobados por una segunda persona.',
     incomplete:
-      'Este paquete no está completo. Los circuitos que siguen no están aprobados; lo registrado en ellos hasta ahora está en sus capítulos y puede cambiar.',
+      'Este paquete no está completo. Los circuitos que siguen no están aprobados; lo registrado en ellos hasta ahora está en sus capítulos y puede cambiar. Los que están sin empezar no tienen capítulo.',
     noCircuits: 'Esta apertura todavía no tiene circuitos.',
     standsAbove:
       'Los códigos locales y el criterio de profesionales con licencia están por encima de este documento. Registra lo que se hizo y se midió; no es un permiso, una inspección de la autoridad ni una garantía.',
   },
   states: {
-    open: 'Abierto',
+    open: 'Sin empezar',
     underWay: 'En curso',
-    submitted: 'Enviado a revisión',
+    submitted: 'Entregado',
     sentBack: 'Devuelto',
     approved: 'Aprobado',
     noSequence: 'Sin lista',
@@ -45,9 +45,10 @@ export const SPANISH: DocumentWords = {
     fixture: 'Equipo',
     evaporating: 'Evaporación',
     dischargeAir: 'Aire de descarga',
-    superheat: 'Recalentamiento',
+    superheat: 'Sobrecalentamiento',
     coils: 'Serpentines',
     valve: 'Válvula',
+    steps: 'Pasos',
     approvedHead: 'Hash del registro aprobado',
   },
   lineAlt: (name, approved, total) =>
@@ -69,7 +70,7 @@ export const SPANISH: DocumentWords = {
     termination: 'Fin de deshielo',
     drip: 'Goteo',
     checklist: 'Lista',
-    revision: 'Revisión del cuadro',
+    revision: 'Revisión de la cédula',
     steps: 'Pasos hechos',
     outside: 'Fuera de límites',
   },
@@ -99,8 +100,9 @@ export const SPANISH: DocumentWords = {
   },
   sides: { low: 'Por debajo de límites', high: 'Por encima de límites' },
   confirmed: 'Confirmado',
-  notRecorded: 'Nada registrado',
-  notRequired: 'No obligatorio; nada registrado',
+  stillOpen: 'Pendiente todavía',
+  notBegun: 'Sin empezar',
+  notBegunNote: 'Nadie ha registrado nada en estos circuitos; no tienen capítulo.',
   doesNotCount: 'Registrado, aún no cuenta',
   askedAgain: 'Se pide de nuevo',
   reopened: (who) => `Pedido de nuevo por ${who}:`,
@@ -136,7 +138,7 @@ export const SPANISH: DocumentWords = {
   },
   formulas: {
     superheatFromDew:
-      'recalentamiento = temperatura de la línea − temperatura de rocío a la presión absoluta de succión; presión absoluta = presión manométrica + atmósfera local',
+      'sobrecalentamiento = temperatura de la línea − temperatura de rocío a la presión absoluta de succión; presión absoluta = presión manométrica + atmósfera local',
     subcoolingFromBubble:
       'subenfriamiento = temperatura de burbuja a la presión absoluta del líquido − temperatura de la línea; presión absoluta = presión manométrica + atmósfera local',
   },
@@ -149,7 +151,7 @@ export const SPANISH: DocumentWords = {
     dewTemperature: 'Temperatura de rocío',
     glide: 'Deslizamiento',
     lineTemperature: 'Temperatura de la línea',
-    superheat: 'Recalentamiento',
+    superheat: 'Sobrecalentamiento',
     subcooling: 'Subenfriamiento',
   },
   doubts: {
@@ -167,13 +169,13 @@ export const SPANISH: DocumentWords = {
     swapped: 'Revisar: presión y temperatura pueden estar intercambiadas.',
     celsiusInFahrenheit: 'Revisar: un valor en °C pudo ingresarse como °F.',
     fahrenheitInCelsius: 'Revisar: un valor en °F pudo ingresarse como °C.',
-    liquidRisk: 'Puede salir líquido del serpentín: el recalentamiento toca la saturación.',
+    liquidRisk: 'Puede salir líquido del serpentín: el sobrecalentamiento toca la saturación.',
     unknownOption: 'La opción no es parte de este paso.',
     tooFewPhotos: 'Menos fotos de las que pide este paso.',
     wrongAnswerKind: 'El registro es de otro tipo que este paso.',
     unknownRefrigerant: 'No hay tabla de saturación de este refrigerante.',
     notNegatable: 'Esta magnitud no puede ser negativa.',
-    lowAboveHigh: 'El recalentamiento mínimo está por encima del máximo.',
+    lowAboveHigh: 'El sobrecalentamiento mínimo está por encima del máximo.',
     emptySignature: 'No se firmó nada.',
     unknownStep: 'Este paso no era parte de la lista.',
   },
@@ -202,7 +204,7 @@ export const SPANISH: DocumentWords = {
   },
   earlier: 'Antes en este paso',
   noLongerAsked: 'Ya no se pide',
-  noLongerAskedNote: 'El cuadro o la lista cambió después de estos registros. Se conservan como están.',
+  noLongerAskedNote: 'La cédula o la lista cambió después de estos registros. Se conservan como están.',
   late: 'Llegó después de la aprobación',
   lateNote: 'No es parte del registro aprobado: llegó al servidor cuando el circuito ya estaba aprobado.',
   held: 'Retenido para un responsable',
@@ -212,7 +214,7 @@ export const SPANISH: DocumentWords = {
   remarks: 'Observaciones',
   reviewedHead: (hash) => `Registro revisado: ${hash}`,
   noReview: 'Este circuito no ha sido revisado.',
-  submission: 'Enviado a revisión',
+  submission: 'Entregado a revisión',
   hash: {
     intro:
       'Cada registro de un circuito está enlazado con el anterior por un hash SHA-256. El hash de un registro aprobado es el último eslabón que el revisor vio y por el que responde: vale por todos los registros hasta él y por los pasos exactos que se pidieron. Cambiar cualquier cosa registrada antes daría otro hash.',

@@ -67,7 +67,8 @@ async function madeContent(language: 'en' | 'es' = 'en'): Promise<PackageContent
     .answer('fanAmps', { kind: 'reading', value: { text: 'two', unit: 'A' } })
     .answer('signature', { kind: 'signature', signature: { ...SIGNATURE, strokes: [], typed: true } })
     .append({ kind: 'notApplicable', stepKey: 'gone', reason: 'A step of an older checklist' });
-  return packageOf([approved, submitted, open], photos, language);
+  const notBegun = new CircuitBuilder(4, 'C-7', 'Nobody’s yet');
+  return packageOf([approved, submitted, open, notBegun], photos, language);
 }
 
 const pageWith = (text: string): string => pages.find((page) => page.includes(text)) ?? '';
@@ -90,7 +91,7 @@ describe('writePackageDocument', () => {
   it('tells on the cover what is and what is not complete', () => {
     const [cover = ''] = pages;
     expect(cover).toContain('Willow Bend');
-    expect(cover).toContain('1 of 4 circuits approved');
+    expect(cover).toContain('1 of 5 circuits approved');
     expect(cover).toMatch(/Submitted, 1 circuit\nA-14/);
     expect(cover).toMatch(/No checklist, 1 circuit\nA-90/);
     expect(flat(cover)).toContain(
@@ -105,6 +106,31 @@ describe('writePackageDocument', () => {
       expect(chapter).toContain('Specification');
       expect(chapter).toContain(code);
     }
+  });
+
+  it('gives a circuit that nobody recorded on one line in the summary, and no chapter', () => {
+    expect(pages.filter((page) => page.includes('C-7')).map((page) => pages.indexOf(page) + 1)).toEqual([
+      1, 3,
+    ]);
+    expect(pages[2]).toMatch(
+      /Not begun\nNothing was recorded[^\n]*\n[\s\S]*C-7\nNobody’s yet\nDairy wall\nNot begun\n11/,
+    );
+    expect(pages[1]).not.toContain('C-7');
+    expect(dictionariesOf(bytes)).not.toContain('/Title (C-7');
+  });
+
+  it('names required steps that nobody answered once, together, and leaves out those that are optional', () => {
+    const chapter = pageWith('Still open (');
+    expect(flat(chapter)).toContain('2. Drain line');
+    expect(flat(chapter)).toContain('9. Valve, bulb and strap in one picture');
+    expect(chapter).not.toContain('Door heater draws current');
+    expect(pages.join('\n')).not.toContain('Nothing recorded\n');
+  });
+
+  it('never puts a superheat and its working on two pages', () => {
+    const starts = pages.filter((page) => page.includes('7. Superheat of the coil'));
+    expect(starts.length).toBe(3);
+    starts.forEach((page) => expect(page).toContain('Formula: superheat'));
   });
 
   it('prints readings in the units of the opening, as typed, with their limits', () => {
@@ -189,7 +215,9 @@ describe('writePackageDocument', () => {
     const spanish = await write(await madeContent('es'), 'spanish.pdf');
     const text = readPages(spanish.bytes).join('\n');
     expect(text).toContain('Paquete de entrega');
-    expect(text).toContain('27,5 °F');
+    expect(text).toContain('27.5 °F');
+    expect(text).toContain('sobrecalentamiento');
+    expect(text).not.toMatch(/recalentamiento del/);
     expect(text).not.toMatch(/Within limits|Page \d/);
   });
 

@@ -7,6 +7,7 @@ import { PAGE } from '../../pdf/page-geometry';
 import { Sheet } from '../../pdf/sheet';
 import { STYLES } from '../../pdf/text-style';
 import { CircuitSource } from './circuit-source';
+import { surveyCircuits, type Survey } from './circuit-survey';
 import type { DocumentContext } from './document-context';
 import { DocumentFormat } from './document-format';
 import { DOCUMENT_WORDS } from './document-words';
@@ -21,6 +22,13 @@ export interface WriteOptions {
   onProgress(fraction: number): void;
 }
 
+/** What both passes draw from: they have to see the same. */
+interface Drawn {
+  readonly content: PackageContent;
+  readonly source: Pick<CircuitSource, 'load'>;
+  readonly survey: Survey;
+}
+
 interface Measured {
   readonly pages: number;
   readonly chapters: ReadonlyMap<string, number>;
@@ -30,8 +38,9 @@ interface Measured {
 const MEASURING_SHARE = 0.25;
 
 /**
- * Writes a handover package's document and ends the stream. Two passes over the circuits: the first lays everything out to
- * learn on which page each chapter begins and how many pages there are, the second writes. At any time one circuit and the
+ * Writes a handover package's document and ends the stream. Circuits are surveyed first: what nobody recorded on gets no
+ * chapter. Then two passes over those that do: the first lays everything out to learn on which page each chapter begins and
+ * how many pages there are, the second writes. At any time one circuit and the
  * photos of one row are in memory, and drawing waits for the stream's reader.
  *
  * @param out gets the PDF; left open, for its owner to throw away, when this rejects
@@ -47,23 +56,21 @@ export async function writePackageDocument(
   const { signal } = options;
   const source = new CircuitSource(content);
   const load = (id: SequenceId): ReturnType<CircuitSource['load']> => orAborted(source.load(id), signal);
+  const survey = await surveyCircuits(content.circuits, { load });
+  const chapters = [...survey.values()].filter(({ isBegun }) => isBegun).length;
   const share = (from: number, size: number) => (drawn: number) =>
-    options.onProgress(from + (size * drawn) / Math.max(1, content.circuits.length));
-  const measured = await measure(content, { load }, signal, share(0, MEASURING_SHARE));
+    options.onProgress(from + (size * drawn) / Math.max(1, chapters));
+  const drawn: Drawn = { content, source: { load }, survey };
+  const measured = await measure(drawn, signal, share(0, MEASURING_SHARE));
   const doc = newDocument(content, true);
   const stream = new DocumentStream(doc, out, signal);
   try {
-    const written = await draw(
-      doc,
-      content,
-      { load },
-      {
-        measured,
-        settle: () => stream.settle(),
-        loadPhoto: (id, sha256) => orAborted(photoOrNull(content, id, sha256), signal),
-        onCircuit: share(MEASURING_SHARE, 0.99 - MEASURING_SHARE),
-      },
-    );
+    const written = await draw(doc, drawn, {
+      measured,
+      settle: () => stream.settle(),
+      loadPhoto: (id, sha256) => orAborted(photoOrNull(content, id, sha256), signal),
+      onCircuit: share(MEASURING_SHARE, 0.99 - MEASURING_SHARE),
+    });
     if (written.pages !== measured.pages) {
       throw new TemporaryFailure('A circuit changed while the package was being built');
     }
@@ -85,15 +92,14 @@ async function photoOrNull(content: PackageContent, id: SequenceId, sha256: stri
 }
 
 async function measure(
-  content: PackageContent,
-  source: Pick<CircuitSource, 'load'>,
+  drawn: Drawn,
   signal: AbortSignal,
   onCircuit: (drawn: number) => void,
 ): Promise<Measured> {
-  const doc = newDocument(content, false);
+  const doc = newDocument(drawn.content, false);
   // Nobody reads the measuring pass; what it pushes is dropped at once.
   doc.resume();
-  return draw(doc, content, source, {
+  return draw(doc, drawn, {
     measured: null,
     settle: () => orAborted(new Promise<void>((resolve) => setImmediate(resolve)), signal),
     loadPhoto: async () => 'skip',
@@ -103,8 +109,7 @@ async function measure(
 
 async function draw(
   doc: Doc,
-  content: PackageContent,
-  source: Pick<CircuitSource, 'load'>,
+  { content, source, survey }: Drawn,
   pass: {
     readonly measured: Measured | null;
     readonly settle: () => Promise<void>;
@@ -127,6 +132,7 @@ async function draw(
     format: new DocumentFormat(language, unitSystem, timeZone, words),
     language,
     content,
+    survey,
     knownPages: pass.measured?.chapters ?? new Map(),
     foundPages,
     loadPhoto: pass.loadPhoto,

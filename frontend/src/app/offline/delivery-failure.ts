@@ -18,6 +18,11 @@ export function deliveryFailure(error: unknown): DeliveryFailure {
   return REFUSING_STATUS.has(failure.status) ? 'refused' : 'later';
 }
 
+/** Whether the server itself failed (5xx): the network is there, and what was sent may be what it fails on. */
+export function isServerFailure(error: unknown): boolean {
+  return (httpFailure(error)?.status ?? 0) >= 500;
+}
+
 /** The server's sentence about why, for the person who has to deal with it. */
 export function refusalReason(error: unknown): string {
   const failure = httpFailure(error);

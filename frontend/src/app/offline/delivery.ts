@@ -1,14 +1,19 @@
 import { inject, Injectable } from '@angular/core';
-import type { DeviceId, PersonId } from '#shared/plant/ids';
-import { deliveryFailure, refusalReason, type DeliveryFailure } from './delivery-failure';
+import type { PersonId } from '#shared/plant/ids';
+import { deliveryFailure, isServerFailure, refusalReason, type DeliveryFailure } from './delivery-failure';
+import { batchesOf } from './delivery-batches';
 import { EntriesApi } from './entries-api';
 import type { OutboxEntry } from './local-database';
 import { OutboxStorage } from './outbox-storage';
 
-const BATCH = 25;
+/** After so many single entries in a row on which the server failed, it is the server and not the entries. */
+const FAILURES_IN_A_ROW = 3;
 
 /** How a run ended: everything it could do is done, or it stopped for one of the reasons. */
 export type DeliveryEnd = 'done' | Exclude<DeliveryFailure, 'refused'>;
+
+/** How one call ended; `serverFailed` is kept apart from `later`, because one entry alone may be the cause. */
+type SendEnd = DeliveryEnd | 'serverFailed';
 
 /** Carries waiting entries and photos to the server, oldest first. One bad one holds up no other. */
 @Injectable({ providedIn: 'root' })
@@ -16,17 +21,22 @@ export class Delivery {
   private readonly storage = inject(OutboxStorage);
   private readonly api = inject(EntriesApi);
 
-  async run(personId: PersonId, deviceId: DeviceId, progress: () => Promise<void>): Promise<DeliveryEnd> {
-    const entries = (await this.storage.entriesOf(deviceId)).filter((entry) => entry.state === 'waiting');
-    for (let start = 0; start < entries.length; start += BATCH) {
-      const end = await this.sendEntries(entries.slice(start, start + BATCH));
+  async run(personId: PersonId, progress: () => Promise<void>): Promise<DeliveryEnd> {
+    const entries = await this.storage.entriesOf(personId);
+    let failedInARow = 0;
+    let end: DeliveryEnd = 'done';
+    for (const { batch, isSuspect } of batchesOf(entries)) {
+      const sent = await this.sendEntries(batch);
       await progress();
-      if (end !== 'done') return end;
+      failedInARow = sent === 'serverFailed' && isSuspect ? failedInARow + 1 : 0;
+      if (sent === 'serverFailed' && isSuspect && failedInARow < FAILURES_IN_A_ROW) end = 'later';
+      else if (sent !== 'done') return sent === 'serverFailed' ? 'later' : sent;
     }
-    return this.sendPhotos(personId, progress);
+    const photos = await this.sendPhotos(personId, progress);
+    return photos === 'done' ? end : photos;
   }
 
-  private async sendEntries(batch: readonly OutboxEntry[]): Promise<DeliveryEnd> {
+  private async sendEntries(batch: readonly OutboxEntry[]): Promise<SendEnd> {
     try {
       const results = await this.api.send(batch);
       for (const [index, entry] of batch.entries()) {
@@ -38,6 +48,10 @@ export class Delivery {
       }
       return 'done';
     } catch (error) {
+      if (isServerFailure(error)) {
+        await this.storage.noteServerFailure(batch.map((entry) => entry.id));
+        return 'serverFailed';
+      }
       const failure = deliveryFailure(error);
       if (failure !== 'refused') return failure;
       return this.findTheBadOne(batch, error);
@@ -45,7 +59,7 @@ export class Delivery {
   }
 
   /** A whole batch was turned down: each alone, so that only the one at fault is set aside. */
-  private async findTheBadOne(batch: readonly OutboxEntry[], error: unknown): Promise<DeliveryEnd> {
+  private async findTheBadOne(batch: readonly OutboxEntry[], error: unknown): Promise<SendEnd> {
     const [first, ...others] = batch;
     if (!first) return 'done';
     if (others.length === 0) {

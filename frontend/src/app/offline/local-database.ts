@@ -19,6 +19,8 @@ export interface OutboxEntry {
   readonly judgement: Judgement | null;
   readonly state: 'waiting' | 'refused';
   readonly reason: string | null;
+  /** How often the server failed while this entry was with it; absent before the first time. */
+  readonly serverFailures?: number;
 }
 
 /** `draft`: taken, not recorded yet. `waiting`: an entry names it. `sent`: kept a while, so that it shows at once. */

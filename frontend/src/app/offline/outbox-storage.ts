@@ -1,6 +1,6 @@
 import { inject, Injectable } from '@angular/core';
 import type { EntryResult } from '#shared/contracts/sequences';
-import type { DeviceId, EntryId, PersonId, SequenceId } from '#shared/plant/ids';
+import type { EntryId, PersonId, SequenceId } from '#shared/plant/ids';
 import type { FoldEntry } from '#shared/sequences/fold';
 import { appendEntry, type NewEntry } from './append-entry';
 import { LocalDatabase, type LocalPhoto, type LocalPhotoState, type OutboxEntry } from './local-database';
@@ -16,10 +16,13 @@ export class OutboxStorage {
     return appendEntry(await this.local.open(), fresh);
   }
 
-  /** Entries of one device, oldest first, waiting and refused. */
-  async entriesOf(deviceId: DeviceId): Promise<readonly OutboxEntry[]> {
-    const range = IDBKeyRange.bound([deviceId, 0], [deviceId, Number.MAX_SAFE_INTEGER]);
-    return (await this.local.open()).getAllFromIndex('outbox', 'byDeviceCount', range);
+  /**
+   * Entries of one person, waiting and refused: device by device, each oldest first. Also those made under a device that
+   * was replaced since, which would otherwise never leave.
+   */
+  async entriesOf(personId: PersonId): Promise<readonly OutboxEntry[]> {
+    const all = await (await this.local.open()).getAllFromIndex('outbox', 'byDeviceCount');
+    return all.filter((entry) => entry.body.authorId === personId);
   }
 
   /** The server has it: out of the outbox and beside the cached sequence, in one step. */
@@ -39,6 +42,16 @@ export class OutboxStorage {
   /** Kept, with the reason, until a person deals with it. */
   async refuse(id: EntryId, reason: string): Promise<void> {
     await this.change(id, { state: 'refused', reason });
+  }
+
+  /** Counts that the server failed while it had these entries: one of them may be what it fails on. */
+  async noteServerFailure(ids: readonly EntryId[]): Promise<void> {
+    const transaction = (await this.local.open()).transaction('outbox', 'readwrite');
+    for (const id of ids) {
+      const entry = await transaction.store.get(id);
+      if (entry) await transaction.store.put({ ...entry, serverFailures: (entry.serverFailures ?? 0) + 1 });
+    }
+    await transaction.done;
   }
 
   /** Back in the queue, after whatever stood against it was put right. */

@@ -1,9 +1,10 @@
 import { HttpErrorResponse } from '@angular/common/http';
-import { signal } from '@angular/core';
+import { signal, type WritableSignal } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { afterEach, beforeEach, describe, expect, it } from '@jest/globals';
 import type { EntryResult } from '#shared/contracts/sequences';
 import type { Me } from '#shared/contracts/session';
+import type { DeviceId } from '#shared/plant/ids';
 import { bodyHash } from '#shared/sequences/chain';
 import { PhoneDevice } from '../session/phone-device';
 import { Session } from '../session/session';
@@ -17,6 +18,7 @@ import {
   PHONE,
   SEQUENCE,
   storedOf,
+  uuid,
 } from '../work/sequence/sequence.fixture';
 import { EntriesApi } from './entries-api';
 import { newPhone } from './fake-database.fixture';
@@ -31,6 +33,7 @@ const content = (key: string) => contentOf(key, CONFIRMED);
 /** A server that can be out of reach, and keeps what it is given. */
 class FakeServer {
   mode: 'away' | 'here' | 'silent' = 'here';
+  failsOn: string | null = null;
   refuses: string | null = null;
   readonly calls: OutboxEntry[][] = [];
   readonly photos: string[] = [];
@@ -39,6 +42,8 @@ class FakeServer {
   send(entries: readonly OutboxEntry[]): Promise<readonly EntryResult[]> {
     if (this.mode === 'away') return Promise.reject(new HttpErrorResponse({ status: 0 }));
     this.calls.push([...entries]);
+    if (entries.some(({ body: { content } }) => 'stepKey' in content && content.stepKey === this.failsOn))
+      return Promise.reject(new HttpErrorResponse({ status: 500 }));
     const results = entries.map((entry) => this.take(entry));
     // The answer is lost on the way back: the server has the entries, the phone doesn't know.
     return this.mode === 'silent'
@@ -73,6 +78,7 @@ class FakeServer {
 }
 
 let server: FakeServer;
+let device: WritableSignal<DeviceId>;
 let lastCount: number;
 let database: LocalDatabase;
 
@@ -80,11 +86,12 @@ beforeEach(() => {
   newPhone();
   server = new FakeServer();
   lastCount = 0;
+  device = signal(PHONE);
   TestBed.configureTestingModule({
     providers: [
       { provide: EntriesApi, useValue: server },
       { provide: Session, useValue: { me: signal({ id: ME } as Me) } },
-      { provide: PhoneDevice, useValue: { deviceId: signal(PHONE), lastCount: () => lastCount } },
+      { provide: PhoneDevice, useValue: { deviceId: device, lastCount: () => lastCount } },
     ],
   });
   database = TestBed.inject(LocalDatabase);
@@ -185,6 +192,38 @@ describe('Outbox.drain', () => {
     expect(outbox.waitingCount()).toBe(0);
     server.refuses = null;
     await outbox.retry(outbox.refused()[0]!.id);
+    await outbox.drain();
+    expect(outbox.entries()).toEqual([]);
+  });
+
+  it('delivers also what was recorded before this phone became another device', async () => {
+    server.mode = 'away';
+    const outbox = TestBed.inject(Outbox);
+    await outbox.append(SEQUENCE, content('a'), CONTEXT);
+    await outbox.drain();
+    device.set(uuid(77) as DeviceId);
+    server.mode = 'here';
+    await outbox.append(SEQUENCE, content('b'), CONTEXT);
+    // The first call may only join a run that began before the second entry was there.
+    await outbox.drain();
+    await outbox.drain();
+    expect(new Set(server.calls.flat().map((entry) => entry.deviceId)).size).toBe(2);
+    expect(outbox.waitingCount()).toBe(0);
+  });
+
+  it('finds the one entry that the server fails on, delivers the others, and keeps it', async () => {
+    server.mode = 'away';
+    const outbox = TestBed.inject(Outbox);
+    for (const key of ['a', 'b', 'c']) await outbox.append(SEQUENCE, content(key), CONTEXT);
+    await outbox.drain();
+    server.mode = 'here';
+    server.failsOn = 'a';
+    for (let tries = 0; tries < 3; tries += 1) await outbox.drain();
+    expect(outbox.entries().map(({ deviceCount }) => deviceCount)).toEqual([1]);
+    expect(outbox.stuck()).toEqual([]);
+    for (let tries = 0; tries < 2; tries += 1) await outbox.drain();
+    expect(outbox.stuck()).toHaveLength(1);
+    server.failsOn = null;
     await outbox.drain();
     expect(outbox.entries()).toEqual([]);
   });

@@ -9,6 +9,7 @@ import { PhoneDevice } from '../session/phone-device';
 import { Session } from '../session/session';
 import { backOff } from './back-off';
 import { Delivery, type DeliveryEnd } from './delivery';
+import { isStuck } from './delivery-batches';
 import type { LocalPhoto, OutboxEntry } from './local-database';
 import { OutboxStorage } from './outbox-storage';
 
@@ -43,9 +44,11 @@ export class Outbox {
   private timer: ReturnType<typeof setTimeout> | undefined;
   private begun = false;
 
-  /** Entries of the person who is here, oldest first, refused ones among them. */
+  /** Entries of the person who is here, each device's oldest first, refused ones among them. */
   readonly entries = this.entriesHere.asReadonly();
   readonly refused = computed(() => this.entriesHere().filter((entry) => entry.state === 'refused'));
+  /** Still waiting, but the server failed on them again and again: kept, tried on, and people are told. */
+  readonly stuck = computed(() => this.entriesHere().filter(isStuck));
   readonly refusedPhotos = computed(() => this.photosHere().filter((photo) => photo.state === 'refused'));
   readonly waitingCount = computed(
     () =>
@@ -145,10 +148,9 @@ export class Outbox {
 
   private async drainNow(): Promise<void> {
     const author = this.session.me();
-    const deviceId = this.phone.deviceId();
-    if (!author || !deviceId || this.waitingCount() === 0) return;
+    if (!author || this.waitingCount() === 0) return;
     const run = async (): Promise<void> => {
-      const end = await this.delivery.run(author.id, deviceId, () => this.noteProgress());
+      const end = await this.delivery.run(author.id, () => this.noteProgress());
       this.lastEnd.set(end);
       this.failures = end === 'done' ? 0 : this.failures + 1;
     };
@@ -181,8 +183,7 @@ export class Outbox {
 
   private async read(): Promise<void> {
     const me = this.session.me();
-    const deviceId = this.phone.deviceId();
-    this.entriesHere.set(deviceId ? await this.storage.entriesOf(deviceId) : []);
+    this.entriesHere.set(me ? await this.storage.entriesOf(me.id) : []);
     if (!me) return this.photosHere.set([]);
     const [waiting, refused] = await Promise.all([
       this.storage.photos(me.id, 'waiting'),

@@ -1,6 +1,13 @@
 import { DOCUMENT, inject, Injectable } from '@angular/core';
 import { sha256OfBytes } from '#shared/sequences/sha256';
-import { looksLikeImage, MOST_PIXELS, shrunkSize, type PhotoRefusal } from './photo-size';
+import { imageDimensions } from './image-dimensions';
+import {
+  looksLikeImage,
+  MOST_PIXELS,
+  shrunkSize,
+  SURELY_OPENED_PIXELS,
+  type PhotoRefusal,
+} from './photo-size';
 
 const QUALITY = 0.82;
 
@@ -27,13 +34,16 @@ export class PhotoShrinker {
   async shrink(file: File): Promise<ShrinkResult> {
     const original = await file.arrayBuffer();
     if (!looksLikeImage(new Uint8Array(original.slice(0, 16)))) return { ok: false, reason: 'notAnImage' };
+    const said = imageDimensions(original);
+    const pixels = said ? said.width * said.height : 0;
+    if (pixels > MOST_PIXELS) return { ok: false, reason: 'tooManyPixels' };
     let bitmap: ImageBitmap;
     try {
       bitmap = await createImageBitmap(file, { imageOrientation: 'from-image' });
     } catch (error) {
       // InvalidStateError is the browser's "I can't decode this".
       if (!(error instanceof DOMException)) throw error;
-      return { ok: false, reason: 'notAnImage' };
+      return { ok: false, reason: pixels > SURELY_OPENED_PIXELS ? 'tooManyPixels' : 'notAnImage' };
     }
     try {
       if (bitmap.width * bitmap.height > MOST_PIXELS) return { ok: false, reason: 'tooManyPixels' };

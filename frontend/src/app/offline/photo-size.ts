@@ -1,7 +1,9 @@
 /** Longest side of a photo as it is sent, in pixels. */
 export const LONGEST_SIDE_PX = 2048;
 /** More than this is refused: decoding it would end the page on most phones. */
-export const MOST_PIXELS = 40_000_000;
+export const MOST_PIXELS = 100_000_000;
+/** Up to this, a picture that can't be opened is broken; above, it may as well be too large for the phone. */
+export const SURELY_OPENED_PIXELS = 40_000_000;
 
 /** Why a file can't become a photo: keys of the words. */
 export type PhotoRefusal = 'notAnImage' | 'tooManyPixels' | 'couldNotShrink';

@@ -14,6 +14,7 @@ import type { CircuitRow } from '#shared/contracts/openings';
 import { nextJoint } from '../ui/copper-line/next-joint';
 import { OutcomeMark } from '../ui/outcome-mark/outcome-mark';
 import { StateMark } from '../ui/state-mark/state-mark';
+import { Unbroken } from '../ui/words/unbroken';
 
 /**
  * The ruled table of circuits. One Tab stop for all check boxes: arrows, Home and End move, Space selects, with Shift a
@@ -21,7 +22,7 @@ import { StateMark } from '../ui/state-mark/state-mark';
  */
 @Component({
   selector: 'app-circuit-table',
-  imports: [OutcomeMark, RouterLink, StateMark, TranslocoDirective],
+  imports: [OutcomeMark, RouterLink, StateMark, TranslocoDirective, Unbroken],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './circuit-table.html',
   styleUrl: './circuit-table.scss',

@@ -83,6 +83,8 @@ export class CircuitsPage {
     return [...this.selected()].filter((id) => !shown.has(id)).length;
   });
   protected readonly person = signal('');
+  /** What was assigned last, told until something else is selected; `name` is null where it was taken back. */
+  protected readonly assigned = signal<{ count: number; name: string | null } | null>(null);
   protected readonly isSending = signal(false);
   protected readonly problem = signal<unknown>(null);
 
@@ -109,10 +111,12 @@ export class CircuitsPage {
   }
 
   protected toggle(id: string, isRange: boolean): void {
+    this.assigned.set(null);
     this.selection.set(toggle(this.selection(), this.shownIds(), id, isRange));
   }
 
   protected toggleAll(): void {
+    this.assigned.set(null);
     this.selection.set(toggleAll(this.selection(), this.shownIds()));
   }
 
@@ -128,7 +132,10 @@ export class CircuitsPage {
     const personId = this.person() === NOBODY ? null : (this.person() as PersonId);
     try {
       await this.api.assign(this.openingId(), [...this.selected()] as CircuitId[], personId);
+      const name = this.assignable().find(({ id }) => id === personId)?.name ?? null;
+      const count = this.selected().size;
       this.clearSelection();
+      this.assigned.set({ count, name });
       this.list.reload();
     } catch (error) {
       this.problem.set(error);

@@ -1,6 +1,6 @@
 import { describe, expect, it } from '@jest/globals';
 import type { HandoverPackage } from '#shared/contracts/packages';
-import { fileNameOf, grouped, newestFirst, sizeText } from './package-facts';
+import { coverageOf, fileNameOf, grouped, newestFirst, sizeText } from './package-facts';
 
 describe('newestFirst', () => {
   it('orders by version and changes nothing', () => {
@@ -13,7 +13,7 @@ describe('newestFirst', () => {
 describe('sizeText', () => {
   it.each([
     [2_450_000, 'en', '2.5 MB'],
-    [2_450_000, 'es', '2,5 MB'],
+    [2_450_000, 'es', '2.5 MB'],
     [118_300_000, 'en', '118 MB'],
   ] as const)('writes %i in %s as %s', (bytes, language, text) => {
     expect(sizeText(bytes, language)).toBe(text);
@@ -33,5 +33,15 @@ describe('fileNameOf', () => {
     ['***', 'handover-package-v2.pdf'],
   ])('makes a name of %p', (openingName, name) => {
     expect(fileNameOf({ openingName, version: 2 })).toBe(name);
+  });
+});
+
+describe('coverageOf', () => {
+  it('counts every circuit, with or without a checklist', () => {
+    const systems = [
+      { joints: [{ state: 'approved' as const }, { state: 'noSequence' as const }] },
+      { joints: [{ state: 'submitted' as const }] },
+    ];
+    expect(coverageOf(systems)).toEqual({ approved: 1, total: 3 });
   });
 });

@@ -1,8 +1,23 @@
 import { formatNumber } from '#shared/units/format';
+import type { Joint } from '#shared/contracts/openings';
 import type { HandoverPackage } from '#shared/contracts/packages';
 import type { Language } from '#shared/checklist/text';
 
 const MEGABYTE = 1_000_000;
+
+/** How many circuits of all are approved. */
+export interface Coverage {
+  readonly approved: number;
+  readonly total: number;
+}
+
+/** What a package of these systems would cover; a circuit without a checklist counts as one that isn't approved. */
+export function coverageOf(
+  systems: readonly { readonly joints: readonly Pick<Joint, 'state'>[] }[],
+): Coverage {
+  const joints = systems.flatMap((system) => system.joints);
+  return { approved: joints.filter(({ state }) => state === 'approved').length, total: joints.length };
+}
 
 /** Versions, the newest on top. */
 export function newestFirst(packages: readonly HandoverPackage[]): readonly HandoverPackage[] {

@@ -94,6 +94,16 @@ describe('PackagePage', () => {
     expect(root.textContent).toContain('2 circuits were not approved');
   });
 
+  it('says beside the box what the signature accepts', async () => {
+    const partial = await open(pack({ circuitsApproved: 58 }), true);
+    expect(partial.root.querySelector('.covers')?.textContent).toContain(
+      'accepts version 2, in which 2 of 60 circuits are not approved',
+    );
+    TestBed.resetTestingModule();
+    const whole = await open(pack(), true);
+    expect(whole.root.querySelector('.covers')?.textContent).toContain('all 60 circuits are approved');
+  });
+
   it('shows the certificate after the acceptance', async () => {
     const signature = { printedName: 'Dale Whitcomb', width: 1, height: 1, strokes: [], typed: true };
     const acceptance = {

@@ -21,6 +21,7 @@ import { PasswordAgain } from '../session/password-again';
 import { Session } from '../session/session';
 import { LiveEvents } from '../shell/live-events';
 import { DateTimeOf } from '../ui/date-time-of';
+import { ClosedJoint } from '../ui/joint/closed-joint';
 import { LoadingNote } from '../ui/notes/loading-note';
 import { OfflineNote } from '../ui/notes/offline-note';
 import { ProblemNote } from '../ui/notes/problem-note';
@@ -29,6 +30,7 @@ import { withPassword } from '../ui/pages/with-password';
 import { problemCodeOf } from '../ui/problem-of';
 import { SignatureBox } from '../ui/signature/signature-box';
 import { SignatureView } from '../ui/signature/signature-view';
+import { countedKey } from '../ui/words/counted';
 import { readingLanguage } from '../ui/words/reading-language';
 import { fileNameOf, grouped, sizeText } from './package-facts';
 import { PackageState } from './package-state';
@@ -41,6 +43,7 @@ const POLL_MS = 2000;
 @Component({
   selector: 'app-package-page',
   imports: [
+    ClosedJoint,
     DateTimeOf,
     LoadingNote,
     MatButton,
@@ -84,10 +87,12 @@ export class PackagePage {
   protected readonly key = computed(() =>
     this.fingerprint.hasValue() ? grouped(this.fingerprint.value()) : null,
   );
-  protected readonly isPartial = computed(() => {
+  protected readonly missing = computed(() => {
     const pack = this.pack();
-    return pack !== undefined && pack.circuitsApproved < pack.circuitsTotal;
+    return pack ? pack.circuitsTotal - pack.circuitsApproved : 0;
   });
+  protected readonly isPartial = computed(() => this.missing() > 0);
+  protected readonly countedKey = countedKey;
   protected readonly canAccept = computed(() => {
     const pack = this.pack();
     return pack?.state === 'issued' && !pack.acceptance && this.session.may('package.accept', pack.openingId);

@@ -2,6 +2,7 @@ import { HttpClient } from '@angular/common/http';
 import { inject, Injectable } from '@angular/core';
 import type { Signature } from '#shared/checklist/signature';
 import type { Language } from '#shared/checklist/text';
+import { openingDetailSchema } from '#shared/contracts/openings';
 import {
   installationKeySchema,
   packageListSchema,
@@ -10,6 +11,7 @@ import {
 } from '#shared/contracts/packages';
 import type { OpeningId, PackageId } from '#shared/plant/ids';
 import { parsed } from '../ui/pages/parsed';
+import { coverageOf, type Coverage } from './package-facts';
 
 /** Handover packages: issued by a lead, received and accepted by the contractor. */
 @Injectable({ providedIn: 'root' })
@@ -18,6 +20,12 @@ export class PackagesApi {
 
   async packages(openingId: OpeningId): Promise<readonly HandoverPackage[]> {
     return (await parsed(this.http.get(`/api/openings/${openingId}/packages`), packageListSchema)).packages;
+  }
+
+  /** How much a version issued now would cover: circuits approved, of all there are, with or without a checklist. */
+  async coverage(openingId: OpeningId): Promise<Coverage> {
+    const { systems } = await parsed(this.http.get(`/api/openings/${openingId}`), openingDetailSchema);
+    return coverageOf(systems);
   }
 
   package(packageId: PackageId): Promise<HandoverPackage> {

@@ -1,9 +1,12 @@
 import {
+  afterNextRender,
   ChangeDetectionStrategy,
   Component,
   computed,
+  DOCUMENT,
   effect,
   inject,
+  Injector,
   input,
   resource,
   signal,
@@ -23,6 +26,7 @@ import { LoadingNote } from '../ui/notes/loading-note';
 import { OfflineNote } from '../ui/notes/offline-note';
 import { ProblemNote } from '../ui/notes/problem-note';
 import { lastRead } from '../ui/pages/last-read';
+import { countedKey } from '../ui/words/counted';
 import { readingLanguage } from '../ui/words/reading-language';
 import { newestFirst, sizeText } from './package-facts';
 import { PackageState } from './package-state';
@@ -54,6 +58,8 @@ export class PackagesPage {
   private readonly api = inject(PackagesApi);
   private readonly session = inject(Session);
   private readonly reading = readingLanguage();
+  private readonly document = inject(DOCUMENT);
+  private readonly injector = inject(Injector);
   protected readonly online = inject(Connectivity).online;
 
   protected readonly languages = LANGUAGES;
@@ -71,6 +77,13 @@ export class PackagesPage {
   protected readonly isBuilding = computed(() => this.rows().some(({ pack }) => pack.state === 'building'));
   protected readonly mayIssue = computed(() => this.session.may('package.issue', this.openingId()));
   protected readonly language = signal<Language>(this.reading());
+  /** The language of the version that the reader is asked to confirm; `null` while nothing is asked. */
+  protected readonly asked = signal<Language | null>(null);
+  protected readonly coverage = resource({
+    params: () => (this.asked() === null ? undefined : this.openingId()),
+    loader: ({ params }) => this.api.coverage(params),
+  });
+  protected readonly countedKey = countedKey;
   protected readonly isSending = signal(false);
   protected readonly problem = signal<unknown>(null);
 
@@ -91,17 +104,24 @@ export class PackagesPage {
     });
   }
 
-  protected issue(): Promise<void> {
-    return this.change(() => this.api.issue(this.openingId(), this.language()));
+  /** Asks first, with what the version will say: it can't be taken back. */
+  protected ask(language: Language): void {
+    this.asked.set(language);
+    afterNextRender(() => this.document.getElementById('confirm-title')?.focus(), {
+      injector: this.injector,
+    });
+  }
+
+  /** Issues in the language asked for: a new version, or again what failed or was cancelled. */
+  protected async issue(): Promise<void> {
+    const language = this.asked();
+    if (language === null) return;
+    await this.change(() => this.api.issue(this.openingId(), language));
+    this.asked.set(null);
   }
 
   protected cancel(packageId: PackageId): Promise<void> {
     return this.change(() => this.api.cancel(packageId));
-  }
-
-  /** Builds again what failed or was cancelled, as a new version in the same language. */
-  protected again(language: Language): Promise<void> {
-    return this.change(() => this.api.issue(this.openingId(), language));
   }
 
   protected chooseLanguage(value: string): void {

@@ -1,16 +1,30 @@
-import type { PhotoStatus } from './photo-states';
-import { photosNotWell } from './photo-states';
 import type { SequenceView, StepView } from '#shared/sequences/sequence-view';
+import {
+  hasNote,
+  isCorrected,
+  isHunting,
+  isRecordedAgain,
+  lacksAsFound,
+  photosUsedTwice,
+  stepsWithLate,
+} from './attention-facts';
+import { photosNotWell, photosOf, type PhotoStatus } from './photo-states';
 
 /** Why a step needs a lead's eyes before the others; in the order in which they are looked at. */
 export const REASONS = [
   'outside',
   'liquidRisk',
+  'recordedAgain',
+  'doubt',
   'answeredTwice',
   'photoBroken',
   'photoAwaited',
+  'photoTwice',
+  'hunting',
+  'noAsFound',
   'notApplicable',
-  'doubt',
+  'late',
+  'note',
   'corrected',
 ] as const;
 export type Reason = (typeof REASONS)[number];
@@ -28,12 +42,31 @@ export interface ReviewOrder {
   readonly rest: readonly ReviewStep[];
 }
 
+/** What a step is looked at against: facts of the whole sequence. */
+export interface Surroundings {
+  readonly photos: readonly PhotoStatus[];
+  /** Position of the review that sent it back; 0 in a first round. */
+  readonly sentBackAt: number;
+  readonly usedTwice: ReadonlySet<string>;
+  readonly withLate: ReadonlySet<string>;
+}
+
 /** Every step once: those that need eyes first, the gravest on top; then the rest in working order. */
-export function orderForReview(view: SequenceView, photos: readonly PhotoStatus[]): ReviewOrder {
+export function orderForReview(
+  view: Pick<SequenceView, 'steps' | 'late'>,
+  photos: readonly PhotoStatus[],
+  sentBackAt: number,
+): ReviewOrder {
+  const around: Surroundings = {
+    photos,
+    sentBackAt,
+    usedTwice: photosUsedTwice(view.steps),
+    withLate: stepsWithLate(view.late),
+  };
   const steps = view.steps.map((step, index): ReviewStep => ({
     view: step,
     number: index + 1,
-    reasons: reasonsOf(step, photos),
+    reasons: reasonsOf(step, around),
   }));
   const gravest = ({ reasons }: ReviewStep): number =>
     reasons[0] ? REASONS.indexOf(reasons[0]) : REASONS.length;
@@ -45,24 +78,33 @@ export function orderForReview(view: SequenceView, photos: readonly PhotoStatus[
   };
 }
 
-/** Why this step needs eyes; empty for one that was answered once and lies within. */
-export function reasonsOf(step: StepView, photos: readonly PhotoStatus[]): readonly Reason[] {
-  const doubts = step.current?.server.judgement?.doubts ?? [];
-  const notWell = photosNotWell(step.current, photos);
+/** Why this step needs eyes; empty for one that was answered once, plainly, and lies within. */
+export function reasonsOf(step: StepView, around: Surroundings): readonly Reason[] {
+  const { current, fold } = step;
+  const doubts = current?.server.judgement?.doubts ?? [];
+  const notWell = photosNotWell(current, around.photos);
+  const isAgain = isRecordedAgain(step, around.sentBackAt);
   const holds: Readonly<Record<Reason, boolean>> = {
-    outside: step.fold?.outcome === 'outside',
+    outside: fold?.outcome === 'outside',
     liquidRisk: doubts.some(({ kind }) => kind === 'liquidRisk'),
-    answeredTwice: step.fold?.answeredTwice ?? false,
+    recordedAgain: isAgain,
+    doubt: doubts.some(({ kind }) => kind !== 'liquidRisk'),
+    answeredTwice: fold?.answeredTwice ?? false,
     photoBroken: notWell.some(({ state }) => state === 'broken'),
     photoAwaited: notWell.some(({ state }) => state === 'awaited'),
-    notApplicable: step.fold?.outcome === 'notApplicable',
-    doubt: doubts.some(({ kind }) => kind !== 'liquidRisk'),
-    corrected: isCorrected(step),
+    photoTwice: photosOf(current).some((hash) => around.usedTwice.has(hash)),
+    hunting: isHunting(current),
+    noAsFound: lacksAsFound(current),
+    notApplicable: fold?.outcome === 'notApplicable',
+    late: around.withLate.has(step.step.key),
+    note: hasNote(current),
+    // Said once: what was recorded again since it was sent back has been corrected, too.
+    corrected: !isAgain && isCorrected(step),
   };
   return REASONS.filter((reason) => holds[reason]);
 }
 
-/** Whether an answer was given again. Putting an override back is the second half of the work, not a correction. */
-function isCorrected({ step, history }: StepView): boolean {
-  return history.length > (step.kind === 'override' ? 2 : 1);
+/** The reasons that an answer's own outcome mark doesn't say already. */
+export function reasonsBesideOutcome(reasons: readonly Reason[]): readonly Reason[] {
+  return reasons.filter((reason) => reason !== 'outside' && reason !== 'notApplicable');
 }

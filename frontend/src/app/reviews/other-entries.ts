@@ -4,15 +4,17 @@ import type { SequenceDetail } from '#shared/contracts/sequences';
 import type { FoldEntry } from '#shared/sequences/fold';
 import type { SequenceView } from '#shared/sequences/sequence-view';
 import { DateTimeOf } from '../ui/date-time-of';
+import { ClosedJoint } from '../ui/joint/closed-joint';
 import { OutcomeMark } from '../ui/outcome-mark/outcome-mark';
 import { SignatureView } from '../ui/signature/signature-view';
 import { TextOf } from '../ui/text-of';
+import { countedKey } from '../ui/words/counted';
 import { EntryLine } from './entry-line';
 
 /** What stands beside the steps: reviews given, entries that came late or are held, and those no longer asked for. */
 @Component({
   selector: 'app-other-entries',
-  imports: [DateTimeOf, EntryLine, OutcomeMark, SignatureView, TextOf, TranslocoDirective],
+  imports: [ClosedJoint, DateTimeOf, EntryLine, OutcomeMark, SignatureView, TextOf, TranslocoDirective],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './other-entries.html',
   styleUrl: './other-entries.scss',
@@ -21,6 +23,7 @@ export class OtherEntries {
   readonly sequence = input.required<SequenceDetail>();
   readonly view = input.required<SequenceView>();
 
+  protected readonly countedKey = countedKey;
   protected readonly groups = computed(() =>
     [
       { name: 'late', entries: this.view().late },

@@ -19,6 +19,7 @@ describe('reviewAction', () => {
     ['a', 'approve'],
     ['s', 'sendBack'],
     ['?', 'help'],
+    ['n', 'queueNext'],
     ['x', null],
   ])('takes %s for %s', (key, action) => {
     expect(reviewAction(press(key))).toBe(action);
@@ -26,6 +27,17 @@ describe('reviewAction', () => {
 
   it('leaves letters alone while somebody writes a remark', () => {
     expect(reviewAction(press('a', { target: document.createElement('textarea') }))).toBeNull();
+  });
+
+  it.each(['summary', 'button', 'a', 'canvas'])('works while a %s has the focus', (tag) => {
+    expect(reviewAction(press('a', { target: document.createElement(tag) }))).toBe('approve');
+  });
+
+  it('tells a check box from a text box', () => {
+    const box = document.createElement('input');
+    expect(reviewAction(press('a', { target: box }))).toBeNull();
+    box.type = 'checkbox';
+    expect(reviewAction(press('a', { target: box }))).toBe('approve');
   });
 
   it('leaves the browser its shortcuts', () => {

@@ -1,5 +1,6 @@
 /** What a key does on the review page. */
-export type ReviewAction = 'next' | 'previous' | 'remark' | 'photo' | 'approve' | 'sendBack' | 'help';
+export type ReviewAction =
+  'next' | 'previous' | 'remark' | 'photo' | 'approve' | 'sendBack' | 'queueNext' | 'help';
 
 /** All keys with what they do, in the order in which the help names them. */
 export const REVIEW_KEYS: readonly { readonly keys: readonly string[]; readonly action: ReviewAction }[] = [
@@ -9,6 +10,7 @@ export const REVIEW_KEYS: readonly { readonly keys: readonly string[]; readonly 
   { keys: ['f'], action: 'photo' },
   { keys: ['a'], action: 'approve' },
   { keys: ['s'], action: 'sendBack' },
+  { keys: ['n'], action: 'queueNext' },
   { keys: ['?'], action: 'help' },
 ];
 
@@ -20,10 +22,13 @@ export function reviewAction(event: Pressed): ReviewAction | null {
   return REVIEW_KEYS.find(({ keys }) => keys.includes(event.key))?.action ?? null;
 }
 
+/** Where letters are text, or choose an option; buttons, check boxes, summaries and drawings take none. */
+const TEXT_BOXES =
+  'textarea, select, input:not([type=checkbox], [type=radio], [type=button], [type=submit], [type=file])';
+
 function isTyping(target: EventTarget | null): boolean {
   return (
     target instanceof HTMLElement &&
-    (target.isContentEditable ||
-      target.closest('input, textarea, select, summary, canvas, [role="dialog"]') !== null)
+    (target.isContentEditable || target.closest(`${TEXT_BOXES}, [role="dialog"]`) !== null)
   );
 }

@@ -8,6 +8,7 @@ import {
   inject,
   Injector,
   input,
+  linkedSignal,
   signal,
   viewChild,
 } from '@angular/core';
@@ -30,6 +31,7 @@ import { readingLanguage } from '../ui/words/reading-language';
 import { CircuitFacts } from './circuit-facts';
 import { OtherEntries } from './other-entries';
 import { PhotoDialog, type PhotoSet } from './photo-dialog';
+import { outsideSteps } from './outside-steps';
 import { photosOf } from './photo-states';
 import { REVIEW_KEYS, reviewAction, type ReviewAction } from './review-keys';
 import { ReviewSteps } from './review-steps';
@@ -89,7 +91,13 @@ export class ReviewPage {
   });
   protected readonly isHelpOpen = signal(false);
   /** On a phone there is room for one: the list or the evidence. */
-  protected readonly isListOpen = signal(true);
+  protected readonly isListOpen = linkedSignal({ source: this.sequenceId, computation: () => true });
+  /** What an approval covers although it lies outside. */
+  protected readonly outside = computed(() => {
+    const view = this.store.view();
+    const units = this.store.sequence()?.stepList.facts.unitSystem;
+    return view && units ? outsideSteps(view, units, this.language()) : [];
+  });
 
   protected readonly keys = REVIEW_KEYS;
   protected readonly photoUrl = (sha256: string, size: 'full' | 'thumbnail'): string =>
@@ -154,6 +162,11 @@ export class ReviewPage {
     });
   }
 
+  private goToNext(): void {
+    const next = this.store.next();
+    if (next) void this.router.navigate(['/review', next.sequenceId]);
+  }
+
   private act(action: ReviewAction): void {
     switch (action) {
       case 'next':
@@ -168,6 +181,8 @@ export class ReviewPage {
         return this.store.canReview() ? this.setMode('approve') : undefined;
       case 'sendBack':
         return this.store.canReview() ? this.setMode('sendBack') : undefined;
+      case 'queueNext':
+        return this.goToNext();
       case 'help':
         return this.isHelpOpen.update((isOpen) => !isOpen);
       default:

@@ -2,13 +2,14 @@ import { ChangeDetectionStrategy, Component, input, output } from '@angular/core
 import { TranslocoDirective } from '@jsverse/transloco';
 import { OutcomeMark } from '../ui/outcome-mark/outcome-mark';
 import { TextOf } from '../ui/text-of';
+import { Unbroken } from '../ui/words/unbroken';
 import type { ReviewOrder } from './attention-order';
 import type { Drafts } from './remark-drafts';
 
 /** The reviewer's list of steps: what needs eyes first with the reasons, then the rest in working order. */
 @Component({
   selector: 'app-review-steps',
-  imports: [OutcomeMark, TextOf, TranslocoDirective],
+  imports: [OutcomeMark, TextOf, TranslocoDirective, Unbroken],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './review-steps.html',
   styleUrl: './review-steps.scss',

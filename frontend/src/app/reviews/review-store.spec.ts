@@ -34,6 +34,7 @@ describe('ReviewStore', () => {
   let verdicts: ReviewRequest[];
   let failures: unknown[];
   let asked: number;
+  let waiting: unknown[];
   let store: ReviewStore;
   const settle = (): Promise<unknown> => new Promise((done) => setTimeout(done));
 
@@ -43,8 +44,10 @@ describe('ReviewStore', () => {
     verdicts = [];
     failures = [];
     asked = 0;
+    waiting = [];
     const api = {
       sequence: async () => answer,
+      queue: async () => ({ items: waiting, isCut: false }),
       review: async (_id: SequenceId, request: ReviewRequest) => {
         verdicts.push(request);
         if (failures.length > 0) throw failures.shift();
@@ -120,6 +123,53 @@ describe('ReviewStore', () => {
       { verdict: 'sentBack', headHash: 'h1', remarks: [{ stepKey: 'a', text: 'Show the drain' }] },
     ]);
     expect(store.drafts()).toEqual({});
+  });
+
+  it('lets go of a verdict as soon as the circuit is submitted again', async () => {
+    store.setRemark('a', 'Show the drain');
+    answer = sequenceWith('h2', 'sentBack');
+    await store.sendBack();
+    await settle();
+    TestBed.tick();
+    expect(store.given()).toBe('sentBack');
+    expect(store.isChanged()).toBe(false);
+    answer = sequenceWith('h5');
+    store.readAnew();
+    await settle();
+    TestBed.tick();
+    expect(store.given()).toBeNull();
+    expect(store.isSubmittedAgain()).toBe(true);
+    store.acknowledgeChange();
+    expect(store.isChanged()).toBe(false);
+  });
+
+  it('offers what waits next after a verdict, without what the reader recorded', async () => {
+    const item = (sequenceId: string, fourEyesBlocked: boolean) => ({
+      sequenceId,
+      fourEyesBlocked,
+      outsideCount: 0,
+      submittedAt: '2026-11-30T10:00:00.000Z',
+      code: sequenceId,
+    });
+    waiting = [item('s1', false), item('s2', true), item('s3', false)];
+    expect(store.next()).toBeNull();
+    store.signature.set(signature);
+    await store.approve();
+    TestBed.tick();
+    await settle();
+    TestBed.tick();
+    expect(store.next()?.sequenceId).toBe('s3');
+  });
+
+  it('says what the server finds lacking', async () => {
+    failures = [
+      { ...failure('wrongState'), error: { ...failure('wrongState').error, facts: { missing: ['a'] } } },
+    ];
+    store.setMode('approve');
+    store.signature.set(signature);
+    await store.approve();
+    expect(store.lacking()?.steps.map(({ key }) => key)).toEqual(['a']);
+    expect(store.given()).toBeNull();
   });
 
   it('gives no verdict on evidence of their own', async () => {

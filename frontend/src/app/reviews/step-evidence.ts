@@ -5,7 +5,8 @@ import type { SequenceDetail } from '#shared/contracts/sequences';
 import { AnswerView, type PhotoUrl } from '../ui/answer-view/answer-view';
 import { DateTimeOf } from '../ui/date-time-of';
 import { TextOf } from '../ui/text-of';
-import type { ReviewStep } from './attention-order';
+import { Unbroken } from '../ui/words/unbroken';
+import { reasonsBesideOutcome, type ReviewStep } from './attention-order';
 import { EntryLine } from './entry-line';
 import { photosNotWell } from './photo-states';
 
@@ -14,7 +15,7 @@ const MOST_CHARACTERS = 2000;
 /** The evidence of one step: what was recorded, by whom and when, all that was recorded before, and the remark on it. */
 @Component({
   selector: 'app-step-evidence',
-  imports: [AnswerView, DateTimeOf, EntryLine, TextOf, TranslocoDirective],
+  imports: [AnswerView, DateTimeOf, EntryLine, TextOf, TranslocoDirective, Unbroken],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './step-evidence.html',
   styleUrl: './step-evidence.scss',
@@ -33,6 +34,8 @@ export class StepEvidence {
 
   protected readonly most = MOST_CHARACTERS;
   protected readonly step = computed(() => this.item().view.step);
+  /** The answer below says itself whether it lies outside. */
+  protected readonly reasons = computed(() => reasonsBesideOutcome(this.item().reasons));
   protected readonly section = computed(
     () => this.sequence().stepList.sections.find(({ key }) => key === this.step().section)?.title ?? null,
   );

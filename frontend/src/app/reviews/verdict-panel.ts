@@ -8,13 +8,16 @@ import { ProblemNote } from '../ui/notes/problem-note';
 import { SignatureBox } from '../ui/signature/signature-box';
 import { TextOf } from '../ui/text-of';
 import { countedKey } from '../ui/words/counted';
+import { Unbroken } from '../ui/words/unbroken';
+import type { OutsideStep } from './outside-steps';
+import type { Lacking } from './refused-approval';
 
 export type VerdictMode = 'closed' | 'approve' | 'sendBack';
 
 /** The two verdicts: send back with remarks, or approve with a signature. Neither happens by a single slip of a key. */
 @Component({
   selector: 'app-verdict-panel',
-  imports: [MatButton, ProblemNote, SignatureBox, TextOf, TranslocoDirective],
+  imports: [MatButton, ProblemNote, SignatureBox, TextOf, TranslocoDirective, Unbroken],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './verdict-panel.html',
   styleUrl: './verdict-panel.scss',
@@ -22,7 +25,10 @@ export type VerdictMode = 'closed' | 'approve' | 'sendBack';
 export class VerdictPanel {
   readonly mode = model.required<VerdictMode>();
   readonly remarks = input.required<readonly { readonly remark: Remark; readonly step: Step }[]>();
-  readonly outsideCount = input.required<number>();
+  /** What the approval covers although it lies outside. */
+  readonly outside = input.required<readonly OutsideStep[]>();
+  /** What the server said is lacking; `null` when it said nothing of the kind. */
+  readonly lacking = input.required<Lacking | null>();
   readonly printedName = input.required<string>();
   readonly isSending = input.required<boolean>();
   readonly problem = input.required<unknown>();

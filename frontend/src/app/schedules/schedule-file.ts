@@ -28,3 +28,21 @@ export function findProblems(rows: readonly ScheduleProblem[], text: string): re
     `${row} ${column ?? ''} ${reason}`.toLowerCase().includes(wanted),
   );
 }
+
+/** How the server's sentence about a missing column goes on. */
+const HEADINGS = / The headings found are: (.+)\.$/;
+
+/**
+ * Several missing columns each name all headings that the file has: those are said once.
+ *
+ * @returns `headings` is null where at most one problem names them, which then keeps its sentence whole
+ */
+export function sayHeadingsOnce(rows: readonly ScheduleProblem[]): {
+  readonly rows: readonly ScheduleProblem[];
+  readonly headings: string | null;
+} {
+  const named = rows.flatMap(({ reason }) => HEADINGS.exec(reason)?.[1] ?? []);
+  const [headings] = named;
+  if (headings === undefined || named.length < 2) return { rows, headings: null };
+  return { rows: rows.map((row) => ({ ...row, reason: row.reason.replace(HEADINGS, '') })), headings };
+}

@@ -17,8 +17,9 @@ import { Session } from '../session/session';
 import { EmptyNote } from '../ui/notes/empty-note';
 import { OfflineNote } from '../ui/notes/offline-note';
 import { ProblemNote } from '../ui/notes/problem-note';
+import { countedKey } from '../ui/words/counted';
 import { exampleCsv, NEEDED_COLUMNS } from './schedule-example';
-import { findProblems } from './schedule-file';
+import { findProblems, sayHeadingsOnce } from './schedule-file';
 import { ScheduleUpload } from './schedule-upload';
 
 const MANY_PROBLEMS = 20;
@@ -43,10 +44,13 @@ export class SchedulePage {
   protected readonly parts = ['systems', 'suctionGroups', 'circuits', 'fixtures', 'coils'] as const;
   protected readonly mayImport = computed(() => this.session.may('schedule.import', this.openingId()));
   protected readonly isOver = signal(false);
-  protected readonly problems = computed(() => {
+  private readonly refused = computed(() => {
     const state = this.upload.state();
-    return state.kind === 'refused' ? state.rows : [];
+    return sayHeadingsOnce(state.kind === 'refused' ? state.rows : []);
   });
+  protected readonly problems = computed(() => this.refused().rows);
+  protected readonly headings = computed(() => this.refused().headings);
+  protected readonly countedKey = countedKey;
   protected readonly isLong = computed(() => this.problems().length > MANY_PROBLEMS);
   /** A new refusal starts unfiltered. */
   protected readonly text = linkedSignal({ source: this.problems, computation: () => '' });

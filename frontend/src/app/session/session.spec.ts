@@ -21,13 +21,15 @@ const failing = (status: number) => new HttpErrorResponse({ status });
 
 describe('Session', () => {
   const read = jest.fn<() => Promise<Me | null>>();
+  const signOut = jest.fn<() => Promise<void>>();
   const registerDevice = jest.fn<(id: string | null) => Promise<unknown>>();
 
   beforeEach(() => {
     localStorage.clear();
     jest.resetAllMocks();
     registerDevice.mockResolvedValue({ deviceId: 'device-1', lastCount: 3 });
-    const api = { read, registerDevice, signOut: () => Promise.resolve() };
+    signOut.mockResolvedValue();
+    const api = { read, registerDevice, signOut };
     TestBed.configureTestingModule({ providers: [{ provide: SessionApi, useValue: api }] });
   });
 
@@ -73,6 +75,23 @@ describe('Session', () => {
     await session.signOut();
     expect(session.me()).toBeNull();
     expect(localStorage.getItem('firstcold.me')).toBeNull();
+  });
+
+  it('signs out also when the session is over already', async () => {
+    read.mockResolvedValueOnce(ME).mockResolvedValueOnce(null);
+    signOut.mockRejectedValue(failing(401));
+    const session = await start();
+    await session.verify();
+    await session.signOut();
+    expect(session.standing()).toBe('signedOut');
+  });
+
+  it('stays signed in when signing out reaches nobody', async () => {
+    read.mockResolvedValue(ME);
+    signOut.mockRejectedValue(failing(0));
+    const session = await start();
+    await expect(session.signOut()).rejects.toMatchObject({ status: 0 });
+    expect(session.me()?.id).toBe(ME.id);
   });
 
   it('answers by the table that the server refuses by', async () => {

@@ -66,7 +66,12 @@ export class Session {
 
   /** Ends the session. The phone forgets who was here; what still waits to be sent stays. */
   async signOut(): Promise<void> {
-    await this.api.signOut();
+    try {
+      await this.api.signOut();
+    } catch (error) {
+      // There was no session left to end, which is what was wanted.
+      if (httpFailure(error)?.status !== 401) throw error;
+    }
     this.forget();
   }
 

@@ -14,6 +14,7 @@ import { navigationFor } from './navigation';
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './shell.html',
   styleUrl: './shell.scss',
+  host: { '[class.offline]': '!online()' },
 })
 export class Shell {
   private readonly document = inject(DOCUMENT);

@@ -1,5 +1,7 @@
 import { Pipe, type PipeTransform } from '@angular/core';
-import { formatQuantity } from '#shared/units/format';
+import { fromSi } from '#shared/units/convert';
+import { formatNumber, formatQuantity } from '#shared/units/format';
+import { UNITS } from '#shared/units/unit';
 import type { Dimension } from '#shared/units/unit';
 import { displayUnit, type UnitSystem } from '#shared/units/unit-system';
 import { readingLanguage } from './words/reading-language';
@@ -9,8 +11,20 @@ import { readingLanguage } from './words/reading-language';
 export class QuantityOf implements PipeTransform {
   private readonly language = readingLanguage();
 
-  /** @param si in the SI unit of `dimension` */
-  transform(si: number | null | undefined, dimension: Dimension, unitSystem: UnitSystem): string {
-    return formatQuantity(si ?? Number.NaN, displayUnit(dimension, unitSystem), this.language());
+  /**
+   * @param si in the SI unit of `dimension`
+   * @param decimals where the value isn't known as closely as the unit is shown: an elevation in whole feet
+   */
+  transform(
+    si: number | null | undefined,
+    dimension: Dimension,
+    unitSystem: UnitSystem,
+    decimals?: number,
+  ): string {
+    const unit = displayUnit(dimension, unitSystem);
+    if (si === null || si === undefined || decimals === undefined) {
+      return formatQuantity(si ?? Number.NaN, unit, this.language());
+    }
+    return `${formatNumber(fromSi(si, unit), decimals, this.language())} ${UNITS[unit].symbol}`.trim();
   }
 }

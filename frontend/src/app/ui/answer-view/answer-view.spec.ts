@@ -84,7 +84,7 @@ describe('AnswerView', () => {
     expect(root.querySelector('app-strip')).not.toBeNull();
     expect(root.textContent).toContain('Criterion: Specification, revision 3');
     expect(root.querySelectorAll('app-working-slip .slip')).toHaveLength(2);
-    expect(root.querySelectorAll('app-working-slip .source')).toHaveLength(1);
+    expect(root.querySelectorAll('app-working-slip p.source')).toHaveLength(1);
   });
 
   it('says why an answer does not count', async () => {

@@ -9,6 +9,7 @@ import { QuantityOf } from '../quantity-of';
 import { SignatureView } from '../signature/signature-view';
 import { Strip } from '../strip/strip';
 import { TextOf } from '../text-of';
+import { SourceOf } from '../words/source-of';
 import { WorkingSlip } from '../working-slip/working-slip';
 import { chosenLabel, judgedFigure, otherFigures, typedInputs } from './answer-figures';
 
@@ -21,7 +22,7 @@ export type PhotoUrl = (sha256: string, size: 'full' | 'thumbnail') => string;
  */
 @Component({
   selector: 'app-answer-view',
-  imports: [TranslocoDirective, OutcomeMark, QuantityOf, SignatureView, Strip, TextOf, WorkingSlip],
+  imports: [TranslocoDirective, OutcomeMark, QuantityOf, SignatureView, SourceOf, Strip, TextOf, WorkingSlip],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './answer-view.html',
   styleUrl: './answer-view.scss',

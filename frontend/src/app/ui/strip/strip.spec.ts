@@ -27,9 +27,9 @@ describe('Strip', () => {
     );
   });
 
-  it('reads in Spanish with a decimal comma', async () => {
+  it('reads in Spanish with a decimal point, as in North America', async () => {
     expect(await sentenceOf({ high: 4.5, value: 3.2, unitSystem: 'si' }, 'es')).toBe(
-      'Superheat: 3,2 K. Se pide: 4,5 K o menos. Está dentro.',
+      'Superheat: 3.2 K. Se pide: 4.5 K o menos. Está dentro.',
     );
   });
 });

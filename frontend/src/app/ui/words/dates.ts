@@ -2,6 +2,9 @@ import type { Language } from '#shared/checklist/text';
 
 const DAY_MS = 86_400_000;
 
+/** The Spanish read here is North American: decimal point, AM and PM. */
+export const LOCALES: Readonly<Record<Language, string>> = { en: 'en-US', es: 'es-US' };
+
 /**
  * A calendar day (`2026-12-01`) in words. It has no time zone: it is the same day for every reader.
  *
@@ -10,24 +13,33 @@ const DAY_MS = 86_400_000;
 export function formatDay(day: string, language: Language): string {
   const date = new Date(`${day.slice(0, 10)}T00:00:00Z`);
   if (Number.isNaN(date.getTime())) return day;
-  return new Intl.DateTimeFormat(language, { dateStyle: 'medium', timeZone: 'UTC' }).format(date);
+  return new Intl.DateTimeFormat(LOCALES[language], { dateStyle: 'medium', timeZone: 'UTC' }).format(date);
 }
 
 /**
- * A moment on the store's own clock.
+ * A moment on the store's own clock, which it names; on the reader's own where the store's isn't known.
  *
  * @param timeZone IANA name; the reader's own where it is not known or not a zone
- * @returns such as "Dec 1, 2026, 7:15 AM"; the text itself when it is no moment
+ * @returns such as "Dec 1, 2026, 7:15 AM MST"; the text itself when it is no moment
  */
 export function formatMoment(moment: string, language: Language, timeZone?: string): string {
   const date = new Date(moment);
   if (Number.isNaN(date.getTime())) return moment;
-  const style = { dateStyle: 'medium', timeStyle: 'short' } as const;
+  const style = {
+    year: 'numeric',
+    month: 'short',
+    day: 'numeric',
+    hour: 'numeric',
+    minute: '2-digit',
+  } as const;
+  const zone = timeZone ? ({ timeZone, timeZoneName: 'short' } as const) : {};
   try {
-    return new Intl.DateTimeFormat(language, { ...style, ...(timeZone ? { timeZone } : {}) }).format(date);
+    return new Intl.DateTimeFormat(LOCALES[language], { ...style, ...zone }).format(date);
   } catch (error) {
     // A zone that this browser doesn't know throws RangeError; the reader's own zone is better than no time.
-    if (error instanceof RangeError) return new Intl.DateTimeFormat(language, style).format(date);
+    if (error instanceof RangeError) {
+      return new Intl.DateTimeFormat(LOCALES[language], style).format(date);
+    }
     throw error;
   }
 }

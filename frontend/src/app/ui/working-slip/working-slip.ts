@@ -3,7 +3,7 @@ import { TranslocoDirective } from '@jsverse/transloco';
 import type { Judgement } from '#shared/checklist/judgement';
 import type { UnitSystem } from '#shared/units/unit-system';
 import { readingLanguage } from '../words/reading-language';
-import { workingLines } from './working-text';
+import { shortSource, workingLines } from './working-text';
 
 /** The torn-edge slip under a result: how it was worked out, line by line with units, and the formula's source. */
 @Component({
@@ -27,7 +27,13 @@ import { workingLines } from './working-text';
                 }
               </dl>
               @if (slip.isLastOfSource) {
-                <p class="source">{{ t('source') }}: {{ slip.source }}</p>
+                <p class="source">{{ t('source') }}: {{ slip.short }}</p>
+                @if (slip.short !== slip.source) {
+                  <details class="source">
+                    <summary>{{ t('sourceInFull') }}</summary>
+                    <p>{{ slip.source }}</p>
+                  </details>
+                }
               }
             </section>
           }
@@ -48,6 +54,7 @@ export class WorkingSlip {
     this.working().map((working, index, all) => ({
       formula: working.formula,
       source: working.source,
+      short: shortSource(working.source),
       // Several pairs of one reading share their source, and it is long: it stands under the last of them.
       isLastOfSource: all[index + 1]?.source !== working.source,
       lines: workingLines(working, this.unitSystem(), this.language()),

@@ -17,3 +17,8 @@ export function workingLines(
     text: formatQuantity(value, displayUnit(UNITS[unit].dimension, unitSystem), language),
   }));
 }
+
+/** The table and the program behind it: what a citation begins with. The literature follows behind a semicolon. */
+export function shortSource(source: string): string {
+  return source.split(';')[0]?.trim() ?? source;
+}

@@ -6,22 +6,29 @@ const row = (code: string, area: string, state: WorkRow['state'] = 'open', openi
 const codes = (rows: readonly WorkRow[]): string[] => rows.map(({ code }) => code);
 
 describe('groupCircuits', () => {
-  it('puts what was sent back first, whatever its area', () => {
-    const [group] = groupCircuits([
+  it('puts what was sent back first, whatever its opening and area', () => {
+    const day = groupCircuits([
       row('A1', 'Dairy'),
       row('B9', 'Produce', 'sentBack'),
-      row('B2', 'Dairy', 'sentBack'),
+      row('B2', 'Dairy', 'sentBack', 'Two'),
+      row('B1', 'Dairy', 'sentBack'),
     ]);
-    expect(codes(group!.sentBack)).toEqual(['B2', 'B9']);
-    expect(group!.areas.map(({ area }) => area)).toEqual(['Dairy']);
+    expect(codes(day.sentBack)).toEqual(['B1', 'B9', 'B2']);
+    expect(day.openings.flatMap(({ areas }) => areas.map(({ area }) => area))).toEqual(['Dairy']);
+  });
+
+  it('puts what is approved at the end, out of its area', () => {
+    const day = groupCircuits([row('A1', 'Dairy', 'approved'), row('A2', 'Dairy', 'submitted')]);
+    expect(codes(day.done)).toEqual(['A1']);
+    expect(codes(day.openings[0]!.areas[0]!.rows)).toEqual(['A2']);
   });
 
   it('sorts codes as people count', () => {
-    const [group] = groupCircuits([row('A10', 'Dairy'), row('A2', 'Dairy')]);
-    expect(codes(group!.areas[0]!.rows)).toEqual(['A2', 'A10']);
+    const { openings } = groupCircuits([row('A10', 'Dairy'), row('A2', 'Dairy')]);
+    expect(codes(openings[0]!.areas[0]!.rows)).toEqual(['A2', 'A10']);
   });
 
   it('keeps openings apart', () => {
-    expect(groupCircuits([row('A1', 'Dairy'), row('A1', 'Dairy', 'open', 'Two')])).toHaveLength(2);
+    expect(groupCircuits([row('A1', 'Dairy'), row('A1', 'Dairy', 'open', 'Two')]).openings).toHaveLength(2);
   });
 });

@@ -13,28 +13,38 @@ export interface AreaGroup {
 export interface OpeningGroup {
   readonly openingId: CircuitRow['openingId'];
   readonly openingName: string;
-  readonly sentBack: readonly WorkRow[];
   readonly areas: readonly AreaGroup[];
 }
 
-const byCode = (a: WorkRow, b: WorkRow): number => a.code.localeCompare(b.code, 'en', { numeric: true });
+/** An installer's circuits in the order of the day. */
+export interface DayOfWork {
+  /** Of all openings: what a lead asks for again comes before anything new. */
+  readonly sentBack: readonly WorkRow[];
+  readonly openings: readonly OpeningGroup[];
+  /** Approved, of all openings: nothing to do there any more. */
+  readonly done: readonly WorkRow[];
+}
+
+const byCode = (a: WorkRow, b: WorkRow): number =>
+  a.openingName.localeCompare(b.openingName) || a.code.localeCompare(b.code, 'en', { numeric: true });
 
 /**
- * Circuits as an installer walks them: opening by opening; what was sent back first, whatever its area, then area by
- * area. Codes sort as people count: A2 before A10.
+ * Circuits as an installer walks them: what was sent back first, whatever its opening and area; then opening by opening
+ * and area by area; what is approved at the end. Codes sort as people count: A2 before A10.
  */
-export function groupCircuits(rows: readonly WorkRow[]): readonly OpeningGroup[] {
-  return grouped(rows, (row) => row.openingId).map(([openingId, ofOpening]): OpeningGroup => {
-    const others = ofOpening.filter((row) => row.state !== 'sentBack');
-    return {
+export function groupCircuits(rows: readonly WorkRow[]): DayOfWork {
+  const others = rows.filter((row) => row.state !== 'sentBack' && row.state !== 'approved');
+  return {
+    sentBack: rows.filter((row) => row.state === 'sentBack').sort(byCode),
+    openings: grouped(others, (row) => row.openingId).map(([openingId, ofOpening]) => ({
       openingId,
       openingName: ofOpening[0]?.openingName ?? '',
-      sentBack: ofOpening.filter((row) => row.state === 'sentBack').sort(byCode),
-      areas: grouped(others, (row) => row.area)
+      areas: grouped(ofOpening, (row) => row.area)
         .map(([area, inArea]): AreaGroup => ({ area, rows: [...inArea].sort(byCode) }))
         .sort((a, b) => a.area.localeCompare(b.area)),
-    };
-  });
+    })),
+    done: rows.filter((row) => row.state === 'approved').sort(byCode),
+  };
 }
 
 /** Rows by a key, in the order in which the keys first appear. `Map.groupBy` is missing on phones a few years old. */

@@ -15,6 +15,8 @@ import type { WorkRow } from './circuit-groups';
 })
 export class CircuitRowLine {
   readonly row = input.required<WorkRow>();
+  /** Whether it says which opening it belongs to, where circuits of several stand together. */
+  readonly withOpening = input(false);
   /** How much of the line is brazed, from 0 to 100. */
   protected readonly reached = computed(() => {
     const { stepsDone, stepsTotal } = this.row();

@@ -33,7 +33,8 @@ export class MyCircuitsStore {
   readonly readAt = this.read.asReadonly();
   readonly isLoading = computed(() => this.rows() === null && this.failure() === null);
   readonly isEmpty = computed(() => this.rows()?.length === 0);
-  readonly groups = computed(() => {
+  readonly hasNothing = computed(() => (this.rows()?.length ?? 0) === 0);
+  readonly day = computed(() => {
     const entries = this.outbox.entries();
     return groupCircuits((this.rows() ?? []).map((row) => workRow(row, this.views(), entries)));
   });

@@ -1,12 +1,11 @@
 import { DestroyRef, inject, Injectable, signal } from '@angular/core';
+import type { SequenceDetail } from '#shared/contracts/sequences';
 import type { SequenceId } from '#shared/plant/ids';
 import { photosOf } from '../../offline/append-entry';
 import { OutboxStorage } from '../../offline/outbox-storage';
 import type { StepView } from '#shared/sequences/sequence-view';
 import type { PhotoUrl } from '../../ui/answer-view/answer-view';
-
-/** A picture of nothing: stands while it isn't known yet where a photo is, and for one that has not arrived anywhere. */
-const NOTHING_YET = 'data:image/gif;base64,R0lGODlhAQABAAAAACH5BAEKAAEALAAAAAABAAEAAAICTAEAOw==';
+import { NOTHING_YET } from '../photo-placeholder';
 
 /** Where photos are shown from: this phone while it has them, which works without a network, else the server. */
 @Injectable()
@@ -22,22 +21,31 @@ export class LocalPhotos {
   /** Makes addresses for the photos of a step that are on this phone and have none yet. */
   async show(sequenceId: SequenceId, view: StepView): Promise<void> {
     const wanted = view.history.flatMap((entry) => photosOf(entry.body.content));
-    const fresh = new Map(this.urls());
     for (const sha256 of wanted) {
-      if (fresh.has(sha256)) continue;
+      if (this.urls().has(sha256)) continue;
       const photo = await this.storage.photo(sequenceId, sha256);
-      fresh.set(sha256, photo ? URL.createObjectURL(new Blob([photo.bytes], { type: 'image/jpeg' })) : null);
+      // Another look may have found it meanwhile.
+      if (this.urls().has(sha256)) continue;
+      const url = photo ? URL.createObjectURL(new Blob([photo.bytes], { type: 'image/jpeg' })) : null;
+      this.urls.update((urls) => new Map(urls).set(sha256, url));
     }
-    if (fresh.size > this.urls().size) this.urls.set(fresh);
   }
 
-  /** @param awaited photos that have not reached the server: asking it for them would only fail */
-  urlFor(sequenceId: SequenceId, awaited: ReadonlySet<string>): PhotoUrl {
+  /** @param arrived photos that the server is known to have: asking it for any other would only fail */
+  urlFor(sequenceId: SequenceId, arrived: ReadonlySet<string>): PhotoUrl {
     const urls = this.urls();
     return (sha256, size) => {
       const url = urls.get(sha256);
-      if (url === undefined || (url === null && awaited.has(sha256))) return NOTHING_YET;
-      return url ?? `/api/sequences/${sequenceId}/photos/${sha256}?size=${size}`;
+      if (url) return url;
+      // Not looked for yet, or neither here nor there.
+      if (url === undefined || !arrived.has(sha256)) return NOTHING_YET;
+      return `/api/sequences/${sequenceId}/photos/${sha256}?size=${size}`;
     };
   }
+}
+
+/** The photos that the server can show; one that it found broken it keeps, and can't. */
+export function arrivedPhotos(photos: SequenceDetail['photos']): ReadonlySet<string> {
+  const there = photos.filter(({ state }) => state === 'received' || state === 'checked');
+  return new Set(there.map(({ sha256 }) => sha256));
 }

@@ -17,13 +17,19 @@ export function knownEntries(cached: CachedSequence, outbox: readonly OutboxEntr
     .filter(
       (entry) => entry.state === 'waiting' && entry.sequenceId === cached.sequenceId && !byId.has(entry.id),
     )
-    .sort((a, b) => a.deviceCount - b.deviceCount)
+    .sort(byMaking)
     .map((entry): FoldEntry => ({
       body: entry.body,
       server: { position: 0, standing: 'inOrder', judgement: entry.judgement },
       hash: null,
     }));
   return [...stored, ...unsent];
+}
+
+/** A device counts what it makes; between a device and the one that replaced it only the clock tells. */
+function byMaking(a: OutboxEntry, b: OutboxEntry): number {
+  if (a.deviceId === b.deviceId) return a.deviceCount - b.deviceCount;
+  return a.body.deviceTime < b.body.deviceTime ? -1 : 1;
 }
 
 /** The state of a sequence as this phone sees it, sent or not. */

@@ -1,4 +1,13 @@
-import { ChangeDetectionStrategy, Component, input, output, signal } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  input,
+  model,
+  output,
+  signal,
+  viewChild,
+  type ElementRef,
+} from '@angular/core';
 import { TranslocoPipe } from '@jsverse/transloco';
 
 const SHORTEST_REASON = 3;
@@ -9,7 +18,7 @@ const SHORTEST_REASON = 3;
   imports: [TranslocoPipe],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <details [open]="isOpen()" (toggle)="noteToggle($event)">
+    <details #details [open]="isOpen()" (toggle)="noteToggle($event)">
       <summary>{{ 'work.doesNotApply' | transloco }}</summary>
       <label>
         <span>{{ 'work.reasonWhy' | transloco }}</span>
@@ -58,18 +67,23 @@ const SHORTEST_REASON = 3;
 })
 export class NotApplicable {
   readonly isBusy = input(false);
+  /** Whether its box is open: the step's own action then makes room. */
+  readonly isOpen = model(false);
   readonly recordReason = output<string>();
 
   protected readonly shortest = SHORTEST_REASON;
   protected readonly reason = signal('');
-  protected readonly isOpen = signal(false);
+  private readonly details = viewChild.required<ElementRef<HTMLDetailsElement>>('details');
 
   protected take(event: Event): void {
     this.reason.set((event.target as HTMLTextAreaElement).value);
   }
 
   protected noteToggle(event: Event): void {
-    this.isOpen.set((event.target as HTMLDetailsElement).open);
+    const { open } = event.target as HTMLDetailsElement;
+    this.isOpen.set(open);
+    // Opened at the foot of a step it would lie behind the bar.
+    if (open) this.details().nativeElement.scrollIntoView({ block: 'center', behavior: 'smooth' });
   }
 
   protected record(): void {

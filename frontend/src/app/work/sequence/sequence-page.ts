@@ -14,19 +14,22 @@ import { TranslocoPipe, TranslocoService } from '@jsverse/transloco';
 import type { SequenceId } from '#shared/plant/ids';
 import { Connectivity } from '../../offline/connectivity';
 import { PageTitles } from '../../shell/page-titles';
-import { CopperLine } from '../../ui/copper-line/copper-line';
 import { DateTimeOf } from '../../ui/date-time-of';
 import { LoadingNote } from '../../ui/notes/loading-note';
 import { ProblemNote } from '../../ui/notes/problem-note';
 import { StateMark } from '../../ui/state-mark/state-mark';
-import { readingLanguage } from '../../ui/words/reading-language';
 import { LocalPhotos } from './local-photos';
+import { RecordPause } from './record-pause';
 import { SequenceStore } from './sequence-store';
-import { firstOpenStep, jointOf, nextOpenStep } from './step-order';
+import { StandingLine } from './standing-line';
+import { standingOverrides } from './step-action';
+import { StepLine } from './step-line';
+import { firstOpenStep, nextOpenStep } from './step-order';
 import { StepOverview } from './step-overview';
 import { StepRun } from './step-run';
 import { StepSheet } from './step-sheet';
 import { SubmitSheet } from './submit-sheet';
+import { ZoneName } from './zone-name';
 
 /** The two places of a sequence that aren't steps; step keys can't be these, they hold a colon or a dot. */
 const OVERVIEW = 'overview';
@@ -37,20 +40,22 @@ const SUBMIT = 'submit';
   selector: 'app-sequence-page',
   imports: [
     CdkStepperModule,
-    CopperLine,
     DateTimeOf,
     LoadingNote,
     MatIconModule,
     ProblemNote,
     RouterLink,
+    StandingLine,
     StateMark,
+    StepLine,
     StepOverview,
     StepRun,
     StepSheet,
     SubmitSheet,
     TranslocoPipe,
+    ZoneName,
   ],
-  providers: [SequenceStore, LocalPhotos],
+  providers: [SequenceStore, LocalPhotos, RecordPause],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './sequence-page.html',
   styleUrl: './sequence-page.scss',
@@ -62,7 +67,6 @@ export class SequencePage {
   private readonly router = inject(Router);
   private readonly titles = inject(PageTitles);
   private readonly words = inject(TranslocoService);
-  private readonly language = readingLanguage();
   protected readonly store = inject(SequenceStore);
   protected readonly online = inject(Connectivity).online;
   protected readonly view = this.store.view;
@@ -77,8 +81,12 @@ export class SequencePage {
   protected readonly index = computed(
     () => this.view()?.steps.findIndex(({ step }) => step.key === this.at()) ?? -1,
   );
-  protected readonly joints = computed(() =>
-    (this.view()?.steps ?? []).map((step) => jointOf(step, step.step.title[this.language()])),
+  protected readonly standing = computed(() => {
+    const view = this.view();
+    return view ? standingOverrides(view) : [];
+  });
+  protected readonly standingElsewhere = computed(() =>
+    this.standing().filter((view) => view.step.key !== this.at()),
   );
   protected readonly state = computed(() => {
     const view = this.view();
@@ -90,6 +98,8 @@ export class SequencePage {
   protected readonly isClosed = computed(() => this.view()?.fold.state === 'approved');
   protected readonly sentBackBy = computed(() => {
     const review = this.view()?.reviews.at(-1);
+    // On the step that the lead asks for again, the remark itself says so.
+    if (this.view()?.steps[this.index()]?.remark) return null;
     return this.state() === 'sentBack' && review ? this.store.nameOf(review.body.authorId) : null;
   });
   protected readonly remarkCount = computed(
@@ -140,9 +150,9 @@ export class SequencePage {
     return this.words.translate('work.stepsOf', { code: circuit?.code ?? '' });
   }
 
-  protected refusedOn(stepKey: string) {
+  protected troubledOn(stepKey: string) {
     return this.store
-      .refused()
+      .troubled()
       .filter(({ body: { content } }) => 'stepKey' in content && content.stepKey === stepKey);
   }
 }

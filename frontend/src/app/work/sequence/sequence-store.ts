@@ -7,6 +7,7 @@ import type { EntryContent } from '#shared/sequences/entry';
 import type { StepView } from '#shared/sequences/sequence-view';
 import { debounceTime, filter, fromEvent } from 'rxjs';
 import { Connectivity } from '../../offline/connectivity';
+import { isStuck } from '../../offline/delivery-batches';
 import type { CachedSequence, OutboxEntry } from '../../offline/local-database';
 import { Outbox } from '../../offline/outbox';
 import { SequenceCache } from '../../offline/sequence-cache';
@@ -51,7 +52,10 @@ export class SequenceStore {
   private readonly ownOutbox = computed(
     () => this.local()?.outbox.filter((entry) => entry.sequenceId === this.id()) ?? [],
   );
-  readonly refused = computed(() => this.ownOutbox().filter((entry) => entry.state === 'refused'));
+  /** Refused, or the server fails on it again and again: people have to know. */
+  readonly troubled = computed(() =>
+    this.ownOutbox().filter((entry) => entry.state === 'refused' || isStuck(entry)),
+  );
   readonly unsentCount = computed(() => this.ownOutbox().filter((entry) => entry.state === 'waiting').length);
   readonly people = computed(() => new Map((this.detail()?.people ?? []).map(({ id, name }) => [id, name])));
 

@@ -5,13 +5,13 @@ import type { Step } from '#shared/checklist/step';
 import type { FoldEntry } from '#shared/sequences/fold';
 import type { UnitSystem } from '#shared/units/unit-system';
 import { AnswerView, type PhotoUrl } from '../../ui/answer-view/answer-view';
-import { DateTimeOf } from '../../ui/date-time-of';
+import { EntryStamp } from './entry-stamp';
 import { SequenceStore } from './sequence-store';
 
 /** What was recorded on a step before: nothing is ever replaced, only superseded. */
 @Component({
   selector: 'app-step-history',
-  imports: [AnswerView, DateTimeOf, MatIconModule, TranslocoPipe],
+  imports: [AnswerView, EntryStamp, MatIconModule, TranslocoPipe],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     @if (earlier().length > 0) {
@@ -21,12 +21,11 @@ import { SequenceStore } from './sequence-store';
         </summary>
         @for (entry of earlier(); track entry.body.id) {
           <article>
-            <p class="who">
-              {{ store.nameOf(entry.body.authorId) }} ·
-              <time class="figures" [attr.datetime]="entry.body.deviceTime">{{
-                entry.body.deviceTime | appDateTime: timeZone()
-              }}</time>
-            </p>
+            <app-entry-stamp
+              [entry]="entry"
+              [name]="store.nameOf(entry.body.authorId)"
+              [timeZone]="timeZone()"
+            />
             <app-answer-view
               [step]="step()"
               [entry]="entry"
@@ -51,10 +50,6 @@ import { SequenceStore } from './sequence-store';
     article {
       padding: var(--app-space-3) 0;
       border-top: 1px solid var(--app-rule-thin);
-    }
-    .who {
-      color: var(--app-ink-soft);
-      font-size: var(--app-size-1);
     }
   `,
 })

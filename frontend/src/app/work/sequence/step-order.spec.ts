@@ -1,9 +1,20 @@
 import { describe, expect, it } from '@jest/globals';
+import { plainJudgement, type Outcome } from '#shared/checklist/judgement';
+import type { Step } from '#shared/checklist/step';
 import type { PersonId } from '#shared/plant/ids';
+import type { StepDraft } from '../steps/step-draft';
 import { localView } from './local-view';
 import { bodyOf, cachedOf, CONFIRMED, confirmStep, contentOf, storedOf, uuid } from './sequence.fixture';
-import { firstOpenStep, jointOf, nextOpenStep } from './step-order';
-import { actionKey, showsRecorded, startingAnswer } from './step-action';
+import { whyNot } from './record-problem';
+import {
+  actionKey,
+  secondLook,
+  sheetMode,
+  showsRecorded,
+  standingOverrides,
+  startingAnswer,
+} from './step-action';
+import { firstOpenStep, jointOf, markOf, nextOpenStep } from './step-order';
 
 const STEPS = [
   confirmStep('a'),
@@ -11,6 +22,12 @@ const STEPS = [
   confirmStep('b'),
   confirmStep('c'),
 ];
+const overrideStep = (key: string): Step =>
+  ({
+    ...confirmStep(key),
+    kind: 'override',
+    subject: { en: 'Defrost held off', es: 'Deshielo detenido' },
+  }) as Step;
 const done = (position: number, key: string) =>
   storedOf(position, bodyOf(position, contentOf(key, CONFIRMED)));
 const sentBack = (position: number, key: string) =>
@@ -86,9 +103,80 @@ describe('a reopened step', () => {
   });
 });
 
-describe('actionKey', () => {
-  it('says that an odd answer is recorded as it stands', () => {
-    expect(actionKey(reopened().steps[0]!, true)).toBe('work.action_asTyped');
-    expect(actionKey(reopened().steps[0]!, false)).toBe('work.action_confirm');
+describe('a set override', () => {
+  const steps = [
+    overrideStep('hold'),
+    confirmStep('b'),
+    { ...confirmStep('sign'), kind: 'signature' } as Step,
+  ];
+  const set = storedOf(
+    1,
+    bodyOf(
+      1,
+      contentOf(
+        'hold',
+        { kind: 'override', phase: 'set', remark: '' },
+        { ...plainJudgement('recorded'), counts: false },
+      ),
+    ),
+  );
+  const view = localView(cachedOf(steps, [set, done(2, 'b')]), []);
+
+  it('never makes the one big button mean the opposite: it goes on', () => {
+    const mode = sheetMode(view.steps[0]!, false, false);
+    expect(mode).toBe('standing');
+    expect(actionKey('override', mode, false)).toBe('work.nextOpen');
+  });
+
+  it('stands until it is put back', () => {
+    expect(standingOverrides(view).map(({ step }) => step.key)).toEqual(['hold']);
+  });
+
+  it('comes before anybody signs', () => {
+    expect(nextOpenStep(view, 'b')).toBe('hold');
+    expect(nextOpenStep(view, 'hold')).toBe('sign');
+  });
+
+  it('keeps the signature from being recorded, and says why', () => {
+    const draft = { lacking: () => null, refusals: () => [] } as unknown as StepDraft;
+    expect(whyNot('signature', draft, standingOverrides(view), 'en')).toEqual({
+      key: 'work.putBackFirst',
+      params: { subject: 'Defrost held off' },
+    });
+    expect(whyNot('confirm', draft, standingOverrides(view), 'en')).toBeNull();
+  });
+});
+
+describe('secondLook', () => {
+  const outside = plainJudgement('outside');
+
+  it('asks about what lies outside and about what looks odd, and about nothing else', () => {
+    expect(secondLook('reading', outside)).toBe('outside');
+    expect(secondLook('choose', outside)).toBe('finding');
+    const odd = plainJudgement('within', [{ kind: 'liquidRisk', severity: 'ask' }]);
+    expect(secondLook('superheat', odd)).toBe('doubt');
+    expect(secondLook('reading', plainJudgement('within'))).toBeNull();
+    expect(secondLook('reading', null)).toBeNull();
+  });
+
+  it('is answered on a button that says so', () => {
+    expect(actionKey('reading', 'ask', true)).toBe('work.action_asTyped');
+    expect(actionKey('reading', 'ask', false)).toBe('work.action_reading');
+  });
+});
+
+describe('markOf', () => {
+  const answered = (outcome: Outcome) =>
+    localView(
+      cachedOf(STEPS, [storedOf(1, bodyOf(1, contentOf('a', CONFIRMED, plainJudgement(outcome))))]),
+      [],
+    );
+
+  it('tells outside and not applicable from what is simply done', () => {
+    const marks = (['outside', 'notApplicable', 'within'] as const).map((outcome) =>
+      markOf(answered(outcome).steps[0]!),
+    );
+    expect(marks).toEqual(['outside', 'notApplicable', null]);
+    expect(markOf(reopened().steps[2]!)).toBeNull();
   });
 });

@@ -21,8 +21,11 @@ export function firstOpenStep(view: SequenceView): string | null {
 export function nextOpenStep(view: SequenceView, afterKey: string): string | null {
   const from = view.steps.findIndex((step) => step.step.key === afterKey) + 1;
   const ahead = view.steps.slice(from).find((step) => !isDone(step.fold));
-  const behind = view.steps.slice(0, Math.max(0, from - 1)).find((step) => isMissing(step));
-  return (ahead ?? behind)?.step.key ?? null;
+  const before = view.steps.slice(0, Math.max(0, from - 1));
+  // Nobody signs while something is set by hand: to put that back comes first.
+  const standing = before.find((step) => step.fold?.overrideStanding);
+  if (ahead?.step.kind === 'signature' && standing) return standing.step.key;
+  return (ahead ?? before.find((step) => isMissing(step)))?.step.key ?? null;
 }
 
 function isMissing(view: StepView): boolean {
@@ -34,4 +37,11 @@ export function jointOf(view: StepView, label: string): LineJoint {
   if (view.fold?.reopenedBy) return { label, state: 'sentBack' };
   if (isDone(view.fold)) return { label, state: 'approved' };
   return { label, state: view.fold ? 'underWay' : 'open' };
+}
+
+/** What a step's joint is marked with beside its state: done, but with a value outside, or without one. */
+export function markOf(view: StepView): 'outside' | 'notApplicable' | null {
+  const { fold } = view;
+  if (!fold || fold.reopenedBy !== null || !fold.counts) return null;
+  return fold.outcome === 'outside' || fold.outcome === 'notApplicable' ? fold.outcome : null;
 }

@@ -1,5 +1,4 @@
 import { LiveAnnouncer } from '@angular/cdk/a11y';
-import { CdkStepperModule } from '@angular/cdk/stepper';
 import { NgComponentOutlet } from '@angular/common';
 import {
   afterNextRender,
@@ -16,9 +15,9 @@ import {
   type ElementRef,
   type OnInit,
 } from '@angular/core';
-import { MatButtonModule } from '@angular/material/button';
 import { MatIconModule } from '@angular/material/icon';
 import { TranslocoPipe, TranslocoService } from '@jsverse/transloco';
+import type { Answer } from '#shared/checklist/step';
 import type { SequenceDetail } from '#shared/contracts/sequences';
 import type { FoldEntry } from '#shared/sequences/fold';
 import type { StepView } from '#shared/sequences/sequence-view';
@@ -26,17 +25,22 @@ import { photosOf } from '../../offline/append-entry';
 import type { OutboxEntry } from '../../offline/local-database';
 import { Session } from '../../session/session';
 import { AnswerView } from '../../ui/answer-view/answer-view';
-import { CautionNote } from '../../ui/caution/caution-note';
-import { DateTimeOf } from '../../ui/date-time-of';
 import { TextOf } from '../../ui/text-of';
+import { readingLanguage } from '../../ui/words/reading-language';
 import { STEP_COMPONENTS } from '../steps/step-components';
 import { StepDraft } from '../steps/step-draft';
-import { isUnsent } from './local-view';
-import { LocalPhotos } from './local-photos';
+import { EntryStamp } from './entry-stamp';
+import { arrivedPhotos, LocalPhotos } from './local-photos';
 import { NotApplicable } from './not-applicable';
 import { PhotoViewer } from './photo-viewer';
+import { photosElsewhere } from './photos-elsewhere';
+import { RecordPause } from './record-pause';
+import { failureKey, whyNot } from './record-problem';
 import { SequenceStore } from './sequence-store';
-import { actionKey, showsRecorded, startingAnswer } from './step-action';
+import { sourceText } from './source-text';
+import { actionKey, secondLook, sheetMode, startingAnswer } from './step-action';
+import { StepFooter } from './step-footer';
+import { StepGuidance } from './step-guidance';
 import { StepHistory } from './step-history';
 
 /** One step on one screen: what to do, what is dangerous about it, the answer, and one action in the thumb's reach. */
@@ -44,14 +48,13 @@ import { StepHistory } from './step-history';
   selector: 'app-step-sheet',
   imports: [
     AnswerView,
-    CautionNote,
-    CdkStepperModule,
-    DateTimeOf,
-    MatButtonModule,
+    EntryStamp,
     MatIconModule,
     NgComponentOutlet,
     NotApplicable,
     PhotoViewer,
+    StepFooter,
+    StepGuidance,
     StepHistory,
     TextOf,
     TranslocoPipe,
@@ -68,19 +71,27 @@ export class StepSheet implements OnInit {
   readonly count = input.required<number>();
   /** Whether nothing may be recorded here any more, because the sequence is approved. */
   readonly isClosed = input(false);
-  readonly refused = input<readonly OutboxEntry[]>([]);
+  /** What was recorded here and the server doesn't take. */
+  readonly troubled = input<readonly OutboxEntry[]>([]);
+  /** Overrides that stand anywhere on the circuit: nobody signs before they are put back. */
+  readonly standing = input<readonly StepView[]>([]);
   /** The step is done: the page decides what comes next. */
   readonly goOn = output<void>();
   readonly goToReview = output<void>();
 
   private readonly store = inject(SequenceStore);
   private readonly photos = inject(LocalPhotos);
+  private readonly pause = inject(RecordPause);
+  private readonly language = readingLanguage();
   private readonly announcer = inject(LiveAnnouncer);
   private readonly words = inject(TranslocoService);
   private readonly me = inject(Session).me;
   private readonly heading = viewChild.required<ElementRef<HTMLElement>>('heading');
   protected readonly draft = inject(StepDraft);
   protected readonly isCorrecting = signal(false);
+  protected readonly isNotApplicableOpen = signal(false);
+  /** The answer about which the second look was asked for: the next tap records it. */
+  private readonly lookedAt = signal<Answer | null>(null);
   protected readonly isBusy = signal(false);
   protected readonly failure = signal<string | null>(null);
   /** Goes up when the step is asked anew, so that its component starts afresh. */
@@ -91,25 +102,28 @@ export class StepSheet implements OnInit {
   protected readonly section = computed(() =>
     this.detail().stepList.sections.find((section) => section.key === this.step().section),
   );
-  protected readonly isShown = computed(
-    () => this.isClosed() || showsRecorded(this.view(), this.isCorrecting()),
-  );
+  protected readonly mode = computed(() => sheetMode(this.view(), this.isCorrecting(), this.isClosed()));
   protected readonly component = computed(() => STEP_COMPONENTS[this.step().kind]);
-  protected readonly isLocal = computed(() => {
-    const { current } = this.view();
-    return !!current && isUnsent(current);
-  });
-  protected readonly photoUrl = computed(() => {
-    const awaited = this.detail().photos.filter((photo) => photo.state === 'awaited');
-    return this.photos.urlFor(this.detail().id, new Set(awaited.map((photo) => photo.sha256)));
-  });
-  protected readonly hasQuestion = computed(
-    () => this.draft.refusals().length === 0 && (this.draft.judgement()?.doubts.length ?? 0) > 0,
+  protected readonly photoUrl = computed(() =>
+    this.photos.urlFor(this.detail().id, arrivedPhotos(this.detail().photos)),
   );
-  protected readonly canRecord = computed(
-    () => this.draft.answer() !== null && this.draft.refusals().length === 0,
+  /** Key of the question that the next tap answers with yes; `null` until the first tap, and after any change. */
+  protected readonly question = computed(() => {
+    const look = secondLook(this.step().kind, this.draft.judgement());
+    return look && this.lookedAt() === this.draft.answer() ? `work.secondLook_${look}` : null;
+  });
+  protected readonly reason = computed(() =>
+    this.mode() === 'ask' ? whyNot(this.step().kind, this.draft, this.standing(), this.language()) : null,
   );
-  protected readonly action = computed(() => actionKey(this.view(), this.hasQuestion()));
+  protected readonly canAct = computed(
+    () => !this.isBusy() && this.reason() === null && (this.mode() !== 'ask' || this.draft.answer() !== null),
+  );
+  /** The box for "does not apply" brings its own button: a grey one beside it would only puzzle. */
+  protected readonly hasMain = computed(() => !this.isNotApplicableOpen() || this.canAct());
+  protected readonly action = computed(() =>
+    actionKey(this.step().kind, this.mode(), this.question() !== null),
+  );
+  protected readonly sourceText = sourceText;
   protected readonly unitSystem = computed(() => this.detail().stepList.facts.unitSystem);
 
   constructor() {
@@ -130,7 +144,16 @@ export class StepSheet implements OnInit {
     this.isCorrecting.set(true);
   }
 
-  protected async record(): Promise<void> {
+  protected act(): void {
+    if (this.pause.isOn) return;
+    if (this.mode() !== 'ask') this.goOn.emit();
+    else if (secondLook(this.step().kind, this.draft.judgement()) && this.question() === null) {
+      this.lookedAt.set(this.draft.answer());
+      this.pause.begin();
+    } else void this.record();
+  }
+
+  private async record(): Promise<void> {
     const answer = this.draft.answer();
     const judgement = this.draft.judgement();
     if (answer && judgement) await this.keep(() => this.store.record(this.view(), answer, judgement));
@@ -154,19 +177,21 @@ export class StepSheet implements OnInit {
   }
 
   private async keep(store: () => Promise<void>): Promise<void> {
-    if (this.isBusy()) return;
+    if (this.isBusy() || this.pause.isOn) return;
     this.isBusy.set(true);
+    this.pause.begin();
     this.failure.set(null);
     try {
       await store();
       this.draft.forget();
       this.isCorrecting.set(false);
       void this.announcer.announce(this.words.translate('work.announceRecorded'));
-      // An override that was set leaves the step open, and so does an answer that doesn't count: stay and show it.
+      this.isNotApplicableOpen.set(false);
+      // An answer that doesn't count leaves the step open: stay and show it.
       // The store has it already; this sheet's own input follows with the next rendering.
       const now = this.store.view()?.steps.find((view) => view.step.key === this.step().key);
-      if (now && showsRecorded(now, false)) this.goOn.emit();
-      else this.openDraft(now);
+      this.openDraft(now);
+      if (now && sheetMode(now, false, false) !== 'ask') this.goOn.emit();
     } catch (error) {
       this.failure.set(failureKey(error));
     } finally {
@@ -175,21 +200,19 @@ export class StepSheet implements OnInit {
   }
 
   private openDraft(view: StepView = this.view()): void {
-    const { id, stepList } = this.detail();
+    const { id, stepList, photos } = this.detail();
+    const whole = this.store.view();
     this.draft.open({
       sequenceId: id,
       step: this.step(),
       facts: stepList.facts,
       previous: startingAnswer(view),
+      isStanding: sheetMode(view, this.isCorrecting(), false) === 'standing',
+      record: () => void this.record(),
       personName: this.me()?.name ?? '',
+      arrivedPhotos: arrivedPhotos(photos),
+      photosElsewhere: whole ? photosElsewhere(whole, this.step().key) : new Map(),
     });
     this.round.update((round) => round + 1);
   }
-}
-
-/** Why recording itself failed, which only the phone can cause. */
-function failureKey(error: unknown): string {
-  if (error instanceof DOMException && error.name === 'QuotaExceededError') return 'work.phoneFull';
-  if (error instanceof Error && error.name === 'DomainFailure') return 'work.phoneUnknown';
-  return 'work.couldNotStore';
 }

@@ -11,17 +11,20 @@ import {
   type ElementRef,
 } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
+import { RouterLink } from '@angular/router';
 import { TranslocoPipe } from '@jsverse/transloco';
 import { DomainFailure } from '#shared/failures/failure';
 import type { SequenceView } from '#shared/sequences/sequence-view';
+import { QuantityOf } from '../../ui/quantity-of';
 import { TextOf } from '../../ui/text-of';
-import { reasonMissing } from './submit-summary';
+import { WantedLimits } from '../steps/wanted-limits';
+import { outsideRow, reasonMissing } from './submit-summary';
 import { SequenceStore } from './sequence-store';
 
 /** A look over the whole before it goes to a lead: what is missing, what stands, what lies outside. */
 @Component({
   selector: 'app-submit-sheet',
-  imports: [MatButtonModule, TextOf, TranslocoPipe],
+  imports: [MatButtonModule, QuantityOf, RouterLink, TextOf, TranslocoPipe, WantedLimits],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './submit-sheet.html',
   styleUrl: './submit-sheet.scss',
@@ -35,13 +38,16 @@ export class SubmitSheet {
   protected readonly isBusy = signal(false);
   protected readonly hasFailed = signal(false);
   protected readonly unsent = this.store.unsentCount;
+  protected readonly unitSystem = computed(() => this.store.detail()?.stepList.facts.unitSystem ?? 'si');
   protected readonly state = computed(() => this.view().fold.state);
-  protected readonly isPending = computed(() => this.view().fold.pending !== null);
+  protected readonly isPending = computed(() => this.view().fold.pending.length > 0);
   protected readonly missing = computed(() =>
     this.view().missing.map((step) => ({ step, reason: reasonMissing(this.view(), step.key) })),
   );
   protected readonly outside = computed(() =>
-    this.view().steps.filter(({ fold }) => fold?.outcome === 'outside'),
+    this.view()
+      .steps.filter(({ fold }) => fold?.outcome === 'outside')
+      .map(outsideRow),
   );
   protected readonly notApplicable = computed(
     () => this.view().steps.filter(({ fold }) => fold?.outcome === 'notApplicable').length,

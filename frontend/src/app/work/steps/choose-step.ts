@@ -1,11 +1,12 @@
 import { ChangeDetectionStrategy, Component, effect, inject } from '@angular/core';
+import { OutcomeMark } from '../../ui/outcome-mark/outcome-mark';
 import { TextOf } from '../../ui/text-of';
 import { StepDraft } from './step-draft';
 
 /** One of a few findings, each a row that a thumb in a glove can hit. */
 @Component({
   selector: 'app-choose-step',
-  imports: [TextOf],
+  imports: [OutcomeMark, TextOf],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <fieldset>
@@ -20,6 +21,9 @@ import { StepDraft } from './step-draft';
             (change)="typed.set({ value: option.value })"
           />
           <span>{{ option.label | appText }}</span>
+          @if (typed().value === option.value && option.outcome !== 'recorded') {
+            <app-outcome-mark [outcome]="option.outcome" />
+          }
         </label>
       }
     </fieldset>
@@ -34,7 +38,7 @@ export class ChooseStep {
   constructor() {
     effect(() => {
       const { value } = this.typed();
-      this.draft.propose(value === '' ? null : { kind: 'choose', value });
+      this.draft.propose(value === '' ? null : { kind: 'choose', value }, 'choice');
     });
   }
 }

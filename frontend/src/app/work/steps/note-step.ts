@@ -22,7 +22,7 @@ export class NoteStep {
   constructor() {
     effect(() => {
       const text = this.typed().text.trim();
-      this.draft.propose(text === '' ? null : { kind: 'note', text });
+      this.draft.propose(text === '' ? null : { kind: 'note', text }, 'words');
     });
   }
 

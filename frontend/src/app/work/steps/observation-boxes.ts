@@ -7,7 +7,10 @@ import type { TypedObservation } from './superheat-typed';
 
 const VALVES = ['steady', 'hunting'] as const;
 
-/** One look at a coil: whether the valve holds still, and the pair or two that this takes. */
+/**
+ * One look at a coil, the only one on the page at a time: its radio buttons keep one name, because buttons that change
+ * theirs lose which of them is checked. Whether the valve holds still, and the pair or two that this takes.
+ */
 @Component({
   selector: 'app-observation-boxes',
   imports: [PairBoxes, TranslocoPipe],
@@ -20,7 +23,7 @@ const VALVES = ['steady', 'hunting'] as const;
           <label>
             <input
               type="radio"
-              [name]="'valve-' + name()"
+              name="valve"
               [checked]="observation().valve === valve"
               (change)="change({ valve })"
             />
@@ -56,8 +59,6 @@ const VALVES = ['steady', 'hunting'] as const;
   styleUrl: './segments.scss',
 })
 export class ObservationBoxes {
-  /** Tells the radio buttons of two observations on one page apart. */
-  readonly name = input.required<string>();
   readonly step = input.required<SuperheatStep>();
   readonly facts = input.required<SequenceFacts>();
   readonly observation = model.required<TypedObservation>();

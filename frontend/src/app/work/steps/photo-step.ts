@@ -1,17 +1,20 @@
 import { ChangeDetectionStrategy, Component, effect, inject, signal } from '@angular/core';
 import { MatIconModule } from '@angular/material/icon';
 import { TranslocoPipe } from '@jsverse/transloco';
+import type { PhotoRef } from '#shared/checklist/kinds/photo';
+import type { Text } from '#shared/checklist/text';
 import type { LocalPhoto } from '../../offline/local-database';
 import { PhotoShrinker, type ShrunkPhoto } from '../../offline/photo-shrinker';
 import type { PhotoRefusal } from '../../offline/photo-size';
 import { Session } from '../../session/session';
+import { TextOf } from '../../ui/text-of';
 import { PhotoTray } from './photo-tray';
 import { StepDraft } from './step-draft';
 
 /** Photos as evidence: by the camera or out of the roll, shrunk on the phone, looked at before they are recorded. */
 @Component({
   selector: 'app-photo-step',
-  imports: [MatIconModule, TranslocoPipe],
+  imports: [MatIconModule, TextOf, TranslocoPipe],
   providers: [PhotoTray],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './photo-step.html',
@@ -28,11 +31,12 @@ export class PhotoStep {
 
   constructor() {
     const me = this.me();
-    const { sequenceId, step } = this.draft.current;
-    if (me) void this.tray.open(me.id, sequenceId, step.key, this.draft.previousOf('photo')?.photos ?? []);
+    const { sequenceId, step, arrivedPhotos } = this.draft.current;
+    const recorded = this.draft.previousOf('photo')?.photos ?? [];
+    if (me) void this.tray.open(me.id, sequenceId, step.key, recorded, arrivedPhotos);
     effect(() => {
       const photos = this.tray.photos().map((photo) => photo.ref);
-      this.draft.propose(photos.length === 0 ? null : { kind: 'photo', photos });
+      this.draft.propose(photos.length === 0 ? null : { kind: 'photo', photos }, 'photo');
     });
   }
 
@@ -43,6 +47,12 @@ export class PhotoStep {
     box.value = '';
     this.problem.set(null);
     for (const file of files) await this.takeOne(file);
+  }
+
+  /** The title of another step of this circuit that the picture stands on already. */
+  protected elsewhere({ sha256, originalSha256 }: PhotoRef): Text | null {
+    const known = this.draft.current.photosElsewhere;
+    return known.get(sha256) ?? known.get(originalSha256 ?? '') ?? null;
   }
 
   protected remove(sha256: string): Promise<void> {

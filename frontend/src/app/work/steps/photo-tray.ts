@@ -1,6 +1,7 @@
 import { DestroyRef, inject, Injectable, signal } from '@angular/core';
 import type { PhotoRef } from '#shared/checklist/kinds/photo';
 import type { PersonId, SequenceId } from '#shared/plant/ids';
+import { NOTHING_YET } from '../photo-placeholder';
 import type { LocalPhoto } from '../../offline/local-database';
 import { Outbox } from '../../offline/outbox';
 import { OutboxStorage } from '../../offline/outbox-storage';
@@ -31,21 +32,27 @@ export class PhotoTray {
     inject(DestroyRef).onDestroy(() => this.inTray().forEach((photo) => URL.revokeObjectURL(photo.url)));
   }
 
-  /** Takes up drafts that were left here, and the photos of the answer that is about to be corrected. */
+  /**
+   * Takes up drafts that were left here, and the photos of the answer that is about to be corrected.
+   *
+   * @param arrived hashes of the photos that the server can show
+   */
   async open(
     personId: PersonId,
     sequenceId: SequenceId,
     stepKey: string,
     recorded: readonly PhotoRef[],
+    arrived: ReadonlySet<string>,
   ): Promise<void> {
     const drafts = await this.storage.photos(personId, 'draft');
     const mine = drafts.filter((photo) => photo.sequenceId === sequenceId && photo.stepKey === stepKey);
     const before = await Promise.all(
       recorded.map(async (ref): Promise<TrayPhoto> => {
         const local = await this.storage.photo(sequenceId, ref.sha256);
-        return local
-          ? shown(local)
-          : { ref, url: `/api/sequences/${sequenceId}/photos/${ref.sha256}?size=thumbnail`, state: 'sent' };
+        if (local) return shown(local);
+        const url = `/api/sequences/${sequenceId}/photos/${ref.sha256}?size=thumbnail`;
+        // One that hasn't arrived from another phone can't be shown, and asking for it would only fail.
+        return { ref, url: arrived.has(ref.sha256) ? url : NOTHING_YET, state: 'sent' };
       }),
     );
     this.inTray.set([...before, ...mine.map(shown)]);

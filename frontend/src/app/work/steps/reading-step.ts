@@ -6,13 +6,20 @@ import { LiveJudgement } from './live-judgement';
 import { QuantityBox } from './quantity-box';
 import { StepDraft } from './step-draft';
 import { typedOrNull } from './typed-text';
+import { WantedLimits } from './wanted-limits';
 
 /** One value, judged while it is typed. */
 @Component({
   selector: 'app-reading-step',
-  imports: [LiveJudgement, QuantityBox, TextOf, TranslocoPipe],
+  imports: [LiveJudgement, QuantityBox, TextOf, TranslocoPipe, WantedLimits],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
+    <app-wanted-limits
+      [low]="step.limits.low"
+      [high]="step.limits.high"
+      [dimension]="step.dimension"
+      [unitSystem]="draft.unitSystem"
+    />
     <app-quantity-box
       size="large"
       describedBy="reading-judged"
@@ -29,7 +36,7 @@ import { typedOrNull } from './typed-text';
       [label]="step.title | appText"
     />
   `,
-  styles: ':host { display: grid; grid-template-columns: minmax(0, 1fr); gap: var(--app-space-4); }',
+  styles: ':host { display: grid; grid-template-columns: minmax(0, 1fr); gap: var(--app-space-3); }',
 })
 export class ReadingStep {
   protected readonly draft = inject(StepDraft);
@@ -40,7 +47,7 @@ export class ReadingStep {
     effect(() => {
       const unit = displayUnit(this.step.dimension, this.draft.unitSystem);
       const value = typedOrNull(this.typed().text, unit);
-      this.draft.propose(value && { kind: 'reading', value });
+      this.draft.propose(value && { kind: 'reading', value }, 'reading');
     });
   }
 }

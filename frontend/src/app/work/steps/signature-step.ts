@@ -29,7 +29,7 @@ export class SignatureStep {
   constructor() {
     effect(() => {
       const signature = this.signature();
-      this.draft.propose(signature && { kind: 'signature', signature });
+      this.draft.propose(signature && { kind: 'signature', signature }, 'signature');
     });
   }
 }

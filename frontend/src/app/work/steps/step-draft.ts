@@ -1,11 +1,13 @@
 import { computed, effect, inject, Injectable, signal, type WritableSignal } from '@angular/core';
 import type { SequenceFacts } from '#shared/checklist/facts';
 import { judge } from '#shared/checklist/judge';
+import type { Text } from '#shared/checklist/text';
 import type { Answer, AnswerOf, Step, StepKind, StepOf } from '#shared/checklist/step';
 import { Bug } from '#shared/failures/failure';
 import type { SequenceId } from '#shared/plant/ids';
 import type { UnitSystem } from '#shared/units/unit-system';
 import { DraftKeeper } from './draft-keeper';
+import type { Lacking } from './lacking';
 
 export interface OpenStep {
   readonly sequenceId: SequenceId;
@@ -13,7 +15,15 @@ export interface OpenStep {
   readonly facts: SequenceFacts;
   /** The answer that counts now, when it is about to be corrected. */
   readonly previous: Answer | null;
+  /** Whether an override was set here and waits to be put back. */
+  readonly isStanding: boolean;
+  /** Records what was proposed; for a step with a button of its own. */
+  readonly record: () => void;
   readonly personName: string;
+  /** Hashes of the photos that the server can show. */
+  readonly arrivedPhotos: ReadonlySet<string>;
+  /** Titles of the other steps of the circuit that pictures stand on, by the pictures' hashes. */
+  readonly photosElsewhere: ReadonlyMap<string, Text>;
 }
 
 /**
@@ -26,8 +36,11 @@ export class StepDraft {
   private readonly opened = signal<OpenStep | null>(null);
   private readonly typed = signal<{ form: WritableSignal<unknown>; initial: unknown } | null>(null);
   private readonly made = signal<Answer | null>(null);
+  private readonly missing = signal<Lacking | null>(null);
 
   readonly answer = this.made.asReadonly();
+  /** What there has to be before there is an answer; `null` when there is one. */
+  readonly lacking = computed(() => (this.made() ? null : this.missing()));
   readonly judgement = computed(() => {
     const answer = this.made();
     const open = this.opened();
@@ -51,6 +64,7 @@ export class StepDraft {
   open(step: OpenStep): void {
     this.typed.set(null);
     this.made.set(null);
+    this.missing.set(null);
     this.opened.set(step);
   }
 
@@ -87,9 +101,10 @@ export class StepDraft {
     return typed;
   }
 
-  /** Says what the answer is now; `null` while there is none. */
-  propose(answer: Answer | null): void {
+  /** Says what the answer is now; `null` while there is none, and then what it lacks. */
+  propose(answer: Answer | null, lacking: Lacking | null = null): void {
     this.made.set(answer);
+    this.missing.set(lacking);
   }
 
   /** Forgets what was typed, after it was recorded. */

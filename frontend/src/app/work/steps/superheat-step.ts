@@ -1,12 +1,18 @@
 import { ChangeDetectionStrategy, Component, computed, effect, inject, signal } from '@angular/core';
 import { TranslocoPipe } from '@jsverse/transloco';
-import { QuantityOf } from '../../ui/quantity-of';
 import { TextOf } from '../../ui/text-of';
 import { LiveJudgement } from './live-judgement';
 import { ObservationBoxes } from './observation-boxes';
 import { StepDraft } from './step-draft';
 import { liveObservation } from './superheat-live';
-import { isBlank, startSuperheat, superheatAnswerOf, type TypedObservation } from './superheat-typed';
+import {
+  isBlank,
+  startSuperheat,
+  superheatAnswerOf,
+  superheatLacks,
+  type TypedObservation,
+} from './superheat-typed';
+import { WantedLimits } from './wanted-limits';
 
 const LOOKS = ['asFound', 'asLeft'] as const;
 type Look = (typeof LOOKS)[number];
@@ -14,7 +20,7 @@ type Look = (typeof LOOKS)[number];
 /** Superheat of one coil, before and after the valve was touched. Saturation is worked out, never looked up by hand. */
 @Component({
   selector: 'app-superheat-step',
-  imports: [LiveJudgement, ObservationBoxes, QuantityOf, TextOf, TranslocoPipe],
+  imports: [LiveJudgement, ObservationBoxes, TextOf, TranslocoPipe, WantedLimits],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './superheat-step.html',
   styleUrl: './segments.scss',
@@ -36,7 +42,10 @@ export class SuperheatStep {
   );
 
   constructor() {
-    effect(() => this.draft.propose(superheatAnswerOf(this.typed(), this.draft.unitSystem)));
+    effect(() => {
+      const typed = this.typed();
+      this.draft.propose(superheatAnswerOf(typed, this.draft.unitSystem), superheatLacks(typed));
+    });
   }
 
   protected change(observation: TypedObservation): void {

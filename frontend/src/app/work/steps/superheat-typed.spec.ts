@@ -1,7 +1,7 @@
 import { describe, expect, it } from '@jest/globals';
 import type { SuperheatStep } from '#shared/checklist/kinds/superheat';
 import { liveObservation, livePair } from './superheat-live';
-import { startSuperheat, superheatAnswerOf, type TypedObservation } from './superheat-typed';
+import { startSuperheat, superheatAnswerOf, superheatLacks, type TypedObservation } from './superheat-typed';
 
 const blank = startSuperheat(null).asLeft;
 const steady = (pressure: string, temperature: string): TypedObservation => ({
@@ -40,6 +40,18 @@ describe('superheatAnswerOf', () => {
       },
     };
     expect(startSuperheat(superheatAnswerOf(typed, 'us'))).toEqual(typed);
+  });
+});
+
+describe('superheatLacks', () => {
+  it.each([
+    ['asLeft', steady('14', '2'), blank],
+    ['asFoundTemperature', steady('14', ''), blank],
+    ['asLeftTemperature', blank, steady('14', '')],
+    ['asLeftPressure', steady('14', '2'), steady('', '2')],
+    [null, blank, steady('14', '2')],
+  ])('is %p', (lacking, asFound, asLeft) => {
+    expect(superheatLacks({ asFound, asLeft })).toBe(lacking);
   });
 });
 

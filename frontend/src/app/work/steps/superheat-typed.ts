@@ -1,5 +1,6 @@
 import type { SuperheatAnswer, SuperheatObservation, SuperheatPair } from '#shared/checklist/kinds/superheat';
 import { displayUnit, type UnitSystem } from '#shared/units/unit-system';
+import type { Lacking } from './lacking';
 import { typedOrNull } from './typed-text';
 
 /** Two boxes of one pair, as texts. */
@@ -63,6 +64,20 @@ export function observationOf(typed: TypedObservation, system: UnitSystem): Supe
   const low = pairOf(typed.low, system);
   const high = pairOf(typed.high, system);
   return low && high && { valve: 'hunting', low, high };
+}
+
+/** What still has to be typed before there is an answer; `null` when nothing has. */
+export function superheatLacks(typed: TypedSuperheat): Lacking | null {
+  if (isBlank(typed.asLeft)) return lackOf(typed.asFound, 'asFound') ?? 'asLeft';
+  return lackOf(typed.asFound, 'asFound') ?? lackOf(typed.asLeft, 'asLeft');
+}
+
+function lackOf(typed: TypedObservation, look: 'asFound' | 'asLeft'): Lacking | null {
+  if (isBlank(typed)) return null;
+  const pairs = typed.valve === 'steady' ? [typed.pair] : [typed.low, typed.high];
+  const isEmpty = (text: string): boolean => typedOrNull(text, 'degF') === null;
+  if (pairs.some((pair) => isEmpty(pair.pressure))) return `${look}Pressure`;
+  return pairs.some((pair) => isEmpty(pair.temperature)) ? `${look}Temperature` : null;
 }
 
 /**

@@ -1,0 +1,14 @@
+/** What an answer in the making lacks: the end of a key of the words. */
+export const LACKINGS = [
+  'reading',
+  'choice',
+  'photo',
+  'words',
+  'signature',
+  'asLeft',
+  'asLeftPressure',
+  'asLeftTemperature',
+  'asFoundPressure',
+  'asFoundTemperature',
+] as const;
+export type Lacking = (typeof LACKINGS)[number];
