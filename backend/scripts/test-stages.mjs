@@ -50,6 +50,8 @@ export async function runJest(extra, environment, temporary) {
       '--config',
       'jest.config.cjs',
       '--json',
+      // A timer or socket left open in one library must not keep a finished run from ending.
+      '--forceExit',
       `--outputFile=${outputFile}`,
       ...(hasWorkers ? [] : ['--maxWorkers=2']),
       ...extra,

@@ -7,20 +7,34 @@ import { runTool } from '../processes.mjs';
 
 const NAME = 'empty-page';
 
-const MAIN = `import { ChangeDetectionStrategy, Component, provideZonelessChangeDetection } from '@angular/core';
+const MAIN = `import { provideHttpClient } from '@angular/common/http';
+import { ChangeDetectionStrategy, Component, provideZonelessChangeDetection } from '@angular/core';
 import { bootstrapApplication } from '@angular/platform-browser';
 import { MatButton } from '@angular/material/button';
+import { MatIcon } from '@angular/material/icon';
 import { MatToolbar } from '@angular/material/toolbar';
+import { provideRouter, RouterOutlet } from '@angular/router';
+
+@Component({
+  selector: 'app-page',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  imports: [MatButton, MatIcon],
+  template: '<button matButton="filled" type="button"><mat-icon svgIcon="press" />Press</button>',
+})
+class Page {}
 
 @Component({
   selector: 'app-root',
   changeDetection: ChangeDetectionStrategy.OnPush,
-  imports: [MatButton, MatToolbar],
-  template: '<mat-toolbar>Empty</mat-toolbar><button matButton="filled" type="button">Press</button>',
+  imports: [MatToolbar, RouterOutlet],
+  template: '<mat-toolbar>Empty</mat-toolbar><router-outlet />',
 })
 class App {}
 
-void bootstrapApplication(App, { providers: [provideZonelessChangeDetection()] });
+const routes = [{ path: '**', component: Page }];
+void bootstrapApplication(App, {
+  providers: [provideZonelessChangeDetection(), provideRouter(routes), provideHttpClient()],
+});
 `;
 
 const STYLES = `@use '@angular/material' as mat;
@@ -38,8 +52,8 @@ const INDEX =
   '<!doctype html><html lang="en"><head><meta charset="utf-8"><title>Empty</title><base href="/"></head><body><app-root></app-root></body></html>\n';
 
 /**
- * Builds the smallest page with Angular and Material (a toolbar and a button under the product's theme call)
- * with the product's own builder and options: what nobody who uses these libraries gets below.
+ * Builds an empty page of an application with Angular and Material: router, HTTP client, a toolbar, a button and an icon
+ * under the product's theme call, with the product's own builder and options. Nobody who uses these gets below.
  * @param {import('../shutdown.mjs').Shutdown} shutdown
  * @returns {Promise<string>} the folder with its index.html and brotli twins; removed at the end
  */

@@ -39,7 +39,7 @@ export const SPANISH: DocumentWords = {
   columns: {
     circuit: 'Circuito',
     description: 'Descripción',
-    area: 'Zona',
+    area: 'Área',
     state: 'Estado',
     page: 'Página',
     fixture: 'Equipo',
@@ -60,7 +60,7 @@ export const SPANISH: DocumentWords = {
     refrigerant: 'Refrigerante',
     suctionGroup: 'Grupo de succión',
     suctionTemperature: 'Succión saturada',
-    area: 'Zona',
+    area: 'Área',
     temperatureClass: 'Temperatura',
     feed: 'Alimentación',
     control: 'Control',
