@@ -71,7 +71,24 @@ export class InstallerHands {
       superheatExcessK,
     });
     await this.enter(step, answer);
-    await this.page.locator('app-step-sheet footer button.main').click();
+    if (answer.kind === 'override')
+      await this.page.getByRole('button', { name: 'I have put it back' }).click();
+    else await this.record();
+  }
+
+  /** The button rests for a moment after each recording, and asks first about what lies outside. */
+  private async record(): Promise<void> {
+    const action = this.page.locator('app-step-sheet footer button.main');
+    await this.page.waitForTimeout(700);
+    await action.click();
+    const question = this.page.locator('app-step-sheet footer .question');
+    const asks = await question.waitFor({ timeout: 300 }).then(
+      () => true,
+      () => false,
+    );
+    if (!asks) return;
+    await this.page.waitForTimeout(700);
+    await action.click();
   }
 
   private async isAtStep(): Promise<boolean> {
@@ -142,17 +159,14 @@ export class InstallerHands {
   }
 
   private async setOverride(): Promise<void> {
-    const action = this.page.locator('app-step-sheet footer button.main');
-    if ((await action.innerText()) !== 'Record: put by hand') return;
+    const putBack = this.page.getByRole('button', { name: 'I have put it back' });
+    if (await putBack.isVisible()) return;
     const key = this.currentStep().key;
-    await action.click();
+    await this.record();
     // The stepper goes on to other work while it stands; come back to put it back.
-    await this.page
-      .waitForFunction((at) => new URL(document.URL).searchParams.get('at') !== at, key)
-      .catch(() => undefined);
-    const back = new URL(this.page.url());
-    back.searchParams.set('at', key);
-    await this.page.goto(back.toString());
-    await this.page.getByRole('button', { name: 'Record: put back' }).waitFor();
+    await this.page.waitForFunction((at) => new URL(document.URL).searchParams.get('at') !== at, key);
+    await this.page.getByRole('button', { name: 'Still set' }).click();
+    await putBack.waitFor();
+    await this.page.waitForTimeout(700);
   }
 }

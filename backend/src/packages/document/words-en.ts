@@ -224,10 +224,10 @@ export const ENGLISH: DocumentWords = {
     howTo: 'How to check',
     steps: [
       'Compare the fingerprint above with the one in the message that announced this package. They must be the same.',
-      'Open the archive that was issued with this package. Its manifest is signed with that key (Ed25519), and lists the hashes of this document and of every file.',
-      'For each circuit, take its entries in order of position. The hash of an entry’s body is the SHA-256 of its canonical JSON (RFC 8785). The hash of the entry is the SHA-256 of three lines joined by line feeds: the previous entry’s hash, the body’s hash, and the canonical JSON of what the server added. The first entry’s previous hash is 64 zeros.',
+      'Work out the SHA-256 of this file. It must be the one in that message, which is also shown on this package’s page; the installation signed it, and each approval, with that key (Ed25519).',
+      'For each circuit, the installation holds its entries in order of position. The hash of an entry’s body is the SHA-256 of its canonical JSON (RFC 8785). The hash of the entry is the SHA-256 of three lines joined by line feeds: the previous entry’s hash, the body’s hash, and the canonical JSON of what the server added. The first entry’s previous hash is 64 zeros.',
       'The hash that you reach at the approved entry must be the one in the table below.',
-      'The 12 digits under a photo begin the SHA-256 of its file as the phone sent it. The archive holds those files; the pictures printed here are smaller copies.',
+      'The 12 digits under a photo begin the SHA-256 of its file as the phone sent it. The installation holds those files; the pictures printed here are smaller copies.',
     ],
   },
 };

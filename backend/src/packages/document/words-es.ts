@@ -223,10 +223,10 @@ export const SPANISH: DocumentWords = {
     howTo: 'Cómo comprobar',
     steps: [
       'Compare la huella de arriba con la del mensaje que anunció este paquete. Deben ser iguales.',
-      'Abra el archivo emitido con este paquete. Su manifiesto está firmado con esa clave (Ed25519) y contiene los hashes de este documento y de cada archivo.',
-      'De cada circuito, tome sus registros por orden de posición. El hash del cuerpo es el SHA-256 de su JSON canónico (RFC 8785). El hash del registro es el SHA-256 de tres líneas unidas por saltos de línea: el hash del registro anterior, el hash del cuerpo y el JSON canónico de lo que añadió el servidor. El hash anterior del primer registro son 64 ceros.',
+      'Calcule el SHA-256 de este archivo. Debe ser el de ese mensaje, que también aparece en la página de este paquete; la instalación lo firmó, al igual que cada aprobación, con esa clave (Ed25519).',
+      'De cada circuito, la instalación guarda sus registros por orden de posición. El hash del cuerpo es el SHA-256 de su JSON canónico (RFC 8785). El hash del registro es el SHA-256 de tres líneas unidas por saltos de línea: el hash del registro anterior, el hash del cuerpo y el JSON canónico de lo que añadió el servidor. El hash anterior del primer registro son 64 ceros.',
       'El hash al que llega en el registro aprobado debe ser el de la tabla que sigue.',
-      'Los 12 dígitos bajo una foto son el comienzo del SHA-256 de su archivo tal como lo envió el teléfono. El archivo contiene esas fotos; las impresas aquí son copias más pequeñas.',
+      'Los 12 dígitos bajo una foto son el comienzo del SHA-256 de su archivo tal como lo envió el teléfono. La instalación guarda esas fotos; las impresas aquí son copias más pequeñas.',
     ],
   },
 };

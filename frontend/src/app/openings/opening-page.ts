@@ -18,6 +18,7 @@ import { OfflineNote } from '../ui/notes/offline-note';
 import { ProblemNote } from '../ui/notes/problem-note';
 import { DaysLeft } from '../ui/pages/days-left';
 import { lastRead } from '../ui/pages/last-read';
+import { countedKey } from '../ui/words/counted';
 import { QuantityOf } from '../ui/quantity-of';
 import { circuitTotal, stateCounts } from './opening-counts';
 import { systemLines } from './system-lines';
@@ -50,6 +51,7 @@ export class OpeningPage {
   private readonly session = inject(Session);
   private readonly router = inject(Router);
   protected readonly online = inject(Connectivity).online;
+  protected readonly countedKey = countedKey;
 
   protected readonly detail = resource({
     params: () => this.openingId(),

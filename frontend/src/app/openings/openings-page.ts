@@ -15,6 +15,7 @@ import { OfflineNote } from '../ui/notes/offline-note';
 import { ProblemNote } from '../ui/notes/problem-note';
 import { DaysLeft } from '../ui/pages/days-left';
 import { lastRead } from '../ui/pages/last-read';
+import { countedKey } from '../ui/words/counted';
 import { dayOf } from '../ui/words/dates';
 import { circuitTotal, lineOfCounts, stateCounts } from './opening-counts';
 import { orderOpenings } from './opening-order';
@@ -43,6 +44,7 @@ export class OpeningsPage {
   private readonly api = inject(OpeningsApi);
   private readonly session = inject(Session);
   protected readonly online = inject(Connectivity).online;
+  protected readonly countedKey = countedKey;
 
   protected readonly list = resource({ loader: () => this.api.openings() });
   protected readonly read = lastRead(this.list);

@@ -5,12 +5,11 @@ import type { FoldEntry } from '#shared/sequences/fold';
 import { DateTimeOf } from '../../ui/date-time-of';
 import { lateArrival } from './late-arrival';
 import { isUnsent } from './local-view';
-import { ZoneName } from './zone-name';
 
 /** Who recorded an entry and when, on the store's clock; where it is; and that it came late, if it did. */
 @Component({
   selector: 'app-entry-stamp',
-  imports: [DateTimeOf, MatIconModule, TranslocoPipe, ZoneName],
+  imports: [DateTimeOf, MatIconModule, TranslocoPipe],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     @let at = entry().body.deviceTime;
@@ -20,16 +19,12 @@ import { ZoneName } from './zone-name';
         {{ (isLocal() ? 'work.onThisPhone' : 'work.onTheServer') | transloco }} ·
       }
       {{ name() }} ·
-      <time class="figures" [attr.datetime]="at"
-        >{{ at | appDateTime: timeZone() }} {{ at | appZoneName: timeZone() }}</time
-      >
+      <time class="figures" [attr.datetime]="at">{{ at | appDateTime: timeZone() }}</time>
     </p>
     @if (late(); as arrived) {
       <p>
         {{ 'work.arrivedLater' | transloco }}
-        <time class="figures" [attr.datetime]="arrived"
-          >{{ arrived | appDateTime: timeZone() }} {{ arrived | appZoneName: timeZone() }}</time
-        >
+        <time class="figures" [attr.datetime]="arrived">{{ arrived | appDateTime: timeZone() }}</time>
       </p>
     }
   `,

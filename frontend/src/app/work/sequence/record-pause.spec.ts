@@ -3,8 +3,8 @@ import { afterEach, beforeEach, describe, expect, it, jest } from '@jest/globals
 import { RecordPause } from './record-pause';
 
 describe('RecordPause', () => {
-  beforeEach(() => jest.useFakeTimers());
-  afterEach(() => jest.useRealTimers());
+  beforeEach(() => void jest.useFakeTimers());
+  afterEach(() => void jest.useRealTimers());
 
   it('lasts 600 ms from the last recording', () => {
     TestBed.configureTestingModule({ providers: [RecordPause] });

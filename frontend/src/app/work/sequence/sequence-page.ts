@@ -29,7 +29,6 @@ import { StepOverview } from './step-overview';
 import { StepRun } from './step-run';
 import { StepSheet } from './step-sheet';
 import { SubmitSheet } from './submit-sheet';
-import { ZoneName } from './zone-name';
 
 /** The two places of a sequence that aren't steps; step keys can't be these, they hold a colon or a dot. */
 const OVERVIEW = 'overview';
@@ -53,7 +52,6 @@ const SUBMIT = 'submit';
     StepSheet,
     SubmitSheet,
     TranslocoPipe,
-    ZoneName,
   ],
   providers: [SequenceStore, LocalPhotos, RecordPause],
   changeDetection: ChangeDetectionStrategy.OnPush,

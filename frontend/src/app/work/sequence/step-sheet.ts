@@ -27,6 +27,7 @@ import { Session } from '../../session/session';
 import { AnswerView } from '../../ui/answer-view/answer-view';
 import { TextOf } from '../../ui/text-of';
 import { readingLanguage } from '../../ui/words/reading-language';
+import { SourceOf } from '../../ui/words/source-of';
 import { STEP_COMPONENTS } from '../steps/step-components';
 import { StepDraft } from '../steps/step-draft';
 import { EntryStamp } from './entry-stamp';
@@ -37,7 +38,6 @@ import { photosElsewhere } from './photos-elsewhere';
 import { RecordPause } from './record-pause';
 import { failureKey, whyNot } from './record-problem';
 import { SequenceStore } from './sequence-store';
-import { sourceText } from './source-text';
 import { actionKey, secondLook, sheetMode, startingAnswer } from './step-action';
 import { StepFooter } from './step-footer';
 import { StepGuidance } from './step-guidance';
@@ -53,6 +53,7 @@ import { StepHistory } from './step-history';
     NgComponentOutlet,
     NotApplicable,
     PhotoViewer,
+    SourceOf,
     StepFooter,
     StepGuidance,
     StepHistory,
@@ -123,7 +124,6 @@ export class StepSheet implements OnInit {
   protected readonly action = computed(() =>
     actionKey(this.step().kind, this.mode(), this.question() !== null),
   );
-  protected readonly sourceText = sourceText;
   protected readonly unitSystem = computed(() => this.detail().stepList.facts.unitSystem);
 
   constructor() {

@@ -17,7 +17,7 @@ const VALVES = ['steady', 'hunting'] as const;
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <fieldset class="valve">
-      <legend>{{ 'work.valve' | transloco }}</legend>
+      <legend class="heard-only">{{ 'work.valve' | transloco }}</legend>
       <div>
         @for (valve of valves; track valve) {
           <label>
