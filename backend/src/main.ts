@@ -1,7 +1,7 @@
 import { createServer as createHttpServer, type Server } from 'node:http';
 import { createServer as createHttpsServer } from 'node:https';
 import { readFileSync } from 'node:fs';
-import { pino } from 'pino';
+import { createLogger } from './app/logger';
 import { DomainFailure } from '#shared/failures/failure';
 import { readConfig, type Config } from './app/config';
 import { createApp } from './app/express-app';
@@ -16,7 +16,7 @@ const POOL_SIZE = 16;
 /** Migrates, fills in the demo where the database is empty, serves, and ends in order when told to. */
 async function main(): Promise<void> {
   const config = readConfig(process.env);
-  const logger = pino({ level: config.LOG_LEVEL });
+  const logger = createLogger(config.LOG_LEVEL);
   await migrate(config.ownerAccount, config.DATABASE_APP_USER, config.DATABASE_APP_HOST);
   const dataSource = createDataSource(config.appAccount, POOL_SIZE);
   await dataSource.initialize();

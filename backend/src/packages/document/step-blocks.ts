@@ -12,7 +12,7 @@ import { answerBlocks } from './answer-blocks';
 import { summarizeEntry } from './answer-summary';
 import { say } from './document-context';
 import { authorOf, judgedOf, whoAndWhen, type CircuitContext } from './judged-entry';
-import { sourceInWords } from './source-words';
+import { sourceInWords } from '#shared/checklist/source-words';
 
 const OUTCOME_ROOM = 150;
 

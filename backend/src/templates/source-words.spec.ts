@@ -1,9 +1,9 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import path from 'node:path';
 import { describe, expect, it } from '@jest/globals';
-import { sourceInWords } from './source-words';
+import { sourceInWords } from '#shared/checklist/source-words';
 
-const FOLDER = path.join(__dirname, '../../../../templates');
+const FOLDER = path.join(__dirname, '../../../templates');
 const sources = new Set(
   readdirSync(FOLDER)
     .filter((file) => file.endsWith('.yaml'))

@@ -1,4 +1,4 @@
-import type { Language } from '#shared/checklist/text';
+import type { Language } from './text';
 
 /** Where the templates' criteria come from, as they write it, in Spanish. Titles of publications stay as published. */
 const SPANISH: Readonly<Record<string, string>> = {
@@ -11,7 +11,7 @@ const SPANISH: Readonly<Record<string, string>> = {
     'Application and Field Recommendations (apéndice de manuales de vitrinas)',
 };
 
-/** The source of a criterion in the document's language; one that has no translation here stays as the template says it. */
+/** The source of a criterion in the reader's language; one that has no translation here stays as the template says it. */
 export function sourceInWords(source: string, language: Language): string {
   return language === 'es' ? (SPANISH[source] ?? source) : source;
 }
