@@ -1,4 +1,5 @@
 import type { Health } from '#shared/contracts/health';
+import { TemporaryFailure } from '#shared/failures/failure';
 
 /** One part that the product can't do without, and how to ask whether it answers. */
 export type Probe = () => Promise<unknown>;
@@ -21,7 +22,7 @@ export class HealthService {
 async function ask(probe: Probe): Promise<Health['parts']['database']> {
   let timer: NodeJS.Timeout | undefined;
   const late = new Promise<never>((_resolve, reject) => {
-    timer = setTimeout(() => reject(new DOMException('No answer in 3 seconds', 'TimeoutError')), TIMEOUT_MS);
+    timer = setTimeout(() => reject(new TemporaryFailure('No answer in 3 seconds')), TIMEOUT_MS);
   });
   try {
     await Promise.race([probe(), late]);
