@@ -20,6 +20,16 @@ export interface LineJoint {
   readonly state: JointState;
 }
 
+/** What a joint's state is called where a joint is a step: a step is done, only a circuit is approved. */
+const STEP_WORDS: Readonly<Record<JointState, string>> = {
+  open: 'stepOpen',
+  underWay: 'stepNotYet',
+  submitted: 'stepNotYet',
+  sentBack: 'stepAgain',
+  approved: 'stepDone',
+  noSequence: 'stepOpen',
+};
+
 /**
  * A run of copper pipe with one joint for each step or circuit; it wraps into several runs where there is little room.
  * One Tab stop: arrows, Home and End move along the line, Enter picks a joint. As `small`, or with `pickable` off, it is
@@ -39,6 +49,8 @@ export class CopperLine {
   readonly label = input.required<string>();
   /** Whether joints can be picked; left out, all lines but small ones can. */
   readonly pickable = input<boolean>();
+  /** What one joint stands for, which decides how its state is called. */
+  readonly of = input<'circuits' | 'steps'>('circuits');
   /** Index of the joint that the screen is at, if any. */
   readonly current = input<number | null>(null);
   readonly pick = output<number>();
@@ -56,8 +68,12 @@ export class CopperLine {
   /** The text alternative of the picture: how many joints stand where. */
   protected summary(t: (key: string) => string): string {
     return this.counts()
-      .map(({ state, count }) => `${count} ${t(`state_${state}`).toLowerCase()}`)
+      .map(({ state, count }) => `${count} ${t(this.wordOf(state)).toLowerCase()}`)
       .join(', ');
+  }
+
+  protected wordOf(state: JointState): string {
+    return this.of() === 'steps' ? STEP_WORDS[state] : `state_${state}`;
   }
 
   protected move(event: KeyboardEvent, from: number): void {

@@ -30,6 +30,7 @@ import { jointOf, markOf } from './step-order';
     </div>
     <app-copper-line
       size="medium"
+      of="steps"
       [label]="label()"
       [joints]="joints()"
       [pickable]="true"
