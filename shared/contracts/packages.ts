@@ -18,6 +18,7 @@ export const packageSchema = z.object({
   id: packageIdSchema,
   openingId: openingIdSchema,
   openingName: z.string(),
+  timeZone: z.string(),
   version: z.int(),
   language: z.enum(LANGUAGES),
   state: z.enum(PACKAGE_STATES),

@@ -8,6 +8,8 @@ export const queueItemSchema = z.object({
   circuitId: circuitIdSchema,
   openingId: openingIdSchema,
   openingName: z.string(),
+  /** Of the opening: times are told as they were on site. */
+  timeZone: z.string(),
   openingDate: z.iso.date(),
   code: z.string(),
   description: z.string(),

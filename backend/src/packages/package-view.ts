@@ -10,6 +10,7 @@ export function packageView(row: PackageRow, acceptance: AcceptanceRow | undefin
     id: row.id as PackageId,
     openingId: row.openingId as OpeningId,
     openingName: row.openingName,
+    timeZone: row.timeZone,
     version: row.version,
     language: row.language as Language,
     state: row.state as HandoverPackage['state'],

@@ -6,6 +6,7 @@ import type { PackageSnapshot, SnapshotCircuit } from './package-snapshot';
 
 export interface PackageRow extends PackageEntity {
   readonly openingName: string;
+  readonly timeZone: string;
   readonly createdByName: string;
 }
 
@@ -101,14 +102,16 @@ export class PackagesRepository {
       .innerJoin('opening', 'o', 'o.id = h.opening_id')
       .innerJoin('person', 'p', 'p.id = h.created_by')
       .addSelect('o.name', 'openingName')
+      .addSelect('o.time_zone', 'timeZone')
       .addSelect('p.name', 'createdByName')
       .where(where, parameters)
       .orderBy('h.version', 'DESC')
       .limit(200)
-      .getRawAndEntities<{ openingName: string; createdByName: string }>();
+      .getRawAndEntities<{ openingName: string; timeZone: string; createdByName: string }>();
     return entities.map((entity, index) => ({
       ...entity,
       openingName: raw[index]?.openingName ?? '',
+      timeZone: raw[index]?.timeZone ?? 'UTC',
       createdByName: raw[index]?.createdByName ?? '',
     }));
   }

@@ -28,12 +28,12 @@ import { DateTimeOf } from '../ui/date-time-of';
           @if (pack().acceptance; as acceptance) {
             <p class="accepted">
               {{ t('acceptedBy', { name: acceptance.personName }) }}
-              <span class="soft">{{ acceptance.signedAt | appDateTime }}</span>
+              <span class="soft">{{ acceptance.signedAt | appDateTime: pack().timeZone }}</span>
             </p>
           } @else {
             <p>
               {{ t('issued') }}
-              <span class="soft">{{ pack().issuedAt ?? '' | appDateTime }}</span>
+              <span class="soft">{{ pack().issuedAt ?? '' | appDateTime: pack().timeZone }}</span>
             </p>
           }
         }
