@@ -2,7 +2,6 @@ import * as z from 'zod/mini';
 import { stepListSchema } from '../checklist/step';
 import { openingIdSchema, personIdSchema, sequenceIdSchema, sha256Schema } from '../plant/ids';
 import { circuitSpecificationSchema } from '../plant/plant';
-import type { entryBodySchema } from '../sequences/entry';
 import { storedEntrySchema, STANDINGS } from '../sequences/entry';
 import { foldStateSchema } from '../sequences/fold-state';
 import { judgementSchema } from '../checklist/judgement';
@@ -55,7 +54,6 @@ export const entryResultSchema = z.discriminatedUnion('result', [
 ]);
 export type EntryResult = z.infer<typeof entryResultSchema>;
 export const entryBatchResponseSchema = z.object({ results: z.array(entryResultSchema) });
-export type EntryBatch = { entries: { body: z.infer<typeof entryBodySchema>; bodyHash: string }[] };
 
 export const photoStoredSchema = z.object({ sha256: sha256Schema, alreadyThere: z.boolean() });
 

@@ -63,6 +63,7 @@ export class Story {
       templateVersion: 1,
       specificationRevision: 1,
       stepListHash,
+      changedSteps: [],
     });
   }
 

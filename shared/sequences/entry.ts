@@ -51,6 +51,8 @@ export const entryContentSchema = z.discriminatedUnion('kind', [
     templateVersion: z.int(),
     specificationRevision: z.int(),
     stepListHash: sha256Schema,
+    /** Steps that ask or judge otherwise than before: what was recorded on them is asked again. */
+    changedSteps: z.array(stepKeySchema).check(z.maxLength(2000)),
   }),
   z.object({
     kind: z.literal('review'),

@@ -13,7 +13,7 @@ export const stepFoldSchema = z.object({
   overrideStanding: z.boolean(),
   /** Somebody answered without having seen an earlier answer: both are kept, the later counts, people are told. */
   answeredTwice: z.boolean(),
-  /** The review entry that asked for this step again, until it is answered anew. */
+  /** The review or expansion that asked for this step again, until it is answered anew. */
   reopenedBy: z.nullable(entryIdSchema),
 });
 export type StepFold = z.infer<typeof stepFoldSchema>;

@@ -1,5 +1,5 @@
 import type { Step } from '../checklist/step';
-import type { PersonId } from '../plant/ids';
+import type { EntryId, PersonId } from '../plant/ids';
 import { unreachable } from '../failures/unreachable';
 import { CHAIN_START } from './chain';
 import type { EntryBody, EntryContent, RestsOn, ServerPart } from './entry';
@@ -89,6 +89,7 @@ function applyContent(state: FoldState, entry: FoldEntry, content: EntryContent)
       return;
     case 'expansion':
       state.stepListHash = content.stepListHash;
+      reopen(state, content.changedSteps, entry.body.id);
       return;
     case 'review':
       applyReview(state, entry, content);
@@ -160,10 +161,20 @@ function applyReview(
   state.pending = [];
   state.approvedHead = content.verdict === 'approved' ? content.headHash : null;
   if (content.verdict !== 'sentBack') return;
+  reopen(
+    state,
+    content.remarks.map((remark) => remark.stepKey),
+    entry.body.id,
+  );
+}
+
+/** Asks steps again that have an answer; the others are open anyway. */
+function reopen(state: FoldState, keys: readonly string[], by: EntryId): void {
+  if (keys.length === 0) return;
   state.steps = { ...state.steps };
-  for (const remark of content.remarks) {
-    const fold = state.steps[remark.stepKey];
-    if (fold) state.steps[remark.stepKey] = { ...fold, reopenedBy: entry.body.id };
+  for (const key of keys) {
+    const fold = state.steps[key];
+    if (fold) state.steps[key] = { ...fold, reopenedBy: by };
   }
 }
 

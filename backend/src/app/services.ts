@@ -115,7 +115,7 @@ export function wireServices(config: Config, dataSource: DataSource, logger: Log
   const sequencesRepository = new SequencesRepository();
   const photosRepository = new PhotosRepository();
   const stepLists = new StepLists(sequencesRepository);
-  const expansion = new ExpansionService(templates, sequencesRepository);
+  const expansion = new ExpansionService(templates, sequencesRepository, stepLists, events);
   const schedules = new SchedulesService(transactions, openings, plant, expansion, audit, events);
   const entries = new EntriesService(transactions, sequencesRepository, stepLists, people, events);
   const sequences = new SequencesService(

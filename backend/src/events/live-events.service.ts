@@ -9,6 +9,8 @@ import type { LiveEventRow, LiveEventsRepository } from './live-events.repositor
 
 const POLL_MS = 400;
 const OVERLAP_S = 5;
+/** A little more than the longest that a client waits before it comes back. */
+const BREAK_S = 75;
 const KEEP_ALIVE_MS = 20_000;
 const MOST_STREAMS = 12;
 const MAX_STREAM_MS = 15 * 60_000;
@@ -40,7 +42,7 @@ export class LiveEventsService {
   }
 
   /** Keeps the response open and sends what the person may see. It ends by itself, so that rights are asked anew. */
-  async listen(person: Person, response: Response): Promise<void> {
+  async listen(person: Person, response: Response, isAgain = false): Promise<void> {
     response.writeHead(200, {
       'Content-Type': 'text/event-stream',
       'Cache-Control': 'no-store',
@@ -58,6 +60,7 @@ export class LiveEventsService {
     // The browser went away meanwhile: its 'close' won't come again.
     if (isGone) return;
     this.listeners.add(listener);
+    if (isAgain) await this.sayAgain(listener);
     this.timer ??= setInterval(() => void this.poll(), POLL_MS);
     const keepAlive = setInterval(() => response.write(': here\n\n'), KEEP_ALIVE_MS);
     const end = setTimeout(() => response.end(), MAX_STREAM_MS);
@@ -86,6 +89,11 @@ export class LiveEventsService {
     this.timer = null;
   }
 
+  /** To whoever comes back after a break: all of the last moments, twice rather than never. */
+  private async sayAgain(listener: Listener): Promise<void> {
+    for (const row of await this.events.findRecent(this.transactions.outside, BREAK_S)) sendTo(listener, row);
+  }
+
   /** What happened before the first listener came is not news. */
   private async remember(): Promise<void> {
     this.seen.clear();
@@ -110,14 +118,17 @@ export class LiveEventsService {
 
   private send(row: LiveEventRow): void {
     this.seen.set(row.id, Date.now());
-    const subject = { companyId: row.companyId as CompanyId, openingId: row.openingId as OpeningId };
-    for (const { person, response } of this.listeners) {
-      if (may(person, 'opening.read', subject)) response.write(`event: change\ndata: ${row.content}\n\n`);
-    }
+    for (const listener of this.listeners) sendTo(listener, row);
   }
 
   private forget(): void {
     const limit = Date.now() - 4 * OVERLAP_S * 1000;
     for (const [id, at] of this.seen) if (at < limit) this.seen.delete(id);
   }
+}
+
+/** Writes an event to whoever may see its opening. */
+function sendTo({ person, response }: Listener, row: LiveEventRow): void {
+  const subject = { companyId: row.companyId as CompanyId, openingId: row.openingId as OpeningId };
+  if (may(person, 'opening.read', subject)) response.write(`event: change\ndata: ${row.content}\n\n`);
 }

@@ -148,8 +148,8 @@ export class OpeningsService {
     assigneeId: PersonId | null,
   ): Promise<void> {
     await this.transactions.run(async (context) => {
-      const opening = await this.openings.find(context, openingId);
-      if (!opening) throw new DomainFailure('notFound', 'There is no such opening.');
+      // The opening's lock: an import that runs now would write the assignments back that it read before.
+      const opening = await this.lockForSchedule(context, openingId);
       if (assigneeId !== null) await this.checkAssignee(context, openingId, assigneeId);
       await this.plant.assign(context, openingId, circuitIds, assigneeId);
       await this.audit.append(context, {

@@ -3,7 +3,7 @@ import { createReadStream, createWriteStream } from 'node:fs';
 import { mkdir, rm, stat } from 'node:fs/promises';
 import { join } from 'node:path';
 import { Transform } from 'node:stream';
-import { finished } from 'node:stream/promises';
+import { pipeline } from 'node:stream/promises';
 import { uuidv7 } from 'uuidv7';
 import type { Language } from '#shared/checklist/text';
 import type { OpeningId, PackageId } from '#shared/plant/ids';
@@ -110,18 +110,19 @@ export class PackageBuilder {
         done(null, chunk);
       },
     });
-    const out = createWriteStream(file);
-    hashing.pipe(out);
+    // A full disk fails the pipeline, and with it the document that is being written into it.
+    const piped = pipeline(hashing, createWriteStream(file));
+    piped.catch(() => undefined);
     try {
       const { pages } = await writePackageDocument(await this.contentOf(row), hashing, {
         signal,
         onProgress,
       });
       hashing.end();
-      await finished(out);
+      await piped;
       return { file, pages, bytes: (await stat(file)).size, sha256: hash.digest('hex') };
     } catch (error) {
-      out.destroy();
+      hashing.destroy();
       await rm(file, { force: true });
       throw error;
     }

@@ -39,6 +39,10 @@ export class DevicesRepository {
     return (result.affected ?? 0) > 0;
   }
 
+  async extend(context: Context, deviceId: DeviceId, expiresAt: Date): Promise<void> {
+    await managerOf(context).update(DeviceEntity, { id: deviceId }, { expiresAt });
+  }
+
   async expire(context: Context, deviceId: DeviceId): Promise<void> {
     await managerOf(context).update(DeviceEntity, { id: deviceId }, { expiresAt: new Date() });
   }

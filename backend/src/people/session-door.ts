@@ -84,13 +84,24 @@ export class SessionDoor {
   ) {
     const fromCookie = (readCookie(request, DEVICE_COOKIE) ?? '').split('.')[0];
     const earlier = known ?? (fromCookie ? (fromCookie as DeviceId) : null);
+    // A credential that is still good stays: a lost answer, or a second tab, would leave the phone with a dead one.
+    const current = await this.desk.byDevice(request);
+    const cookie = readCookie(request, DEVICE_COOKIE);
+    if (cookie && current?.deviceId && current.person.id === person.id && current.deviceId === earlier) {
+      this.keepDevice(response, cookie);
+      return this.service.extendDevice(current.deviceId);
+    }
     const registered = await this.service.registerDevice(person, isUuid(earlier) ? earlier : null, label);
-    setPrivateCookie(response, DEVICE_COOKIE, registered.credential, {
+    this.keepDevice(response, registered.credential);
+    return registered.response;
+  }
+
+  private keepDevice(response: Response, credential: string): void {
+    setPrivateCookie(response, DEVICE_COOKIE, credential, {
       secure: this.secure,
       maxAgeMs: DEVICE_MS,
       path: '/api',
     });
-    return registered.response;
   }
 
   private dropDevice(response: Response): void {

@@ -77,6 +77,15 @@ export class SessionService {
     await this.devices.expire(this.transactions.outside, deviceId);
   }
 
+  /** Gives a device another thirty days. */
+  async extendDevice(deviceId: DeviceId): Promise<z.infer<typeof deviceResponseSchema>> {
+    const expiresAt = new Date(Date.now() + DEVICE_MS);
+    const { outside } = this.transactions;
+    await this.devices.extend(outside, deviceId, expiresAt);
+    const lastCount = await this.devices.findLastCount(outside, deviceId);
+    return { deviceId, lastCount, expiresAt: expiresAt.toISOString() };
+  }
+
   /** Registers this browser as a device of the person, or takes its earlier one up again with a new secret. */
   async registerDevice(
     person: { id: PersonId; companyId: string },

@@ -170,10 +170,21 @@ describe('POST /api/session', () => {
       expect((await circuitsWith(credential)).status).toBe(401);
     });
 
-    it('is the same device with a new secret when the phone comes back', async () => {
+    it('keeps a secret that is still good when the phone comes back: an answer may be lost', async () => {
       const client = new TestClient(server);
       await client.signIn(store.people.installer.email);
       const first = await register(client);
+      const second = await register(client, first.deviceId);
+      expect(second.deviceId).toBe(first.deviceId);
+      expect(second.credential).toBe(first.credential);
+      expect((await circuitsWith(first.credential)).status).toBe(200);
+    });
+
+    it('is the same device with a new secret where the old one has run out', async () => {
+      const client = new TestClient(server);
+      await client.signIn(store.people.installer.email);
+      const first = await register(client);
+      await server.sql('UPDATE device SET expires_at = UTC_TIMESTAMP(3) WHERE id = ?', [first.deviceId]);
       const second = await register(client, first.deviceId);
       expect(second.deviceId).toBe(first.deviceId);
       expect((await circuitsWith(first.credential)).status).toBe(401);

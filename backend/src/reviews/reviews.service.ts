@@ -83,9 +83,14 @@ export class ReviewsService {
     }
     const awaitedPhotos = await this.desk.countAwaitedPhotos(context, locked);
     if (awaitedPhotos > 0) {
-      throw new DomainFailure('wrongState', 'Photos that count as evidence have not arrived yet.', [], {
-        awaitedPhotos,
-      });
+      throw new DomainFailure(
+        'wrongState',
+        'Photos that count as evidence have not arrived, or can not be opened.',
+        [],
+        {
+          awaitedPhotos,
+        },
+      );
     }
   }
 

@@ -1,5 +1,5 @@
 import { uuidv7 } from 'uuidv7';
-import type { ExpansionDocument } from '#shared/checklist/step';
+import type { ExpansionDocument, Step, StepList } from '#shared/checklist/step';
 import type { CompanyId, EntryId, OpeningId, PersonId, SequenceId } from '#shared/plant/ids';
 import type { CircuitSpecification } from '#shared/plant/plant';
 import { canonicalJson } from '#shared/sequences/canonical-json';
@@ -9,11 +9,13 @@ import type { EntryBody } from '#shared/sequences/entry';
 import type { FoldState } from '#shared/sequences/fold-state';
 import { sha256OfText } from '#shared/sequences/sha256';
 import type { Context } from '../database/transactions';
+import type { LiveEventsService } from '../events/live-events.service';
 import type { TemplatesService } from '../templates/templates.service';
 import { appendToChain, foldColumns } from './chain-appending';
 import type { EntryEntity } from './entry.entity';
 import type { SequenceEntity } from './sequence.entity';
 import type { SequencesRepository } from './sequences.repository';
+import type { StepLists } from './step-lists';
 import type { StepListEntity } from './step-list.entity';
 
 /** Circuits expanded before others get their turn; also rows in one statement, which bounds its size. */
@@ -32,6 +34,8 @@ export class ExpansionService {
   constructor(
     private readonly templates: TemplatesService,
     private readonly sequences: SequencesRepository,
+    private readonly stepLists: StepLists,
+    private readonly events: LiveEventsService,
   ) {}
 
   /**
@@ -99,13 +103,37 @@ export class ExpansionService {
     if (!locked || locked.stepListHash === item.hash) return;
     const fold = JSON.parse(locked.fold) as FoldState;
     if (fold.state !== 'open' && fold.state !== 'sentBack') return;
-    const result = appendExpansion(fold, locked.companyId, id, item, authorId, now);
+    const before = await this.stepLists.find(context, locked.companyId, locked.stepListHash);
+    const changed = changedSteps(before.stepList, item.stepList);
+    const result = appendExpansion(fold, locked.companyId, id, item, { authorId, now, changed });
     await this.sequences.insertEntries(context, [result.row]);
+    const submitted = result.fold.state === 'submitted';
     await this.sequences.update(context, id, {
       ...foldColumns(result.fold, item.stepList.steps),
       stepListHash: item.hash,
+      // A submission that waited for a step which is no longer asked takes effect now.
+      ...(submitted ? { submittedAt: now, submittedBy: result.fold.submittedBy } : {}),
+    });
+    await this.events.announce(context, locked.companyId, {
+      kind: 'sequenceChanged',
+      openingId: locked.openingId,
+      sequenceId: id,
+      state: result.fold.state,
     });
   }
+}
+
+/** Keys of the steps that both lists ask and that ask or judge otherwise now; a reworded title changes nothing. */
+function changedSteps(before: StepList, after: StepList): string[] {
+  const known = new Map(before.steps.map((step) => [step.key, substance(step, before)]));
+  return after.steps
+    .filter((step) => known.has(step.key) && known.get(step.key) !== substance(step, after))
+    .map((step) => step.key);
+}
+
+function substance(step: Step, { facts }: StepList): string {
+  const { title: _title, instruction: _instruction, caution: _caution, section: _section, ...rest } = step;
+  return canonicalJson({ rest, facts });
 }
 
 function bind(document: ExpansionDocument): Expanded {
@@ -122,7 +150,11 @@ function begin(
   entries: EntryEntity[],
 ): void {
   const id = uuidv7() as SequenceId;
-  const { row, fold } = appendExpansion(emptyFold(), owner.companyId, id, item, authorId, now);
+  const { row, fold } = appendExpansion(emptyFold(), owner.companyId, id, item, {
+    authorId,
+    now,
+    changed: [],
+  });
   entries.push(row);
   rows.push({
     id,
@@ -141,8 +173,7 @@ function appendExpansion(
   companyId: string,
   sequenceId: SequenceId,
   item: Expanded,
-  authorId: PersonId,
-  now: Date,
+  { authorId, now, changed }: { authorId: PersonId; now: Date; changed: readonly string[] },
 ): { row: EntryEntity; fold: FoldState } {
   const body: EntryBody = {
     format: 1,
@@ -161,6 +192,7 @@ function appendExpansion(
       templateVersion: item.stepList.template.version,
       specificationRevision: item.specification.revision,
       stepListHash: item.hash,
+      changedSteps: [...changed],
     },
   };
   const entry = { body, bodyHash: bodyHash(body), standing: 'inOrder' as const, judgement: null };

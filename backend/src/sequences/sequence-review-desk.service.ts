@@ -51,13 +51,12 @@ export class SequenceReviewDesk {
     return fold;
   }
 
-  /** How many photos that count as evidence have not arrived: their phone still has them, or nobody has. */
+  /** How many photos that count as evidence have not arrived, or arrived and can't be opened. */
   async countAwaitedPhotos(context: Context, locked: LockedForReview): Promise<number> {
     const current = Object.values(locked.fold.steps).map((step) => step.entryId);
     const rows = await this.sequences.findEntriesById(context, current);
-    const arrived = new Set(
-      (await this.photos.findOfSequence(context, locked.id)).map((photo) => photo.sha256),
-    );
+    const photos = await this.photos.findOfSequence(context, locked.id);
+    const arrived = new Set(photos.filter(({ state }) => state !== 'broken').map(({ sha256 }) => sha256));
     const named = rows.flatMap((row) => photosNamedBy(JSON.parse(row.body) as EntryBody));
     return new Set(named.filter((sha256) => !arrived.has(sha256))).size;
   }

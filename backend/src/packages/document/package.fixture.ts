@@ -32,6 +32,7 @@ export class CircuitBuilder {
         templateVersion: 4,
         specificationRevision: 2,
         stepListHash: sha256OfJson(this.steps),
+        changedSteps: [],
       },
       { by: PEOPLE.lead.id },
     );

@@ -14,8 +14,11 @@ describe('deliveryFailure', () => {
     [answer(429), 'later'],
     [new TimeoutError(), 'later'],
     [answer(401), 'signIn'],
-    [answer(400), 'refused'],
-    [answer(413), 'refused'],
+    [answer(400, { code: 'invalidInput' }), 'refused'],
+    [answer(413, { code: 'tooLarge' }), 'refused'],
+    // Something on the way answered, not our server.
+    [answer(404), 'later'],
+    [answer(400, '<html>'), 'later'],
     [answer(403, { code: 'notAllowed' }), 'refused'],
     [answer(403, { code: 'requestForged' }), 'later'],
   ])('sorts %p as %s', (error, expected) => {

@@ -15,7 +15,8 @@ export function deliveryFailure(error: unknown): DeliveryFailure {
   if (error instanceof TimeoutError || !failure) return 'later';
   if (failure.status === 401) return 'signIn';
   if (failure.status === 403) return problemCode(error) === 'notAllowed' ? 'refused' : 'later';
-  return REFUSING_STATUS.has(failure.status) ? 'refused' : 'later';
+  // Without a code of ours it was something on the way that answered, such as a proxy during an update.
+  return REFUSING_STATUS.has(failure.status) && problemCode(error) !== null ? 'refused' : 'later';
 }
 
 /** Whether the server itself failed (5xx): the network is there, and what was sent may be what it fails on. */

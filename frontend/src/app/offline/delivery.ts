@@ -3,6 +3,7 @@ import type { PersonId } from '#shared/plant/ids';
 import { deliveryFailure, isServerFailure, refusalReason, type DeliveryFailure } from './delivery-failure';
 import { batchesOf } from './delivery-batches';
 import { EntriesApi } from './entries-api';
+import { Remembered } from '../session/remembered';
 import type { OutboxEntry } from './local-database';
 import { OutboxStorage } from './outbox-storage';
 
@@ -20,12 +21,14 @@ type SendEnd = DeliveryEnd | 'serverFailed';
 export class Delivery {
   private readonly storage = inject(OutboxStorage);
   private readonly api = inject(EntriesApi);
+  private readonly remembered = inject(Remembered);
 
   async run(personId: PersonId, progress: () => Promise<void>): Promise<DeliveryEnd> {
     const entries = await this.storage.entriesOf(personId);
     let failedInARow = 0;
     let end: DeliveryEnd = 'done';
     for (const { batch, isSuspect } of batchesOf(entries)) {
+      if (!this.isStillHere(personId)) return 'signIn';
       const sent = await this.sendEntries(batch);
       await progress();
       failedInARow = sent === 'serverFailed' && isSuspect ? failedInARow + 1 : 0;
@@ -34,6 +37,11 @@ export class Delivery {
     }
     const photos = await this.sendPhotos(personId, progress);
     return photos === 'done' ? end : photos;
+  }
+
+  /** Another person may have signed in, here or in another tab: what is sent then would go out in their name. */
+  private isStillHere(personId: PersonId): boolean {
+    return this.remembered.me()?.id === personId;
   }
 
   private async sendEntries(batch: readonly OutboxEntry[]): Promise<SendEnd> {
@@ -75,6 +83,7 @@ export class Delivery {
 
   private async sendPhotos(personId: PersonId, progress: () => Promise<void>): Promise<DeliveryEnd> {
     for (const photo of await this.storage.photos(personId, 'waiting')) {
+      if (!this.isStillHere(personId)) return 'signIn';
       try {
         await this.api.sendPhoto(photo);
         await this.storage.markPhoto(photo, 'sent', null, new Date().toISOString());

@@ -59,8 +59,12 @@ export class OutboxStorage {
     await this.change(id, { state: 'waiting', reason: null });
   }
 
+  /** Keeps a new picture. One that is here already stays as it is: it may be evidence of another step, or on its way. */
   async keepPhoto(photo: LocalPhoto): Promise<void> {
-    await (await this.local.open()).put('photos', photo);
+    const transaction = (await this.local.open()).transaction('photos', 'readwrite');
+    const known = await transaction.store.get([photo.sequenceId, photo.sha256]);
+    if (!known) await transaction.store.put(photo);
+    await transaction.done;
   }
 
   /** Only a draft can be removed: what an entry names is evidence. */

@@ -4,9 +4,10 @@ import { TestBed } from '@angular/core/testing';
 import { afterEach, beforeEach, describe, expect, it } from '@jest/globals';
 import type { EntryResult } from '#shared/contracts/sequences';
 import type { Me } from '#shared/contracts/session';
-import type { DeviceId } from '#shared/plant/ids';
+import type { DeviceId, PersonId } from '#shared/plant/ids';
 import { bodyHash } from '#shared/sequences/chain';
 import { PhoneDevice } from '../session/phone-device';
+import { Remembered } from '../session/remembered';
 import { Session } from '../session/session';
 import {
   bodyOf,
@@ -80,17 +81,21 @@ class FakeServer {
 let server: FakeServer;
 let device: WritableSignal<DeviceId>;
 let lastCount: number;
+/** Who this browser was last signed in as: another tab may have changed it. */
+let here: PersonId;
 let database: LocalDatabase;
 
 beforeEach(() => {
   newPhone();
   server = new FakeServer();
   lastCount = 0;
+  here = ME;
   device = signal(PHONE);
   TestBed.configureTestingModule({
     providers: [
       { provide: EntriesApi, useValue: server },
       { provide: Session, useValue: { me: signal({ id: ME } as Me) } },
+      { provide: Remembered, useValue: { me: () => ({ id: here }) } },
       { provide: PhoneDevice, useValue: { deviceId: device, lastCount: () => lastCount } },
     ],
   });
@@ -98,6 +103,21 @@ beforeEach(() => {
 });
 
 afterEach(() => database.close());
+
+describe('Outbox.drain', () => {
+  it('sends nothing once somebody else is signed in here, and keeps it for its author', async () => {
+    server.mode = 'away';
+    const outbox = TestBed.inject(Outbox);
+    await outbox.append(SEQUENCE, content('a'), CONTEXT);
+    server.mode = 'here';
+    here = uuid(77) as PersonId;
+    await outbox.drain();
+    expect(server.calls).toEqual([]);
+    here = ME;
+    await outbox.drain();
+    expect(server.calls).toHaveLength(1);
+  });
+});
 
 describe('Outbox.append', () => {
   it('numbers entries without a gap, also when several are recorded at once', async () => {

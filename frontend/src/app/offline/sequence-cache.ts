@@ -17,6 +17,11 @@ export class SequenceCache {
   async keepSequence(personId: PersonId, detail: SequenceDetail, readAt: string): Promise<CachedSequence> {
     const transaction = (await this.local.open()).transaction('sequences', 'readwrite');
     const known = await transaction.store.get([personId, detail.id]);
+    // Answers may overtake each other: the older one must not take entries away again.
+    if (known && known.detail.entries.length > detail.entries.length) {
+      await transaction.done;
+      return known;
+    }
     const arrived = new Set(detail.entries.map((entry) => entry.body.id));
     const acknowledged = (known?.acknowledged ?? []).filter((entry) => !arrived.has(entry.body.id));
     const fresh: CachedSequence = { personId, sequenceId: detail.id, detail, acknowledged, readAt };

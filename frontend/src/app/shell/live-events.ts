@@ -9,7 +9,7 @@ const LONGEST_WAIT_MS = 60_000;
 
 /**
  * Hints from the server that something changed, over one stream that is open while anybody listens. A hint carries no
- * data: whoever shows the thing reads it anew. Missing one does no harm beyond a stale screen.
+ * data: whoever shows the thing reads it anew. After a break the server says again what happened meanwhile.
  */
 @Injectable({ providedIn: 'root' })
 export class LiveEvents {
@@ -18,8 +18,10 @@ export class LiveEvents {
     let source: EventSource | null = null;
     let timer: ReturnType<typeof setTimeout> | undefined;
     let wait = FIRST_WAIT_MS;
+    let isAgain = false;
     const connect = (): void => {
-      source = new EventSource('/api/events?ngsw-bypass=true');
+      source = new EventSource(`/api/events?ngsw-bypass=true${isAgain ? '&again=true' : ''}`);
+      isAgain = true;
       source.addEventListener('open', () => (wait = FIRST_WAIT_MS));
       source.addEventListener('change', (message: MessageEvent<string>) => {
         const event = liveEventSchema.safeParse(JSON.parse(message.data));

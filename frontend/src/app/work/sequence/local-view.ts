@@ -1,4 +1,3 @@
-import type { EntryBody } from '#shared/sequences/entry';
 import type { FoldEntry } from '#shared/sequences/fold';
 import { viewSequence, type SequenceView } from '#shared/sequences/sequence-view';
 import type { RestsOn } from '#shared/sequences/entry';
@@ -46,10 +45,3 @@ export function restsOn(view: SequenceView): RestsOn[] {
 
 /** Whether an entry is only on this phone yet. */
 export const isUnsent = (entry: FoldEntry): boolean => entry.hash === null;
-
-/** The key of the step that an entry is about; `null` for submissions, reviews and expansions. */
-export function stepKeyOf(body: EntryBody): string | null {
-  return body.content.kind === 'answer' || body.content.kind === 'notApplicable'
-    ? body.content.stepKey
-    : null;
-}

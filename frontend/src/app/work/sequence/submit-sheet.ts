@@ -56,7 +56,8 @@ export class SubmitSheet {
     () =>
       (this.state() === 'open' || this.state() === 'sentBack') &&
       this.missing().length === 0 &&
-      !this.isPending(),
+      // One that waits for what never comes can be given again: it takes the place of the first.
+      !(this.isPending() && this.unsent() > 0),
   );
 
   constructor() {
