@@ -152,8 +152,11 @@ describe('the walk', () => {
       await onPhone.goto(`/work/${await sequenceOf('A17')}`);
       await onPhone.getByText('Above the band: open the valve a little.').waitFor();
       const hands = await InstallerHands.on(onPhone);
-      await hands.doStep(hands.currentStep());
-      await onPhone.goto(`/work/${await sequenceOf('A17')}?at=review`);
+      const asked = hands.currentStep();
+      expect(asked.kind).toBe('superheat');
+      // The signature stood under the old reading, so it is asked again too, and nothing else.
+      expect(await hands.work(5)).toBe(2);
+      expect([...hands.kinds]).toEqual(['superheat', 'signature']);
       await onPhone.getByRole('button', { name: 'Submit', exact: true }).click();
       await onPhone.getByText('Submitted. It waits for a lead.').waitFor();
     },

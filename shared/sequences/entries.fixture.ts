@@ -56,14 +56,14 @@ export class Story {
     });
   }
 
-  expansion(stepListHash: string): FoldEntry {
+  expansion(stepListHash: string, changedSteps: readonly string[] = []): FoldEntry {
     return this.make(null, {
       kind: 'expansion',
       templateKey: 'circuit',
       templateVersion: 1,
       specificationRevision: 1,
       stepListHash,
-      changedSteps: [],
+      changedSteps: [...changedSteps],
     });
   }
 

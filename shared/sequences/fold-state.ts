@@ -13,7 +13,10 @@ export const stepFoldSchema = z.object({
   overrideStanding: z.boolean(),
   /** Somebody answered without having seen an earlier answer: both are kept, the later counts, people are told. */
   answeredTwice: z.boolean(),
-  /** The review or expansion that asked for this step again, until it is answered anew. */
+  /** A signature stands under what was recorded when it was made: whatever is recorded after asks for it again.
+   * What the same device recorded before it and sent later does not: `count` is the signature's own on this sequence. */
+  signed: z.nullable(z.object({ deviceId: z.nullable(deviceIdSchema), count: z.int() })),
+  /** The review or expansion that asked for this step again, or what was recorded after it was signed, until it is answered anew. */
   reopenedBy: z.nullable(entryIdSchema),
 });
 export type StepFold = z.infer<typeof stepFoldSchema>;

@@ -82,7 +82,9 @@ function applyContent(state: FoldState, entry: FoldEntry, content: EntryContent)
         outcome: 'notApplicable',
         counts: true,
         overrideStanding: false,
+        signed: null,
       });
+      askSignaturesAgain(state, entry.body);
       return;
     case 'submission':
       addPending(state, entry.body, content.restsOn);
@@ -111,7 +113,25 @@ function applyAnswer(
     outcome: judged.outcome,
     counts: judged.counts,
     overrideStanding: standing,
+    signed:
+      content.answer.kind === 'signature'
+        ? { deviceId: entry.body.deviceId, count: entry.body.countOnSequence }
+        : null,
   });
+  // A note is a word beside the work, not part of what was signed for.
+  if (content.answer.kind !== 'signature' && content.answer.kind !== 'note') {
+    askSignaturesAgain(state, entry.body);
+  }
+}
+
+/** Asks for the signatures again that stood before this was recorded. */
+function askSignaturesAgain(state: FoldState, body: EntryBody): void {
+  const isOlder = (signed: StepFold['signed']): boolean =>
+    signed !== null && (signed.deviceId !== body.deviceId || signed.count < body.countOnSequence);
+  const keys = Object.entries(state.steps)
+    .filter(([, fold]) => fold.counts && fold.reopenedBy === null && isOlder(fold.signed))
+    .map(([key]) => key);
+  reopen(state, keys, body.id);
 }
 
 /** Kept in the chain, but without a place here: what nobody asked must not grow the state of what was asked. */
@@ -123,7 +143,7 @@ function setStep(
   state: FoldState,
   key: string,
   entry: FoldEntry,
-  result: Pick<StepFold, 'outcome' | 'counts' | 'overrideStanding'>,
+  result: Pick<StepFold, 'outcome' | 'counts' | 'overrideStanding' | 'signed'>,
 ): void {
   const { id, supersedes, authorId } = entry.body;
   const known = state.steps[key];

@@ -130,6 +130,14 @@ describe('a circuit’s way through review', () => {
 describe('POST /sequences/:sequenceId/reviews', () => {
   const id = (): SequenceId => sequences.get('A2') as SequenceId;
 
+  async function signAgain(): Promise<void> {
+    const detail = await installer.sequence(id());
+    const step = detail.stepList.steps.find((candidate) => candidate.kind === 'signature') as Step;
+    const signature = demoSignature('installer of reviews', random);
+    const known = detail.fold.steps[step.key]?.entryId ?? null;
+    await installer.post([installer.answer(detail, step, { kind: 'signature', signature }, known)]);
+  }
+
   beforeAll(async () => {
     await finishSequence(installer, id(), random);
   }, 30_000);
@@ -165,6 +173,8 @@ describe('POST /sequences/:sequenceId/reviews', () => {
     const second = await store.client('lead2');
     const before = await second.sequence(id());
     const override = before.stepList.steps.find((step) => step.kind === 'override') as Step;
+    // Whatever is recorded after it was signed takes the signature with it.
+    const signatureKey = before.stepList.steps.find((step) => step.kind === 'signature')?.key;
     const known = before.fold.steps[override.key]?.entryId ?? null;
     const set = installer.answer(before, override, { kind: 'override', phase: 'set', remark: '' }, known);
     await installer.post([set]);
@@ -176,7 +186,7 @@ describe('POST /sequences/:sequenceId/reviews', () => {
     expect([refused.status, refused.body.code, refused.body.facts.missing]).toEqual([
       409,
       'wrongState',
-      [override.key],
+      [override.key, signatureKey],
     ]);
     const back = installer.answer(
       before,
@@ -185,6 +195,7 @@ describe('POST /sequences/:sequenceId/reviews', () => {
       set.id,
     );
     await installer.post([back]);
+    await signAgain();
   });
 
   it('refuses an approval while a photo that counts has not arrived', async () => {
@@ -198,6 +209,7 @@ describe('POST /sequences/:sequenceId/reviews', () => {
     const away = photos.map((photo) => ({ ...photo, sha256: 'd'.repeat(64) }));
     const gone = installer.answer(detail, step, { kind: 'photo', photos: [...away, ...photos] }, entry);
     await installer.post([gone]);
+    await signAgain();
     const refused = await second.send(
       'post',
       `/api/sequences/${id()}/reviews`,
@@ -205,6 +217,7 @@ describe('POST /sequences/:sequenceId/reviews', () => {
     );
     expect([refused.body.code, refused.body.facts.awaitedPhotos]).toEqual(['wrongState', 1]);
     await installer.post([installer.answer(detail, step, { kind: 'photo', photos: [...photos] }, gone.id)]);
+    await signAgain();
   });
 
   it('takes a typed name only when it is the reviewer’s own', async () => {

@@ -130,6 +130,33 @@ describe('POST /openings/:openingId/schedule-imports', () => {
     expect(untouched.sequenceId).toBe(before[1]?.sequenceId);
   });
 
+  it('asks a reading again whose limits a revised schedule changed, and nothing else', async () => {
+    await importFile(SMALL_SCHEDULE);
+    const installer = await store.client('installer');
+    const id = (await circuits())[1]?.sequenceId as SequenceId;
+    const detail = await installer.sequence(id);
+    const steps = detail.stepList.steps.filter(({ kind }) => kind === 'superheat' || kind === 'confirm');
+    const pair = {
+      pressure: { text: '45', unit: 'psig' },
+      temperature: { text: '28', unit: 'degF' },
+    } as const;
+    await installer.post(
+      steps.map((step) =>
+        installer.answer(
+          detail,
+          step,
+          step.kind === 'superheat'
+            ? { kind: 'superheat', asFound: null, asLeft: { valve: 'steady', pair } }
+            : { kind: 'confirm', confirmed: true },
+        ),
+      ),
+    );
+    await importFile(edited((text) => text.replace('Deli,20,29,6,8,1', 'Deli,20,29,9,12,1')));
+    const { fold } = await installer.sequence(id);
+    const asked = Object.entries(fold.steps).filter(([, step]) => step.reopenedBy !== null);
+    expect(asked.map(([key]) => key)).toEqual([steps.find(({ kind }) => kind === 'superheat')?.key]);
+  });
+
   it('takes a circuit that the schedule dropped out of the lists without losing what was recorded', async () => {
     await importFile(SMALL_SCHEDULE);
     const dropped = edited((text) => text.split('\n').slice(0, 3).join('\n'));

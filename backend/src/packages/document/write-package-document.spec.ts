@@ -53,6 +53,7 @@ async function madeContent(language: 'en' | 'es' = 'en'): Promise<PackageContent
   )
     .review('sentBack', [{ stepKey: 'drain', text: 'Fill the trap again.' }])
     .answer('drain', { kind: 'choose', value: 'slow' })
+    .answer('signature', { kind: 'signature', signature: SIGNATURE })
     .append({ kind: 'submission', restsOn: [] })
     .review('approved')
     .answer('fans', { kind: 'confirm', confirmed: true }, { standing: 'late' });
