@@ -61,3 +61,12 @@ const TABLES_BY_NAME: ReadonlyMap<string, SaturationTable> = new Map(
  */
 export const findRefrigerant = (text: string): SaturationTable | undefined =>
   TABLES_BY_NAME.get(simplify(text));
+
+/**
+ * What all ways of writing one refrigerant have in common, known to the program or not: by it a table is looked up.
+ *
+ * @param text as written
+ * @returns upper case letters and digits; empty where the text has none
+ * @example refrigerantKey('CO2') // '744', as of 'R-744'
+ */
+export const refrigerantKey = (text: string): string => simplify(findRefrigerant(text)?.designation ?? text);

@@ -38,7 +38,8 @@ export interface SaturationTable {
   readonly dewPa: readonly number[];
   /** Whether bubble and dew differ enough to matter in the field: more than 0.2 K at 0 °C. */
   readonly glide: boolean;
-  readonly safetyClass: SafetyClass;
+  /** Null where a maker's table doesn't say. */
+  readonly safetyClass: SafetyClass | null;
   /** What a reader must know where the evidence for these figures is thin; null where it isn't. */
   readonly limitNote: { readonly en: string; readonly es: string } | null;
 }
