@@ -9,6 +9,25 @@ const ANSWERS: { readonly [K in StepKind]: Answer } = {
   choose: { kind: 'choose', value: 'clear' },
   reading: { kind: 'reading', value: { text: '36', unit: 'degF' } },
   superheat: steady(pair('45', '28')),
+  measurement: {
+    kind: 'measurement',
+    method: 'subcooling',
+    quantities: {
+      liquidPressure: { text: '225', unit: 'psig' },
+      lineTemperature: { text: '86', unit: 'degF' },
+    },
+    words: {},
+    rows: [],
+  },
+  trend: {
+    kind: 'trend',
+    file: { name: 'air.csv', sha256: 'b'.repeat(64), rows: 3 },
+    startText: '2026-12-01 08:00',
+    column: 'Air (°F)',
+    // Every quarter of an hour over a day, always in the band.
+    atS: Array.from({ length: 97 }, (_, index) => index * 900),
+    temperatureK: Array.from({ length: 97 }, () => 275),
+  },
   photo: {
     kind: 'photo',
     photos: [

@@ -3,12 +3,14 @@ import type { SequenceFacts } from './facts';
 import { refusedJudgement, type Judgement } from './judgement';
 import { chooseRules } from './kinds/choose';
 import { confirmRules } from './kinds/confirm';
+import { measurementRules } from './kinds/measurement';
 import { noteRules } from './kinds/note';
 import { overrideRules } from './kinds/override';
 import { photoRules } from './kinds/photo';
 import { readingRules } from './kinds/reading';
 import { signatureRules } from './kinds/signature';
 import { superheatRules } from './kinds/superheat';
+import { trendRules } from './kinds/trend';
 import type { Answer, Step } from './step';
 
 /** Raised by one whenever a change makes an old answer come out otherwise; stored with every judgement. */
@@ -30,6 +32,10 @@ export function judge(step: Step, answer: Answer, facts: SequenceFacts): Judgeme
       return answer.kind === step.kind ? readingRules.judge(step, answer, facts) : mismatch();
     case 'superheat':
       return answer.kind === step.kind ? superheatRules.judge(step, answer, facts) : mismatch();
+    case 'measurement':
+      return answer.kind === step.kind ? measurementRules.judge(step, answer, facts) : mismatch();
+    case 'trend':
+      return answer.kind === step.kind ? trendRules.judge(step, answer, facts) : mismatch();
     case 'photo':
       return answer.kind === step.kind ? photoRules.judge(step, answer, facts) : mismatch();
     case 'note':

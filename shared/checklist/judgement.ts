@@ -7,8 +7,9 @@ export const OUTCOMES = ['within', 'outside', 'recorded', 'notApplicable'] as co
 export type Outcome = (typeof OUTCOMES)[number];
 
 /**
- * Why an answer doesn't count, or what deserves a second look. `refuse` keeps the step open (the entry itself is kept
- * all the same); `ask` is shown to whoever recorded it and to the lead.
+ * Why an answer doesn't count, or what deserves a second look. `refuse`: a slip, which a phone doesn't offer to record
+ * (one that arrives is kept all the same); `keep`: recorded on purpose, but the step stays open, such as a reading whose
+ * conditions weren't met; `ask`: counts, and is shown to whoever recorded it and to the lead.
  */
 export const DOUBT_KINDS = [
   'empty',
@@ -34,9 +35,26 @@ export const DOUBT_KINDS = [
   'lowAboveHigh',
   'emptySignature',
   'unknownStep',
+  'incomplete',
+  'tooMany',
+  'noCriterion',
+  'preliminary',
+  'estimated',
+  'tooFewSamples',
+  'notSettled',
+  'wrongRefrigerant',
+  'massDoesNotFollow',
+  'wrongWay',
+  'withinError',
+  'barometerSeaLevel',
+  'barometerFarOff',
+  'asFoundMissing',
 ] as const;
 export type DoubtKind = (typeof DOUBT_KINDS)[number];
-export const doubtSchema = z.object({ kind: z.enum(DOUBT_KINDS), severity: z.enum(['refuse', 'ask']) });
+export const doubtSchema = z.object({
+  kind: z.enum(DOUBT_KINDS),
+  severity: z.enum(['refuse', 'keep', 'ask']),
+});
 export type Doubt = z.infer<typeof doubtSchema>;
 
 export const workingSchema = z.object({
@@ -60,6 +78,8 @@ export type AppliedLimit = z.infer<typeof appliedLimitSchema>;
 
 export const judgementSchema = z.object({
   outcome: z.enum(OUTCOMES),
+  /** What was concluded, as stable codes of `VERDICT_WORDS`, the main one first. Absent where the outcome says it all. */
+  verdicts: z.optional(z.array(z.string().check(z.maxLength(60)))),
   /** On which side of its limits an `outside` lies; `null` where there is no side. */
   side: z.nullable(z.enum(['low', 'high'])),
   /** Whether the answer satisfies its step. An outside answer does: it is a true record, and the lead sees it first. */
@@ -71,12 +91,16 @@ export const judgementSchema = z.object({
 });
 export type Judgement = z.infer<typeof judgementSchema>;
 
+/** Whether an answer satisfies its step for all that was doubted about it. */
+export const doubtsLetCount = (doubts: readonly Doubt[]): boolean =>
+  doubts.every((doubt) => doubt.severity === 'ask');
+
 /** A judgement with nothing to say beyond its outcome. */
 export function plainJudgement(outcome: Outcome, doubts: readonly Doubt[] = []): Judgement {
   return {
     outcome,
     side: null,
-    counts: doubts.every((doubt) => doubt.severity !== 'refuse'),
+    counts: doubtsLetCount(doubts),
     doubts: [...doubts],
     figures: [],
     limit: null,

@@ -8,6 +8,7 @@ const RANGES: Partial<Record<Dimension, { low: number; high: number; below: Doub
   gaugePressure: { low: -101_325, high: 20_000_000, below: 'deeperThanVacuum' },
   absolutePressure: { low: 0, high: 20_000_000, below: 'deeperThanVacuum' },
   vacuum: { low: 0, high: 110_000, below: 'deeperThanVacuum' },
+  pressureDifference: { low: -20_000_000, high: 20_000_000, below: 'notPlausible' },
   length: { low: 0, high: 10_000, below: 'notNegatable' },
   area: { low: 0, high: 1_000_000, below: 'notNegatable' },
   heatFlow: { low: 0, high: 5_000_000, below: 'notNegatable' },

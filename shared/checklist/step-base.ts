@@ -3,6 +3,12 @@ import { coilIdSchema, fixtureIdSchema } from '../plant/ids';
 import { cautionSchema, textSchema } from './text';
 
 /**
+ * Whether what is recorded here means that the circuit runs otherwise than before (a regulator set, a set point moved):
+ * superheats read earlier on the circuit turn stale and are asked again. Absent: no.
+ */
+export const changesShape = { changes: z.optional(z.literal(true)) } as const;
+
+/**
  * What every step has. `key` is stable: the same template version and the same circuit give the same keys, and a key
  * holds the coil's or fixture's id, so that a swapped fixture gets steps of its own.
  */

@@ -46,6 +46,8 @@ const STEPS: { readonly [K in StepKind]: StepOf<K> } = {
     siUnit: 'K',
   },
   superheat: { kind: 'superheat', ...BASE, band: { lowK: 0, highK: 0 } },
+  measurement: { kind: 'measurement', ...BASE, method: 'subcooling', criteria: {} },
+  trend: { kind: 'trend', ...BASE, bandLowK: null, bandHighK: 278.15, holdS: 86_400, longestExcursionS: 0 },
   photo: { kind: 'photo', ...BASE, minCount: 1 },
   note: { kind: 'note', ...BASE },
   override: { kind: 'override', ...BASE, subject: text },

@@ -1,6 +1,8 @@
 import * as z from 'zod/mini';
+import { trendAnswerSchema, trendStepSchema } from './kinds/trend';
 import { chooseAnswerSchema, chooseStepSchema } from './kinds/choose';
 import { confirmAnswerSchema, confirmStepSchema } from './kinds/confirm';
+import { measurementAnswerSchema, measurementStepSchema } from './kinds/measurement';
 import { noteAnswerSchema, noteStepSchema } from './kinds/note';
 import { overrideAnswerSchema, overrideStepSchema } from './kinds/override';
 import { photoAnswerSchema, photoStepSchema } from './kinds/photo';
@@ -17,6 +19,8 @@ export const stepSchema = z.discriminatedUnion('kind', [
   chooseStepSchema,
   readingStepSchema,
   superheatStepSchema,
+  measurementStepSchema,
+  trendStepSchema,
   photoStepSchema,
   noteStepSchema,
   overrideStepSchema,
@@ -31,6 +35,8 @@ export const answerSchema = z.discriminatedUnion('kind', [
   chooseAnswerSchema,
   readingAnswerSchema,
   superheatAnswerSchema,
+  measurementAnswerSchema,
+  trendAnswerSchema,
   photoAnswerSchema,
   noteAnswerSchema,
   overrideAnswerSchema,

@@ -1,145 +1,187 @@
-import { findRefrigerant } from '../refrigeration/saturation/refrigerants';
-import type { SaturationTable } from '../refrigeration/saturation/saturation-table';
-import { doubtSuperheatInputs } from '../refrigeration/doubt-superheat-inputs';
-import { huntingMean } from '../refrigeration/hunting-mean';
-import { superheat } from '../refrigeration/superheat';
+import { atmosphereFromBarometer } from '../refrigeration/barometer';
 import { judgeSuperheat } from '../refrigeration/superheat-band';
-import { fromSi } from '../units/convert';
+import { standingOf } from '../refrigeration/uncertainty/standing';
 import {
-  kelvin,
-  kelvinDifference,
-  pascalAbsolute,
-  pascalGauge,
-  type KelvinDifference,
-} from '../units/quantity';
+  superheatUncertainty,
+  type UncertaintyResult,
+} from '../refrigeration/uncertainty/superheat-uncertainty';
+import { kelvinDifference, metre, pascalAbsolute, type KelvinDifference } from '../units/quantity';
 import type { SequenceFacts } from './facts';
-import { plainJudgement, refusedJudgement, type Doubt, type Figure, type Judgement } from './judgement';
-import type { SuperheatAnswer, SuperheatObservation, SuperheatPair, SuperheatStep } from './kinds/superheat';
+import {
+  doubtsLetCount,
+  plainJudgement,
+  refusedJudgement,
+  type Doubt,
+  type Figure,
+  type Judgement,
+} from './judgement';
+import type { SuperheatAnswer, SuperheatStep } from './kinds/superheat';
+import { saturationOf } from './saturation-of';
+import { SUPERHEAT_CONDITIONS } from './superheat-conditions';
+import { observe, type Observed, type ObservingScene } from './superheat-observing';
 import { readTypedValue } from './typed-value';
-
-interface PairResult {
-  readonly superheat: KelvinDifference;
-  readonly figures: readonly Figure[];
-  readonly working: Judgement['working'][number];
-}
-
-interface ObservationResult {
-  readonly mean: KelvinDifference;
-  readonly minimum: KelvinDifference;
-  readonly pairs: readonly PairResult[];
-}
 
 /**
  * Judges the superheat of one coil: saturation (dew) at the coil's outlet pressure, the difference to the line
  * temperature at the bulb, and that against the fixture's band. A hunting valve is judged by the mean of its high and
- * its low (common practice, no source); a minimum at or below zero is flagged whatever the mean is. Never clamped.
+ * its low (common practice, no source), or by the time-weighted mean of a series where the template says so; a minimum
+ * at or below zero is flagged whatever the mean is. Never clamped.
+ *
+ * A reading whose conditions weren't met is kept and doesn't count; one taken elsewhere with an allowance for the line
+ * counts, and is flagged as estimated.
  */
 export function judgeSuperheatAnswer(
   step: SuperheatStep,
   answer: SuperheatAnswer,
   facts: SequenceFacts,
 ): Judgement {
-  const table = findRefrigerant(facts.refrigerant);
+  const table = saturationOf(facts);
   if (!table) return refusedJudgement('unknownRefrigerant');
   const doubts: Doubt[] = [];
-  const left = observe(answer.asLeft, table, facts, doubts);
-  if (!left) return { ...plainJudgement('recorded', doubts), counts: false };
+  const lineDropPa = readLineDrop(answer, doubts);
+  // Without it every figure would be that of the tap, not of the coil.
+  if (lineDropPa === null) return plainJudgement('recorded', doubts);
+  const scene: ObservingScene = {
+    table,
+    facts: { ...facts, atmospherePaAbs: readAtmosphere(answer, facts, doubts) },
+    gauge: answer.instruments?.gauge ?? 'vented',
+    lineDropPa,
+  };
+  const left = observe(answer.asLeft, scene, doubts);
+  if (!left) return { ...plainJudgement('recorded', unique(doubts)), counts: false };
   const foundDoubts: Doubt[] = [];
-  const found = answer.asFound ? observe(answer.asFound, table, facts, foundDoubts) : null;
+  const found = answer.asFound ? observe(answer.asFound, scene, foundDoubts) : null;
   // An as-found that can't be read is asked about; it doesn't keep the as-left from counting.
   doubts.push(...foundDoubts.map((doubt) => ({ ...doubt, severity: 'ask' as const })));
+  doubts.push(...conditionDoubts(answer), ...settlingDoubts(left));
 
+  const mean = meanOf(step, left);
   const band = { low: kelvinDifference(step.band.lowK), high: kelvinDifference(step.band.highK) };
-  const verdict = judgeSuperheat(left.mean, band, left.minimum);
+  const verdict = judgeSuperheat(mean, band, left.minimum);
   if (verdict.liquidRisk) doubts.push({ kind: 'liquidRisk', severity: 'ask' });
+  const error = errorOf(answer, scene, left, doubts);
+  const verdicts = verdictsOf(left, error === null ? null : standingOf(mean, band, error.uncertainty));
   return {
     outcome: verdict.outcome,
     side: verdict.side,
-    counts: doubts.every((doubt) => doubt.severity !== 'refuse'),
+    counts: doubtsLetCount(doubts),
     doubts: unique(doubts),
-    figures: figuresOf(left, found),
-    limit: { low: step.band.lowK, high: step.band.highK, unit: 'K_diff', source: step.source ?? '' },
-    working: [...left.pairs, ...(found?.pairs ?? [])].map((pair) => pair.working),
-  };
-}
-
-function figuresOf(left: ObservationResult, found: ObservationResult | null): Figure[] {
-  const figures: Figure[] = [{ label: 'superheat', value: left.mean, unit: 'K_diff' }];
-  if (left.pairs.length > 1) {
-    figures.push({ label: 'superheatLow', value: left.minimum, unit: 'K_diff' });
-    figures.push({
-      label: 'superheatHigh',
-      value: Math.max(...left.pairs.map((pair) => pair.superheat)),
-      unit: 'K_diff',
-    });
-  }
-  figures.push(...(left.pairs[0]?.figures ?? []));
-  if (found) figures.push({ label: 'superheatAsFound', value: found.mean, unit: 'K_diff' });
-  return figures;
-}
-
-function observe(
-  observation: SuperheatObservation,
-  table: SaturationTable,
-  facts: SequenceFacts,
-  doubts: Doubt[],
-): ObservationResult | null {
-  if (observation.valve === 'steady') {
-    const pair = workOut(observation.pair, table, facts, doubts);
-    return pair && { mean: pair.superheat, minimum: pair.superheat, pairs: [pair] };
-  }
-  const low = workOut(observation.low, table, facts, doubts);
-  const high = workOut(observation.high, table, facts, doubts);
-  if (!low || !high) return null;
-  if (low.superheat > high.superheat) {
-    doubts.push({ kind: 'lowAboveHigh', severity: 'refuse' });
-    return null;
-  }
-  return { mean: huntingMean(high.superheat, low.superheat), minimum: low.superheat, pairs: [low, high] };
-}
-
-function workOut(
-  pair: SuperheatPair,
-  table: SaturationTable,
-  facts: SequenceFacts,
-  doubts: Doubt[],
-): PairResult | null {
-  const pressure = readTypedValue(pair.pressure, 'gaugePressure');
-  const temperature = readTypedValue(pair.temperature, 'temperature');
-  if (!pressure.ok || !temperature.ok) {
-    const problem = !pressure.ok ? pressure.problem : !temperature.ok ? temperature.problem : 'notANumber';
-    doubts.push({ kind: problem, severity: 'refuse' });
-    return null;
-  }
-  const atmosphere = pascalAbsolute(facts.atmospherePaAbs);
-  const raised = doubtSuperheatInputs({
-    table,
-    atmosphere,
-    pressureTyped: fromSi(pressure.si, pair.pressure.unit),
-    pressureUnit: pair.pressure.unit,
-    temperatureTyped: fromSi(temperature.si, pair.temperature.unit),
-    temperatureUnit: pair.temperature.unit,
-  });
-  doubts.push(...raised.map(({ kind, severity }) => ({ kind, severity })));
-  if (raised.some((doubt) => doubt.severity === 'refuse')) return null;
-  const result = superheat({
-    table,
-    suctionPressure: pascalGauge(pressure.si),
-    atmosphere,
-    lineTemperature: kelvin(temperature.si),
-  });
-  if (!result.ok) {
-    doubts.push({ kind: result.reason, severity: 'refuse' });
-    return null;
-  }
-  return {
-    superheat: result.superheat,
-    working: { ...result.working, lines: [...result.working.lines] },
+    ...(verdicts.length > 0 ? { verdicts } : {}),
     figures: [
-      { label: 'saturation', value: result.saturation, unit: 'K' },
-      { label: 'glide', value: result.glide, unit: 'K_diff' },
+      ...figuresOf(mean, left, found && meanOf(step, found)),
+      ...(error === null
+        ? []
+        : [{ label: 'superheatUncertainty', value: error.uncertainty, unit: 'K_diff' as const }]),
     ],
+    limit: { low: step.band.lowK, high: step.band.highK, unit: 'K_diff', source: step.source ?? '' },
+    working: [...left.workings, ...(found?.workings ?? []), ...(error === null ? [] : [error.working])].map(
+      (working) => ({ ...working, lines: [...working.lines] }),
+    ),
   };
+}
+
+/** The mean that is held against the band. */
+function meanOf(step: SuperheatStep, observed: Observed): KelvinDifference {
+  return step.judgedBy === 'timeWeighted' ? (observed.timeWeighted ?? observed.midpoint) : observed.midpoint;
+}
+
+/** What the line loses, in pascals; `null` when it was read elsewhere and the loss can't be read. */
+/** A sea-level reading at a mountain store is worth several degrees; weather out of the ordinary is only asked about. */
+const BAROMETER_DOUBTS = {
+  seaLevelCorrected: { kind: 'barometerSeaLevel', severity: 'refuse' },
+  farFromElevation: { kind: 'barometerFarOff', severity: 'ask' },
+} as const satisfies Record<string, Doubt>;
+
+/** The atmosphere here: the barometer's where somebody read one, else the standard one of the elevation. */
+function readAtmosphere({ instruments }: SuperheatAnswer, facts: SequenceFacts, doubts: Doubt[]): number {
+  const { barometer } = instruments ?? {};
+  if (!barometer) return facts.atmospherePaAbs;
+  const typed = readTypedValue(barometer, 'absolutePressure');
+  const read = typed.ok ? atmosphereFromBarometer(pascalAbsolute(typed.si), metre(facts.elevationM)) : null;
+  if (!typed.ok || !read?.ok) {
+    doubts.push({ kind: typed.ok ? 'notPlausible' : typed.problem, severity: 'refuse' });
+    return facts.atmospherePaAbs;
+  }
+  if (read.doubt) doubts.push(BAROMETER_DOUBTS[read.doubt]);
+  return read.pressure;
+}
+
+function readLineDrop(answer: SuperheatAnswer, doubts: Doubt[]): number | null {
+  if (answer.takenAt !== 'elsewhere') return 0;
+  const drop = answer.lineDrop ? readTypedValue(answer.lineDrop, 'pressureDifference') : null;
+  if (!drop?.ok || drop.si < 0) {
+    doubts.push({
+      kind: drop && !drop.ok ? drop.problem : drop ? 'notNegatable' : 'incomplete',
+      severity: 'refuse',
+    });
+    return null;
+  }
+  doubts.push({ kind: 'estimated', severity: 'ask' });
+  return drop.si;
+}
+
+function conditionDoubts({ conditions }: SuperheatAnswer): Doubt[] {
+  const areMet = !conditions || SUPERHEAT_CONDITIONS.every((condition) => conditions.includes(condition));
+  return areMet ? [] : [{ kind: 'preliminary', severity: 'keep' }];
+}
+
+/** A series that shows that the valve hasn't settled is a true record of that, and no setting to sign off. */
+function settlingDoubts({ settled }: Observed): Doubt[] {
+  return settled === 'no' ? [{ kind: 'notSettled', severity: 'keep' }] : [];
+}
+
+type KnownError = Extract<UncertaintyResult, { ok: true }>;
+
+function errorOf(
+  { instruments }: SuperheatAnswer,
+  { table, facts }: ObservingScene,
+  { pressure }: Observed,
+  doubts: Doubt[],
+): KnownError | null {
+  if (!instruments?.pressureAccuracy || !instruments.temperatureAccuracy) return null;
+  const gauge = readTypedValue(instruments.pressureAccuracy, 'pressureDifference');
+  const thermometer = readTypedValue(instruments.temperatureAccuracy, 'temperatureDifference');
+  if (!gauge.ok || !thermometer.ok) {
+    doubts.push({ kind: 'notANumber', severity: 'ask' });
+    return null;
+  }
+  const result = superheatUncertainty({
+    table,
+    pressure,
+    atmosphere: pascalAbsolute(facts.atmospherePaAbs),
+    accuracy: {
+      gauge: { kind: 'absolute', limitPa: gauge.si },
+      thermometer: kelvinDifference(thermometer.si),
+    },
+  });
+  return result.ok ? result : null;
+}
+
+function verdictsOf(left: Observed, standing: ReturnType<typeof standingOf> | null): string[] {
+  return [
+    // Of two pairs the answer itself says that the valve hunts; of a series it is a finding.
+    ...(left.hunts && left.settled !== null ? ['superheat_hunts'] : []),
+    ...(left.settled === 'no' ? ['superheat_notSettled'] : []),
+    ...(left.settled === 'tooShort' ? ['superheat_watchLonger'] : []),
+    ...(standing === 'insideWithinError' || standing === 'outsideWithinError'
+      ? [`superheat_${standing}`]
+      : []),
+  ];
+}
+
+function figuresOf(mean: KelvinDifference, left: Observed, found: KelvinDifference | null): Figure[] {
+  const figures: Figure[] = [{ label: 'superheat', value: mean, unit: 'K_diff' }];
+  if (left.maximum > left.minimum || left.hunts) {
+    figures.push({ label: 'superheatLow', value: left.minimum, unit: 'K_diff' });
+    figures.push({ label: 'superheatHigh', value: left.maximum, unit: 'K_diff' });
+  }
+  if (left.timeWeighted !== null) {
+    figures.push({ label: 'superheatMidpoint', value: left.midpoint, unit: 'K_diff' });
+    figures.push({ label: 'superheatTimeWeighted', value: left.timeWeighted, unit: 'K_diff' });
+  }
+  figures.push(...left.figures);
+  if (found !== null) figures.push({ label: 'superheatAsFound', value: found, unit: 'K_diff' });
+  return figures;
 }
 
 function unique(doubts: readonly Doubt[]): Doubt[] {

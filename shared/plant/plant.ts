@@ -13,6 +13,7 @@ import {
   EVAPORATING_BASES,
   FEEDS,
   FIXTURE_KINDS,
+  LEVELS,
   SYSTEM_KINDS,
   TEMPERATURE_CLASSES,
   VALVE_KINDS,
@@ -84,9 +85,15 @@ export const systemSchema = z.object({
 });
 export type System = z.infer<typeof systemSchema>;
 
-/** Everything that a template may ask about one circuit; `revision` counts the changes of the schedule behind it. */
+/**
+ * Everything that a template may ask about one circuit; `revision` counts the changes of the schedule behind it. For the
+ * work of a whole suction group or system, `circuit` holds its code and nothing else that means anything: no fixtures,
+ * and for a system no `suctionGroup`.
+ */
 export const circuitSpecificationSchema = z.object({
   revision: z.int(),
+  /** Absent in what was bound before levels came: a circuit. */
+  level: z.optional(z.enum(LEVELS)),
   opening: z.object({
     id: openingIdSchema,
     name: z.string(),
@@ -94,7 +101,7 @@ export const circuitSpecificationSchema = z.object({
     unitSystem: z.enum(UNIT_SYSTEMS),
   }),
   system: systemSchema,
-  suctionGroup: suctionGroupSchema,
+  suctionGroup: z.nullable(suctionGroupSchema),
   circuit: circuitSchema,
 });
 export type CircuitSpecification = z.infer<typeof circuitSpecificationSchema>;

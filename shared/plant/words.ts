@@ -1,5 +1,12 @@
 // The closed sets that describe a plant. Values are stored in the database and used as translation keys.
 
+/**
+ * What a sequence is for. A system and a suction group have work of their own beside their circuits': pressure test,
+ * evacuation, charge, set points, return gas.
+ */
+export const LEVELS = ['system', 'suctionGroup', 'circuit'] as const;
+export type Level = (typeof LEVELS)[number];
+
 export const TEMPERATURE_CLASSES = ['low', 'medium', 'high'] as const;
 export type TemperatureClass = (typeof TEMPERATURE_CLASSES)[number];
 

@@ -16,7 +16,12 @@ export const stepFoldSchema = z.object({
   /** A signature stands under what was recorded when it was made: whatever is recorded after asks for it again.
    * What the same device recorded before it and sent later does not: `count` is the signature's own on this sequence. */
   signed: z.nullable(z.object({ deviceId: z.nullable(deviceIdSchema), count: z.int() })),
-  /** The review or expansion that asked for this step again, or what was recorded after it was signed, until it is answered anew. */
+  /** When a superheat that counts was read, by the clock of its device: a later change on the circuit makes it stale. */
+  readAt: z.optional(z.object({ deviceId: z.nullable(deviceIdSchema), at: z.iso.datetime() })),
+  /**
+   * What asked for this step again, until it is answered anew: a review, an expansion, what was recorded after it was
+   * signed, or a change on the circuit that made its reading stale.
+   */
   reopenedBy: z.nullable(entryIdSchema),
 });
 export type StepFold = z.infer<typeof stepFoldSchema>;

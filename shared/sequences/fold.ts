@@ -4,6 +4,7 @@ import { unreachable } from '../failures/unreachable';
 import { CHAIN_START } from './chain';
 import type { EntryBody, EntryContent, RestsOn, ServerPart } from './entry';
 import type { FoldState, StepFold } from './fold-state';
+import { changeOf, momentOf, staleSteps } from './stale';
 import { transitionFor } from './transitions';
 
 /** What the fold needs of an entry. One that isn't on the server yet has position 0 and no hash. */
@@ -50,7 +51,7 @@ export function applyEntry(before: FoldState, entry: FoldEntry, steps: readonly 
   markArrived(state, entry.body);
   if (entry.server.standing === 'late') return { ...state, lateCount: state.lateCount + 1 };
   if (entry.server.standing === 'held') return { ...state, heldCount: state.heldCount + 1 };
-  applyContent(state, entry, entry.body.content);
+  applyContent(state, entry, entry.body.content, steps);
   if (entry.server.stateAfter === undefined) settlePending(state, steps);
   else if (entry.server.stateAfter !== state.state) takeEffect(state, entry.server.stateAfter);
   return state;
@@ -71,10 +72,15 @@ export function missingSteps(state: FoldState, steps: readonly Step[]): readonly
   });
 }
 
-function applyContent(state: FoldState, entry: FoldEntry, content: EntryContent): void {
+function applyContent(
+  state: FoldState,
+  entry: FoldEntry,
+  content: EntryContent,
+  steps: readonly Step[],
+): void {
   switch (content.kind) {
     case 'answer':
-      applyAnswer(state, entry, content);
+      applyAnswer(state, entry, content, steps);
       return;
     case 'notApplicable':
       if (isUnknownStep(entry)) return;
@@ -105,6 +111,7 @@ function applyAnswer(
   state: FoldState,
   entry: FoldEntry,
   content: Extract<EntryContent, { kind: 'answer' }>,
+  steps: readonly Step[],
 ): void {
   const judged = entry.server.judgement ?? content.workedOut;
   if (isUnknownStep(entry)) return;
@@ -117,7 +124,10 @@ function applyAnswer(
       content.answer.kind === 'signature'
         ? { deviceId: entry.body.deviceId, count: entry.body.countOnSequence }
         : null,
+    ...(content.answer.kind === 'superheat' && judged.counts ? { readAt: momentOf(entry.body) } : {}),
   });
+  const change = changeOf(entry.body, content, steps);
+  if (change) reopen(state, staleSteps(state, content.stepKey, change, steps), entry.body.id);
   // A note is a word beside the work, not part of what was signed for.
   if (content.answer.kind !== 'signature' && content.answer.kind !== 'note') {
     askSignaturesAgain(state, entry.body);
@@ -143,7 +153,7 @@ function setStep(
   state: FoldState,
   key: string,
   entry: FoldEntry,
-  result: Pick<StepFold, 'outcome' | 'counts' | 'overrideStanding' | 'signed'>,
+  result: Pick<StepFold, 'outcome' | 'counts' | 'overrideStanding' | 'signed' | 'readAt'>,
 ): void {
   const { id, supersedes, authorId } = entry.body;
   const known = state.steps[key];

@@ -10,6 +10,11 @@ export interface StepView {
   readonly fold: StepFold | null;
   readonly history: readonly FoldEntry[];
   readonly current: FoldEntry | null;
+  /**
+   * Why it is asked again; `null` when it isn't. `stale`: a valve, regulator or set point was changed after the reading.
+   * `changed`: the schedule or checklist asks otherwise now. `signedBefore`: something was recorded after the signature.
+   */
+  readonly again: 'remark' | 'changed' | 'signedBefore' | 'stale' | null;
   /** The lead's remark that reopened it; `null` when it isn't asked again. */
   readonly remark: (Remark & { readonly entry: FoldEntry }) | null;
 }
@@ -61,6 +66,7 @@ export function viewSequence(stepList: StepList, entries: readonly FoldEntry[]):
       fold: stepFold,
       history,
       current: history.at(-1) ?? null,
+      again: stepFold?.reopenedBy ? reasonOf(step, reopening) : null,
       remark: remarkOn(step.key, reopening),
     };
   });
@@ -75,6 +81,12 @@ export function viewSequence(stepList: StepList, entries: readonly FoldEntry[]):
     late: entries.filter((entry) => entry.server.standing === 'late'),
     reviews: entries.filter((entry) => entry.body.content.kind === 'review'),
   };
+}
+
+function reasonOf(step: Step, by: FoldEntry | undefined): StepView['again'] {
+  if (by?.body.content.kind === 'review') return 'remark';
+  if (by?.body.content.kind === 'expansion') return 'changed';
+  return step.kind === 'signature' ? 'signedBefore' : 'stale';
 }
 
 function remarkOn(stepKey: string, entry: FoldEntry | undefined): StepView['remark'] {

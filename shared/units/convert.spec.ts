@@ -25,6 +25,11 @@ describe('convert', () => {
     [1, 'barg', 'psig', 14.503774, 6],
     [1, 'bara', 'psia', 14.503774, 6],
     [101.325, 'kPaa', 'Pa', 101325, 6],
+    [1, 'psi_diff', 'Pa_diff', 6894.757, 3],
+    [1, 'bar_diff', 'psi_diff', 14.503774, 6],
+    [-2, 'psi_diff', 'kPa_diff', -13.789515, 6],
+    [100, 'kPa_diff', 'bar_diff', 1, 12],
+    [500, 'micron', 'Pa_vac', 66.6612, 4],
     [1, 'inHg', 'Pa', 3386.39, 2],
     [1, 'Torr', 'micron', 1000, 9],
     [500, 'micron', 'Torr', 0.5, 10],
@@ -54,6 +59,10 @@ describe('convert', () => {
     ['K_diff', 'K'],
     ['psig', 'psia'],
     ['micron', 'Pa'],
+    ['Pa_vac', 'Pa'],
+    ['psi_diff', 'psig'],
+    ['psia', 'psi_diff'],
+    ['Pa_diff', 'Pa_vac'],
     ['W', 'W_el'],
   ])('refuses to turn %s into %s and names both', (from, to) => {
     const attempt = (): number => convert(1, from, to);

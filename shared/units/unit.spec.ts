@@ -7,8 +7,8 @@ const UNIT_IDS = Object.keys(UNITS) as UnitId[];
 const DIMENSIONS = [...new Set(Object.values(UNITS).map((unit) => unit.dimension))];
 
 describe('UNITS', () => {
-  it('holds all fifteen dimensions', () => {
-    expect(DIMENSIONS).toHaveLength(15);
+  it('holds all sixteen dimensions', () => {
+    expect(DIMENSIONS).toHaveLength(16);
   });
 
   it('gives every unit a positive factor', () => {
@@ -23,6 +23,14 @@ describe('UNITS', () => {
   it('has different symbols within a dimension', () => {
     const seen = UNIT_IDS.map((unit) => `${UNITS[unit].dimension} ${UNITS[unit].symbol}`);
     expect(new Set(seen).size).toBe(seen.length);
+  });
+
+  it('tells a pressure’s difference, gauge, absolute and vacuum apart by their dimension alone', () => {
+    expect([UNITS.Pag, UNITS.Pa, UNITS.Pa_vac, UNITS.Pa_diff].map(({ factor }) => factor)).toEqual([
+      1, 1, 1, 1,
+    ]);
+    expect(new Set(['psig', 'psia', 'psi_diff'].map((unit) => UNITS[unit as UnitId].dimension)).size).toBe(3);
+    expect(UNITS.Pa_vac.dimension).toBe('vacuum');
   });
 
   it('shows a difference in °F like a temperature in °F', () => {
@@ -42,6 +50,8 @@ describe('displayUnit', () => {
     expect(displayUnit('gaugePressure', 'si')).toBe('barg');
     expect(displayUnit('temperatureDifference', 'us')).toBe('degF_diff');
     expect(displayUnit('vacuum', 'si')).toBe('micron');
+    expect(displayUnit('pressureDifference', 'us')).toBe('psi_diff');
+    expect(displayUnit('pressureDifference', 'si')).toBe('bar_diff');
   });
 });
 

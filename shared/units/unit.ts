@@ -1,6 +1,7 @@
 /**
  * What kind of quantity a unit measures. A temperature and a temperature difference are two dimensions, so are gauge
- * and absolute pressure, and an evacuation reading (absolute, but read in microns) is a third kind of pressure. Electric
+ * and absolute pressure, and an evacuation reading (absolute, but read in microns) is a third kind of pressure.
+ * A pressure difference (a loss, a line drop, a gauge's accuracy) is neither gauge nor absolute. Electric
  * `power` is apart from `heatFlow`: both are watts, but nobody reads a heater in BTU/h.
  */
 export type Dimension =
@@ -9,6 +10,7 @@ export type Dimension =
   | 'gaugePressure'
   | 'absolutePressure'
   | 'vacuum'
+  | 'pressureDifference'
   | 'length'
   | 'area'
   | 'heatFlow'
@@ -39,6 +41,11 @@ export type UnitId =
   | 'inHg'
   | 'micron'
   | 'Torr'
+  | 'Pa_vac'
+  | 'psi_diff'
+  | 'bar_diff'
+  | 'kPa_diff'
+  | 'Pa_diff'
   | 'm'
   | 'ft'
   | 'in'
@@ -112,6 +119,11 @@ export const UNITS: Readonly<Record<UnitId, Unit>> = {
   inHg: unit('absolutePressure', 'inHg', 3386.389),
   micron: unit('vacuum', 'µm Hg', PASCALS_PER_TORR / 1000),
   Torr: unit('vacuum', 'Torr', PASCALS_PER_TORR),
+  Pa_vac: unit('vacuum', 'Pa', 1),
+  psi_diff: unit('pressureDifference', 'psi', PASCALS_PER_PSI),
+  bar_diff: unit('pressureDifference', 'bar', 1e5),
+  kPa_diff: unit('pressureDifference', 'kPa', 1e3),
+  Pa_diff: unit('pressureDifference', 'Pa', 1),
   m: unit('length', 'm', 1),
   ft: unit('length', 'ft', METRES_PER_FOOT),
   in: unit('length', 'in', METRES_PER_INCH),

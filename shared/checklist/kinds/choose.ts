@@ -1,6 +1,6 @@
 import * as z from 'zod/mini';
 import { plainJudgement, refusedJudgement } from '../judgement';
-import { stepBaseShape } from '../step-base';
+import { changesShape, stepBaseShape } from '../step-base';
 import type { StepRules } from '../step-rules';
 import { textSchema } from '../text';
 
@@ -9,7 +9,12 @@ export const chooseStepSchema = z.object({
   ...stepBaseShape,
   options: z
     .array(
-      z.object({ value: z.string(), label: textSchema, outcome: z.enum(['within', 'outside', 'recorded']) }),
+      z.object({
+        value: z.string(),
+        label: textSchema,
+        outcome: z.enum(['within', 'outside', 'recorded']),
+        ...changesShape,
+      }),
     )
     .check(z.minLength(2)),
 });

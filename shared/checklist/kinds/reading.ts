@@ -2,7 +2,7 @@ import * as z from 'zod/mini';
 import { UNITS, type Dimension, type UnitId } from '../../units/unit';
 import { plainJudgement, refusedJudgement, type Judgement } from '../judgement';
 import { physicalDoubt } from '../physical-range';
-import { stepBaseShape } from '../step-base';
+import { changesShape, stepBaseShape } from '../step-base';
 import type { StepRules } from '../step-rules';
 import { readTypedValue, typedValueSchema } from '../typed-value';
 
@@ -15,6 +15,7 @@ const DIMENSIONS = [...new Set(Object.values(UNITS).map((unit) => unit.dimension
 export const readingStepSchema = z.object({
   kind: z.literal('reading'),
   ...stepBaseShape,
+  ...changesShape,
   dimension: z.enum(DIMENSIONS),
   /** SI. `null` on both sides: the value is recorded, nothing is judged. */
   limits: z.object({ low: z.nullable(z.number()), high: z.nullable(z.number()) }),
