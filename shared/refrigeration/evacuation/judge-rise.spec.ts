@@ -113,9 +113,9 @@ describe('judgeRise', () => {
     expect(working.formula).toBe('vacuumRise');
     const last = working.lines.at(-1);
     expect(last).toMatchObject({ label: 'rise', unit: 'Pa_vac' });
-    expect(last?.value).toBeCloseTo(180, 9);
+    expect(fromSi(last?.value ?? NaN, 'micron')).toBeCloseTo(180, 9);
     const water = working.lines.find((line) => line.label === 'waterVapourPressure');
-    expect(Math.abs((water?.value ?? NaN) / 18790 - 1)).toBeLessThan(5e-4);
+    expect(Math.abs(fromSi(water?.value ?? NaN, 'micron') / 18790 - 1)).toBeLessThan(5e-4);
     expect(working.lines.map((line) => line.label)).not.toContain('leakAbove');
   });
 

@@ -1,4 +1,3 @@
-import { fromSi } from '../../units/convert';
 import type { Kelvin, PascalAbsolute, Second } from '../../units/quantity';
 import type { Working, WorkingLine } from '../working';
 import type { RiseCriteria } from './rise-criteria';
@@ -14,7 +13,7 @@ export interface RiseFigures {
   readonly ambientTemperature: Kelvin | undefined;
 }
 
-/** In microns, not pascals: only so do screens tell a vacuum from an absolute pressure in psi. */
+/** In a vacuum's own unit: only so do screens tell it from an absolute pressure in psi. */
 const vacuum = (label: string, valuePa: number | null): readonly WorkingLine[] =>
   valuePa === null ? [] : [{ label, value: valuePa, unit: 'Pa_vac' }];
 

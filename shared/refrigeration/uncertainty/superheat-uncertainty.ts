@@ -129,7 +129,7 @@ function combine(inputs: UncertaintyInputs, phase: 'dew' | 'bubble'): Uncertaint
   const lines: WorkingLine[] = [
     { label: 'absolutePressure', value: absolutePressure, unit: 'Pa' },
     { label: `${phase}Temperature`, value: slope.temperature, unit: 'K' },
-    { label: 'gaugeAccuracy', value: limitPa, unit: 'Pag' },
+    { label: 'gaugeAccuracy', value: limitPa, unit: 'Pa_diff' },
     { label: 'fromGauge', value: fromGauge, unit: 'K_diff' },
     { label: 'fromThermometer', value: thermometer, unit: 'K_diff' },
     { label: 'worstCase', value: worstCase, unit: 'K_diff' },
