@@ -42,8 +42,9 @@ export class Load {
   }
 
   /**
+   * @template Result what the generator answers to this kind of order
    * @param {object} order
-   * @returns {Promise<any>}
+   * @returns {Promise<Result>}
    */
   #order(order) {
     return new Promise((resolve, reject) => {
@@ -51,7 +52,7 @@ export class Load {
         this.worker.off('message', answered).off('error', broken).off('exit', ended);
         how();
       };
-      const answered = (/** @type {{ result: any, failure?: string }} */ { result, failure }) =>
+      const answered = (/** @type {{ result: Result, failure?: string }} */ { result, failure }) =>
         settle(() => (failure === undefined ? resolve(result) : reject(new ScriptFailure(failure))));
       const broken = (/** @type {Error} */ error) => settle(() => reject(error));
       const ended = () => settle(() => reject(new ScriptFailure('The load generator ended.')));

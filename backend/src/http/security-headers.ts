@@ -23,7 +23,7 @@ export function securityHeaders(secure: boolean): RequestHandler {
         formAction: ["'self'"],
         frameAncestors: ["'none'"],
         requireTrustedTypesFor: ["'script'"],
-        trustedTypes: ['angular', 'angular#bundler', 'angular#components', 'app#sw'],
+        trustedTypes: ['angular', 'angular#bundler', 'angular#components', 'app#sw', 'app#worker'],
         ...(secure ? { upgradeInsecureRequests: [] } : {}),
       },
     },

@@ -59,6 +59,7 @@ describe('JobWorker', () => {
         package: (payload, run) => slow(payload, run),
       },
       pino({ level: 'silent' }),
+      { mail: async (payload) => void jobs.log.push(`abandon ${payload.to}`) },
     );
   });
   afterEach(async () => {
@@ -69,7 +70,7 @@ describe('JobWorker', () => {
   });
 
   const give = (id: string, attempts = 1) =>
-    jobs.waiting.push({ id, companyId: 'c', kind: 'mail', payload: MAIL, attempts });
+    jobs.waiting.push({ id, companyId: 'c', kind: 'mail', payload: MAIL, attempts, isAbandoned: false });
   /** For a job that never ends: nothing to wait for. */
   const forgetWorker = () => {
     worker = new JobWorker(
@@ -95,7 +96,14 @@ describe('JobWorker', () => {
 
   it('lets no mail wait behind a package', async () => {
     slow.mockReturnValue(new Promise(() => undefined));
-    jobs.waiting.push({ id: 'p', companyId: 'c', kind: 'package', payload: {}, attempts: 1 });
+    jobs.waiting.push({
+      id: 'p',
+      companyId: 'c',
+      kind: 'package',
+      payload: {},
+      attempts: 1,
+      isAbandoned: false,
+    });
     give('a');
     worker.start();
     await pass(10);
@@ -145,6 +153,15 @@ describe('JobWorker', () => {
     await pass(10);
     expect(lasts).toEqual([false, true]);
     expect(jobs.log).toEqual(['fail a away 2048', 'fail b away null']);
+  });
+
+  it('puts a job in order whose workers died with it, and does not try it again', async () => {
+    const attempts = JOB_RULES.mail.maxAttempts;
+    jobs.waiting.push({ id: 'a', companyId: 'c', kind: 'mail', payload: MAIL, attempts, isAbandoned: true });
+    worker.start();
+    await pass(10);
+    expect(mail).not.toHaveBeenCalled();
+    expect(jobs.log).toEqual([`abandon ${MAIL.to}`, 'fail a Its workers died with it. null']);
   });
 
   it('goes on with other jobs after one that failed, whatever was thrown', async () => {

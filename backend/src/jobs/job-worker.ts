@@ -19,6 +19,11 @@ export type JobHandlers = {
   readonly [K in JobKind]: (payload: JobPayloads[K], run: JobRun) => Promise<void>;
 };
 
+/** What is left to do for a job that is given up without another try: to leave things in a state that people can read. */
+export type AbandonedHandlers = {
+  readonly [K in JobKind]?: (payload: JobPayloads[K]) => Promise<void>;
+};
+
 const IDLE_MS = 700;
 const HEARTBEAT_MS = 5_000;
 
@@ -33,6 +38,7 @@ export class JobWorker {
     private readonly jobs: JobsRepository,
     private readonly handlers: JobHandlers,
     private readonly logger: Logger,
+    private readonly abandoned: AbandonedHandlers = {},
   ) {}
 
   /** One loop a kind: a mail never waits behind photos, nor a package behind either. */
@@ -55,7 +61,8 @@ export class JobWorker {
   private async loop(kind: JobKind): Promise<void> {
     while (!this.abort.signal.aborted) {
       const job = await this.claim(kind);
-      if (job) await this.run(job);
+      if (job?.isAbandoned) await this.abandon(job);
+      else if (job) await this.run(job);
       else await this.idle();
     }
   }
@@ -95,6 +102,21 @@ export class JobWorker {
       await this.fail(job, error, maxAttempts);
     } finally {
       clearInterval(heartbeat);
+    }
+  }
+
+  /** Puts a job in order whose workers died with it. Whoever dies at this too leaves it to the next claim. */
+  private async abandon(job: ClaimedJob): Promise<void> {
+    this.logger.error({ job: job.id, kind: job.kind }, 'job given up: its workers died with it');
+    const put = this.abandoned[job.kind] as ((payload: unknown) => Promise<void>) | undefined;
+    try {
+      await put?.(job.payload);
+      await this.jobs.fail(this.transactions.outside, job.id, 'Its workers died with it.', null);
+    } catch (error) {
+      this.logger.warn(
+        { err: error, job: job.id },
+        'could not give a job up; tried again when its lease ends',
+      );
     }
   }
 

@@ -145,6 +145,21 @@ describe('JobsRepository', () => {
     expect(await claim()).toBeNull();
   });
 
+  it('hands a job out once more to be put in order when its workers died with every try', async () => {
+    await insert('one');
+    for (let attempt = 1; attempt <= JOB_RULES.mail.maxAttempts; attempt += 1) {
+      const job = await claim();
+      expect(job).toMatchObject({ attempts: attempt, isAbandoned: false });
+      await expireLease(job?.id ?? '');
+    }
+    const left = await claim();
+    expect(left).toMatchObject({ attempts: JOB_RULES.mail.maxAttempts, isAbandoned: true });
+    expect(await claim()).toBeNull();
+    await jobs.fail(outside, left?.id ?? '', 'its workers died with it', null);
+    await expireLease(left?.id ?? '');
+    expect(await claim()).toBeNull();
+  });
+
   it('takes the job that has been due longest', async () => {
     await insert('one');
     await insert('two');

@@ -9,6 +9,8 @@ export interface ClaimedJob {
   readonly kind: JobKind;
   readonly payload: unknown;
   readonly attempts: number;
+  /** Its workers died with it as often as it may be tried: it is only to be put in order, not tried again. */
+  readonly isAbandoned: boolean;
 }
 
 interface JobRow {
@@ -56,21 +58,20 @@ export class JobsRepository {
       (await lockFirst(context, kind, "state = 'running' AND lease_until < UTC_TIMESTAMP(3)"));
     if (!row) return null;
     // A job whose worker dies with it every time must not go on for ever.
-    if (row.attempts >= JOB_RULES[row.kind].maxAttempts) {
-      await managerOf(context).update(JobEntity, { id: row.id }, { state: 'failed', leaseUntil: null });
-      return null;
-    }
+    const isAbandoned = row.attempts >= JOB_RULES[row.kind].maxAttempts;
+    const attempts = isAbandoned ? row.attempts : row.attempts + 1;
     await managerOf(context).query(
-      `UPDATE job SET state = 'running', attempts = attempts + 1,
+      `UPDATE job SET state = 'running', attempts = ?,
               lease_until = UTC_TIMESTAMP(3) + INTERVAL ? SECOND WHERE id = ?`,
-      [JOB_RULES[row.kind].leaseS, row.id],
+      [attempts, JOB_RULES[row.kind].leaseS, row.id],
     );
     return {
       id: row.id,
       companyId: row.company_id,
       kind: row.kind,
       payload: JSON.parse(row.payload),
-      attempts: row.attempts + 1,
+      attempts,
+      isAbandoned,
     };
   }
 
