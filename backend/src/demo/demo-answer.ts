@@ -8,12 +8,36 @@ import type { CircuitSpecification, Fixture } from '#shared/plant/plant';
 import { toGauge } from '#shared/refrigeration/gauge-pressure';
 import { dewPressure } from '#shared/refrigeration/saturation/saturation-curve';
 import { findRefrigerant } from '#shared/refrigeration/saturation/refrigerants';
+import { sha256OfText } from '#shared/sequences/sha256';
 import { fromSi } from '#shared/units/convert';
 import { decimalsFor } from '#shared/units/format';
 import { kelvin, pascalAbsolute } from '#shared/units/quantity';
 import { displayUnit } from '#shared/units/unit-system';
 import { roundTo } from '#shared/units/round';
 import type { Dimension } from '#shared/units/unit';
+import { demoMeasurement } from './demo-measurement';
+
+/** A box that comes down in five hours and then stays in its band, read every two minutes. */
+function demoTrend(step: StepOf<'trend'>, { random }: DemoScene): Answer {
+  const lowK = step.bandLowK ?? step.bandHighK - 3;
+  const target = (lowK + step.bandHighK) / 2;
+  const pullDownS = 5 * 3600;
+  const atS: number[] = [];
+  const temperatureK: number[] = [];
+  for (let at = 0; at <= pullDownS + step.holdS + 1800; at += 120) {
+    atS.push(at);
+    const warm = 22 * Math.exp(-at / 4200);
+    temperatureK.push(roundTo(target + warm + 0.4 * Math.sin(at / 900) + 0.1 * random(), 2));
+  }
+  return {
+    kind: 'trend',
+    file: { name: 'air-probe.csv', sha256: sha256OfText(temperatureK.join()), rows: atS.length },
+    startText: '2026-11-28 18:00',
+    column: 'Air (°F)',
+    atS,
+    temperatureK,
+  };
+}
 
 export interface DemoScene {
   readonly specification: CircuitSpecification;
@@ -40,6 +64,10 @@ export async function demoAnswer(step: Step, scene: DemoScene): Promise<Answer> 
       return { kind: 'reading', value: typed(readingValue(step, scene.random), step.dimension, scene) };
     case 'superheat':
       return superheatAnswer(step, scene);
+    case 'measurement':
+      return demoMeasurement(step, scene);
+    case 'trend':
+      return demoTrend(step, scene);
     case 'photo':
       return { kind: 'photo', photos: await photos(step.minCount, scene) };
     case 'note':

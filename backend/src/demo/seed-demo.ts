@@ -4,9 +4,11 @@ import type { Logger } from 'pino';
 import type { Role } from '#shared/access/roles';
 import type { CircuitRow, NewOpening } from '#shared/contracts/openings';
 import type { CompanyId, OpeningId, PersonId, SequenceId } from '#shared/plant/ids';
+import type { Level } from '#shared/plant/words';
 import { PROJECT_FOLDER } from '../app/project-folder';
 import type { Services } from '../app/services';
 import type { Caller } from '../http/define-route';
+import { saveDemoDefrostPlan } from './demo-defrost-plan';
 import { DemoInstaller, type DemoWork } from './demo-installer';
 import { demoSignature } from './demo-answer';
 import { steadyNumbers } from './steady-numbers';
@@ -19,6 +21,9 @@ interface DemoAccount {
 }
 
 const DAY_MS = 86_400_000;
+
+/** How far the first suction group's own work has come, before the circuits that hang on it. */
+const GROUP_STORY: DemoWork = { share: 0.6, submit: false };
 
 /** What happens to the first circuits of the demo opening, in the order of its schedule. */
 const STORY: readonly (DemoWork & { readonly verdict?: 'approved' | 'sentBack' })[] = [
@@ -47,7 +52,9 @@ export async function seedDemo(services: Services, logger: Logger): Promise<void
     people,
   );
   await addOpening(services, admin, openingOf('Mill Road Market', '88 Mill Road, Eastwick', 61), people);
-  await importSchedule(services, await callerOf(services, people.first('lead')), harbor);
+  const lead = await callerOf(services, people.first('lead'));
+  await importSchedule(services, lead, harbor);
+  await saveDemoDefrostPlan(services, lead, harbor);
   await tellStory(services, harbor, people);
   logger.info('demo opening filled in');
 }
@@ -120,7 +127,11 @@ async function tellStory(services: Services, openingId: OpeningId, people: DemoP
   const lead = await callerOf(services, people.first('lead'));
   const installer = await callerOf(services, people.first('installer'));
   const { items } = await services.openings.listCircuits(openingId, 200, undefined);
-  const mine = items.filter((row) => row.sequenceId !== null).slice(0, 16);
+  const worked = items.filter((row) => row.sequenceId !== null);
+  const circuits = worked.filter((row) => row.level === 'circuit').slice(0, 16);
+  const first = (level: Level) => worked.find((row) => row.level === level) as CircuitRow;
+  const group = first('suctionGroup');
+  const mine = [first('system'), group, ...circuits];
   await services.openings.assign(
     lead.person,
     openingId,
@@ -129,8 +140,9 @@ async function tellStory(services: Services, openingId: OpeningId, people: DemoP
   );
   const random = steadyNumbers(2026);
   const phone = await DemoInstaller.begin(services, installer, random, new Date(Date.now() - 2 * DAY_MS));
+  await phone.work(group.sequenceId as SequenceId, GROUP_STORY);
   for (const [index, chapter] of STORY.entries()) {
-    const row = mine[index] as CircuitRow;
+    const row = circuits[index] as CircuitRow;
     const sequenceId = row.sequenceId as SequenceId;
     await phone.work(sequenceId, chapter);
     if (chapter.verdict) await giveVerdict(services, lead, sequenceId, chapter.verdict, random);

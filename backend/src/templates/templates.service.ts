@@ -2,6 +2,8 @@ import type { StepList } from '#shared/checklist/step';
 import type { CircuitSpecification } from '#shared/plant/plant';
 import { sha256OfText } from '#shared/sequences/sha256';
 import type { Context } from '../database/transactions';
+import { tableOf } from '../refrigerants/company-tables';
+import type { RefrigerantsService } from '../refrigerants/refrigerants.service';
 import { chooseTemplate } from './engine/choose-template';
 import { expandTemplate } from './engine/expand-template';
 import { loadShippedTemplates } from './engine/load-shipped-templates';
@@ -16,6 +18,7 @@ export class TemplatesService {
 
   constructor(
     private readonly templates: TemplatesRepository,
+    private readonly refrigerants: RefrigerantsService,
     private readonly shippedFolder: string,
   ) {}
 
@@ -32,7 +35,10 @@ export class TemplatesService {
     }
   }
 
-  /** The steps of each circuit, by the company's newest templates; `null` where none applies. */
+  /**
+   * The steps of each circuit, by the company's newest templates and the makers' tables that it works with now; `null`
+   * where no template applies.
+   */
   async expand(
     context: Context,
     companyId: string,
@@ -40,9 +46,11 @@ export class TemplatesService {
   ): Promise<(StepList | null)[]> {
     const rows = await this.templates.findNewest(context, companyId);
     const documents = rows.map((row) => this.parse(row.source, row.sourceHash, `${row.key}.yaml`));
+    const tables = await this.refrigerants.inUse(context, companyId);
     return specifications.map((specification) => {
-      const document = chooseTemplate(documents, specification);
-      return document && expandTemplate(document, specification);
+      const makersTable = tableOf(tables, specification.system.refrigerant);
+      const document = chooseTemplate(documents, specification, makersTable);
+      return document && expandTemplate(document, specification, makersTable);
     });
   }
 

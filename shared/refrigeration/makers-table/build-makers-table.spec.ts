@@ -141,6 +141,13 @@ describe('buildMakersTable', () => {
     expect(buildMakersTable(received)).toEqual(buildMakersTable(sent));
   });
 
+  it('carries the safety class that was said, and none that wasn’t', () => {
+    const table = makersTable(printedPoints(r448a, printing));
+    const classOf = (built: ReturnType<typeof buildMakersTable>) => built.ok && built.table.safetyClass;
+    expect(classOf(buildMakersTable({ ...table, safetyClass: 'B2L' }))).toBe('B2L');
+    expect(classOf(buildMakersTable(table))).toBeNull();
+  });
+
   it('is built in spite of questions', () => {
     const built = buildMakersTable({ ...makersTable(printedPoints(r448a, printing)), edition: '' });
     expect(built.ok && built.table.source).toBe('pressure–temperature table of a maker');

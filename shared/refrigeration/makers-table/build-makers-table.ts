@@ -85,7 +85,7 @@ export function buildMakersTable(table: MakersTable): BuiltMakersTable {
       bubblePa: finePressures(table.points, 'bubble', temperaturesK),
       dewPa: finePressures(table.points, 'dew', temperaturesK),
       glide: hasGlide(table.points),
-      safetyClass: null,
+      safetyClass: table.safetyClass ?? null,
       limitNote: {
         en: 'From the refrigerant maker’s own table as it was entered for this job; its figures were checked for order and smoothness only.',
         es: 'De la propia tabla del fabricante del refrigerante, tal como se introdujo para esta obra; solo se comprobó que sus cifras sean ordenadas y continuas.',

@@ -1,4 +1,5 @@
 import type { Kelvin, PascalAbsolute } from '../../units/quantity';
+import type { SafetyClass } from '../saturation/saturation-table';
 import type { WorkingLine } from '../working';
 
 /** One printed row: both pressures at one temperature. Of a pure refrigerant the two are the same. */
@@ -20,6 +21,8 @@ export interface MakersTable {
   readonly points: readonly MakersPoint[];
   /** The last digit of the printed pressures in pascals; leave out when unknown: a tenth of a psi is assumed. */
   readonly printedStepPa?: number;
+  /** As the sheet or the cylinder says; no figure depends on it. Leave out while nobody has said. */
+  readonly safetyClass?: SafetyClass;
 }
 
 /**

@@ -1,5 +1,9 @@
-/** Safety group of ANSI/ASHRAE Standard 34: toxicity A (lower), flammability 1 (none), 2L, 3. */
-export type SafetyClass = 'A1' | 'A2L' | 'A3';
+/**
+ * Safety groups of ANSI/ASHRAE Standard 34: toxicity A (lower) or B (higher); flammability 1 (no flame propagation), 2L
+ * (lower), 2, 3 (higher).
+ */
+export const SAFETY_CLASSES = ['A1', 'A2L', 'A2', 'A3', 'B1', 'B2L', 'B2', 'B3'] as const;
+export type SafetyClass = (typeof SAFETY_CLASSES)[number];
 
 /** Temperatures of a table's rows: evenly spaced, or written out in kelvin where a maker's table is uneven. */
 export type TemperatureGrid = { readonly startK: number; readonly stepK: number } | readonly number[];

@@ -1,4 +1,6 @@
 import { unreachable } from '#shared/failures/unreachable';
+import { METHODS } from '#shared/checklist/methods/methods';
+import type { Level } from '#shared/plant/words';
 import type { Dimension } from '#shared/units/unit';
 import type { Scope } from './fact-fields';
 import type { WrittenStep } from './step-shape';
@@ -20,8 +22,15 @@ export function checkStep(
   path: YamlPath,
   step: WrittenStep,
   sectionWhen: Condition | null,
+  level: Level,
 ): StepDocument {
-  const scope: Scope = step.for_each ?? 'circuit';
+  const scope: Scope = step.for_each ?? level;
+  if (step.for_each && level !== 'circuit') {
+    checker.report(
+      [...path, 'for_each'],
+      `Only a circuit has fixtures and coils; this template is for a ${level}.`,
+    );
+  }
   checker.text([...path, 'title'], step.title, scope);
   checker.text([...path, 'instruction'], step.instruction, scope);
   checker.text([...path, 'caution', 'text'], step.caution?.text, scope);
@@ -53,7 +62,10 @@ function hasCriterion(body: StepBody): boolean {
     case 'reading':
       return body.low !== null || body.high !== null;
     case 'superheat':
+    case 'trend':
       return true;
+    case 'measurement':
+      return body.criteria.size > 0;
     case 'choose':
       return body.options.some((option) => option.outcome !== 'recorded');
     default:
@@ -65,6 +77,7 @@ function checkBody(place: Place, step: WrittenStep): StepBody {
   const { checker, path, scope } = place;
   switch (step.kind) {
     case 'confirm':
+      return { kind: step.kind, changes: step.changes ?? false };
     case 'note':
       return { kind: step.kind };
     case 'choose':
@@ -73,6 +86,10 @@ function checkBody(place: Place, step: WrittenStep): StepBody {
       return checkReading(place, step);
     case 'superheat':
       return checkSuperheat(place, step);
+    case 'measurement':
+      return checkMeasurement(place, step);
+    case 'trend':
+      return checkTrend(place, step);
     case 'photo':
       return { kind: 'photo', minCount: step.min_count };
     case 'override':
@@ -95,7 +112,8 @@ function checkOptions({ checker, path, scope }: Place, step: WrittenStep & { kin
       checker.report([...optionPath, 'value'], `\`${option.value}\` stands here twice.`);
     seen.add(option.value);
   });
-  return { kind: 'choose', options: step.options };
+  const options = step.options.map((option) => ({ ...option, changes: option.changes ?? false }));
+  return { kind: 'choose', options };
 }
 
 function checkReading(place: Place, step: WrittenStep & { kind: 'reading' }): StepBody {
@@ -105,17 +123,71 @@ function checkReading(place: Place, step: WrittenStep & { kind: 'reading' }): St
     place.checker.report(path, '`limits` holds low, high or both; without it the value is recorded.');
   }
   const limits = checkLimits(place, path, step.dimension, low, high);
-  return { kind: 'reading', dimension: step.dimension, ...limits };
+  return { kind: 'reading', changes: step.changes ?? false, dimension: step.dimension, ...limits };
 }
 
 function checkSuperheat(place: Place, step: WrittenStep & { kind: 'superheat' }): StepBody {
   if (place.scope !== 'coil') {
     place.checker.report([...place.path, 'kind'], 'Superheat is set per coil: write for_each: coil.');
   }
-  if (!step.band) return { kind: 'superheat', band: null };
+  const rest = {
+    kind: 'superheat',
+    judgedBy: step.judged_by === 'time_weighted' ? 'timeWeighted' : 'midpoint',
+    wait: checkLimit(place, 'wait', step.wait, 'duration'),
+  } as const;
+  if (!step.band) return { ...rest, band: null };
   const path = [...place.path, 'band'];
   const { low, high } = checkLimits(place, path, 'temperatureDifference', step.band.low, step.band.high);
-  return { kind: 'superheat', band: low && high ? { low, high } : null };
+  return { ...rest, band: low && high ? { low, high } : null };
+}
+
+/** A template writes `least_hold` where the method says `leastHold`. */
+const written = (key: string): string => key.replace(/[A-Z]/g, (letter) => `_${letter.toLowerCase()}`);
+
+function checkMeasurement(place: Place, step: WrittenStep & { kind: 'measurement' }): StepBody {
+  const declared = METHODS[step.method].criteria;
+  const criteria = new Map<string, PlacedLimit>();
+  const path = [...place.path, 'criteria'];
+  for (const criterion of declared) {
+    const name = written(criterion.key);
+    const text = step.criteria?.[name];
+    if (text === undefined) {
+      if (criterion.required)
+        place.checker.report(
+          [...place.path, 'method'],
+          `\`${step.method}\` needs the criterion \`${name}\`.`,
+        );
+      continue;
+    }
+    const limit = place.checker.limit([...path, name], text, criterion.dimension, place.scope, place.guards);
+    if (limit) criteria.set(criterion.key, limit);
+  }
+  const known = declared.map((criterion) => written(criterion.key));
+  for (const name of Object.keys(step.criteria ?? {})) {
+    if (known.includes(name)) continue;
+    const offer = known.length === 0 ? 'it has none' : `it has ${known.join(', ')}`;
+    place.checker.report([...path, name], `\`${step.method}\` has no criterion \`${name}\`: ${offer}.`);
+  }
+  return { kind: 'measurement', changes: step.changes ?? false, method: step.method, criteria };
+}
+
+function checkTrend(place: Place, step: WrittenStep & { kind: 'trend' }): StepBody {
+  const band = [...place.path, 'band'];
+  return {
+    kind: 'trend',
+    ...checkLimits(place, band, 'temperature', step.band.low, step.band.high),
+    hold: checkLimit(place, 'hold', step.hold, 'duration'),
+    longestExcursion: checkLimit(place, 'longest_excursion', step.longest_excursion, 'duration'),
+  };
+}
+
+function checkLimit(
+  { checker, path, scope, guards }: Place,
+  key: string,
+  text: string | undefined,
+  dimension: Dimension,
+): PlacedLimit | null {
+  return text === undefined ? null : checker.limit([...path, key], text, dimension, scope, guards);
 }
 
 function checkLimits(

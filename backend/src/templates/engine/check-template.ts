@@ -1,3 +1,4 @@
+import type { Level } from '#shared/plant/words';
 import { checkStep } from './check-step';
 import { refuseTemplate } from './refuse-template';
 import { shapeProblems } from './shape-problem';
@@ -17,10 +18,10 @@ export function checkTemplate(source: SourceText, yaml: YamlDocument): TemplateD
   if (!shaped.success) return refuseTemplate(source, shapeProblems(shaped.error.issues, yaml));
   const written = shaped.data;
   const checker = new TemplateChecker(yaml);
-  checker.text(['title'], written.title, 'circuit');
-  const applies = checker.condition(['applies'], written.applies, 'circuit', []);
+  checker.text(['title'], written.title, written.level);
+  const applies = checker.condition(['applies'], written.applies, written.level, []);
   const sections = written.sections.map((section, index) =>
-    checkSection(checker, ['sections', index], section),
+    checkSection(checker, ['sections', index], section, written.level),
   );
   checkKeys(checker, written);
   if (!applies || checker.problems.length > 0) return refuseTemplate(source, checker.problems);
@@ -32,15 +33,18 @@ function checkSection(
   checker: TemplateChecker,
   path: YamlPath,
   section: WrittenTemplate['sections'][number],
+  level: Level,
 ): SectionDocument {
-  checker.text([...path, 'title'], section.title, 'circuit');
+  checker.text([...path, 'title'], section.title, level);
   const when =
-    section.when === undefined ? null : checker.condition([...path, 'when'], section.when, 'circuit', []);
+    section.when === undefined ? null : checker.condition([...path, 'when'], section.when, level, []);
   return {
     key: section.key,
     title: section.title,
     when,
-    steps: section.steps.map((step, index) => checkStep(checker, [...path, 'steps', index], step, when)),
+    steps: section.steps.map((step, index) =>
+      checkStep(checker, [...path, 'steps', index], step, when, level),
+    ),
   };
 }
 

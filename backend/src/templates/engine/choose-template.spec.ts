@@ -1,6 +1,6 @@
 import { describe, expect, it } from '@jest/globals';
 import { chooseTemplate } from './choose-template';
-import { specificationWith } from './circuit-specification.fixture';
+import { classedTable, specificationWith } from './circuit-specification.fixture';
 import { parseTemplate } from './parse-template';
 import { templateText } from './written-template.fixture';
 
@@ -20,6 +20,13 @@ describe('chooseTemplate', () => {
     const cases = template('cases', 1, 20, 'circuit.temperatureClass == "medium"');
     const plain = template('plain', 1, 0);
     expect(chooseTemplate([plain, walkIn, cases], specification)).toBe(cases);
+  });
+
+  it('knows the safety class by the maker’s table that the company works by', () => {
+    const burning = template('burning', 1, 90, 'system.safetyClass != "A1"');
+    const plain = template('plain', 1, 0);
+    expect(chooseTemplate([plain, burning], specification)).toBe(plain);
+    expect(chooseTemplate([plain, burning], specification, classedTable('R-448A', 'A2L'))).toBe(burning);
   });
 
   it('gives null when none applies', () => {

@@ -1,5 +1,7 @@
+import type { MakersTableFacts } from '#shared/checklist/facts';
 import type { Circuit, CircuitSpecification, Fixture } from '#shared/plant/plant';
 import { circuitSpecificationSchema } from '#shared/plant/plant';
+import type { Level } from '#shared/plant/words';
 
 /** Ids that a test can read: the digit tells what it is, the number which. */
 const uuid = (digit: number, number: number) =>
@@ -79,4 +81,33 @@ export function specificationWith(changes: Changes = {}): CircuitSpecification {
       ],
     },
   });
+}
+
+/** A maker's table of which only the safety class matters: expanding works nothing out of its figures. */
+export const classedTable = (
+  designation: string,
+  safetyClass: MakersTableFacts['safetyClass'],
+): MakersTableFacts => ({
+  designation,
+  issuer: 'Example Gases',
+  edition: '2026-01',
+  printedStepPa: 690,
+  safetyClass,
+  points: [],
+});
+
+/** The same plant, for the own work of its suction group or its system. */
+export function atLevel(level: Level, specification: CircuitSpecification): CircuitSpecification {
+  if (level === 'circuit') return specification;
+  const { system, suctionGroup, circuit } = specification;
+  return {
+    ...specification,
+    level,
+    suctionGroup: level === 'system' ? null : suctionGroup,
+    circuit: {
+      ...circuit,
+      code: level === 'system' ? system.name : `${system.name} ${suctionGroup?.name ?? ''}`,
+      fixtures: [],
+    },
+  };
 }

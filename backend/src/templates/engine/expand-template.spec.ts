@@ -1,8 +1,10 @@
 import { describe, expect, it } from '@jest/globals';
 import type { StepList } from '#shared/checklist/step';
 import { DomainFailure } from '#shared/failures/failure';
+import { SAFETY_CLASSES } from '#shared/refrigeration/saturation/saturation-table';
 import { canonicalJson } from '#shared/sequences/canonical-json';
 import {
+  classedTable,
   COIL_A1,
   COIL_B1,
   COIL_B2,
@@ -72,6 +74,44 @@ describe('expandTemplate', () => {
     expect(template).toEqual({ key: 'trial', version: 3, title: { en: 'Trial', es: 'Prueba' } });
     expect(facts).toMatchObject({ refrigerant: 'R-448A', elevationM: 1609.344, unitSystem: 'si' });
     expect(facts.atmospherePaAbs / 1000).toBeCloseTo(83.43, 1);
+  });
+
+  describe('asks for the flammability step by the safety class', () => {
+    const text = stepsOf(
+      stepText('kind: confirm', 'key: flammable-ready', `when: 'system.safetyClass != "A1"'`),
+      CONFIRM,
+    );
+    const keysOf = (refrigerant: string, table?: ReturnType<typeof classedTable>) =>
+      expandTemplate(
+        parseTemplate(text, 'trial.yaml'),
+        specificationWith({ system: { refrigerant } }),
+        table,
+      ).steps.map(({ key }) => key);
+
+    // Shipped tables: R-448A and R-744 are A1, R-32 A2L, R-290 A3 (ANSI/ASHRAE Standard 34).
+    it.each([
+      ['R-448A', []],
+      ['R-744', []],
+      ['R-32', ['flammable-ready']],
+      ['R-290', ['flammable-ready']],
+    ])('of the program’s own %s', (refrigerant, asked) => {
+      expect(keysOf(refrigerant)).toEqual([...asked, 'look']);
+    });
+
+    it.each(SAFETY_CLASSES)('of a maker’s table that says %s', (safetyClass) => {
+      const keys = keysOf('R-9X1', classedTable('R-9X1', safetyClass));
+      expect(keys).toEqual(safetyClass === 'A1' ? ['look'] : ['flammable-ready', 'look']);
+    });
+
+    it('of the maker’s table before the program’s own', () => {
+      expect(keysOf('R-448A', classedTable('R-448A', 'A2L'))).toEqual(['flammable-ready', 'look']);
+      // Entered by a slip: what is known to burn keeps its step.
+      expect(keysOf('R-290', classedTable('R-290', 'A1'))).toEqual(['flammable-ready', 'look']);
+    });
+
+    it('also where nobody knows the class', () => {
+      expect(keysOf('R-9X1')).toEqual(['flammable-ready', 'look']);
+    });
   });
 
   it('gives the same bytes twice', () => {
@@ -246,7 +286,7 @@ describe('expandTemplate refuses', () => {
 
   it('a circuit for which no step is left', () => {
     const failure = refusal(stepsOf(stepText('kind: confirm', 'key: a', 'when: circuit.hasWalkIn')));
-    expect(failure.message).toMatch(/None of the steps is there for circuit A07/);
+    expect(failure.message).toMatch(/None of the steps is there for A07/);
   });
 
   it('more than 2,000 steps, and takes exactly 2,000', () => {

@@ -1,4 +1,4 @@
-import type { SequenceFacts } from '#shared/checklist/facts';
+import type { MakersTableFacts, SequenceFacts } from '#shared/checklist/facts';
 import { stepListSchema, type Section, type Step, type StepList } from '#shared/checklist/step';
 import { Bug, DomainFailure } from '#shared/failures/failure';
 import type { CircuitSpecification } from '#shared/plant/plant';
@@ -8,7 +8,7 @@ import { isTrue } from './evaluate';
 import { expandStep, type StepTarget } from './expand-step';
 import { fillPlaceholders } from './placeholder';
 import { refuseTemplate } from './refuse-template';
-import { circuitFacts, coilFacts, fixtureFacts, type Facts } from './specification-facts';
+import { specificationFacts, coilFacts, fixtureFacts, type Facts } from './specification-facts';
 import type { SectionDocument, StepDocument, TemplateDocument } from './template-document';
 
 /** A circuit with more steps than this would never be walked through; a template that makes them is a mistake. */
@@ -18,11 +18,17 @@ export const MOST_STEPS = 2000;
  * Makes the steps of one circuit. The same template version and the same specification give the same bytes: order is
  * the template's order, then the specification's.
  *
+ * @param makersTable of the system's refrigerant, where the company works by one: it takes precedence over the program's
+ *   own figures
  * @throws {DomainFailure} templateRefused when an expression has no answer for this circuit, limits cross, or there
  *   are no steps or more than 2,000; invalidInput when the opening's elevation has no standard atmosphere
  */
-export function expandTemplate(template: TemplateDocument, specification: CircuitSpecification): StepList {
-  const facts = circuitFacts(specification);
+export function expandTemplate(
+  template: TemplateDocument,
+  specification: CircuitSpecification,
+  makersTable?: MakersTableFacts,
+): StepList {
+  const facts = specificationFacts(specification, makersTable);
   const sections: Section[] = [];
   const steps: Step[] = [];
   for (const section of template.sections) {
@@ -34,14 +40,14 @@ export function expandTemplate(template: TemplateDocument, specification: Circui
   if (steps.length === 0) {
     const offset = template.sections[0]?.steps[0]?.offset ?? 0;
     refuseTemplate(template.source, [
-      { offset, sentence: `None of the steps is there for circuit ${specification.circuit.code}.` },
+      { offset, sentence: `None of the steps is there for ${specification.circuit.code}.` },
     ]);
   }
   const { key, version, title } = template;
   const list = stepListSchema.safeParse({
     format: 1,
     template: { key, version, title: fill(title, facts) },
-    facts: sequenceFacts(specification),
+    facts: sequenceFacts(specification, makersTable),
     sections,
     steps,
   });
@@ -50,7 +56,10 @@ export function expandTemplate(template: TemplateDocument, specification: Circui
   return list.data;
 }
 
-function sequenceFacts({ opening, system }: CircuitSpecification): SequenceFacts {
+function sequenceFacts(
+  { opening, system }: CircuitSpecification,
+  makersTable: MakersTableFacts | undefined,
+): SequenceFacts {
   const atmosphere = standardAtmosphere(metre(opening.elevationM));
   if (!atmosphere.ok) {
     throw new DomainFailure('invalidInput', 'There is no standard atmosphere at this elevation.', [
@@ -59,6 +68,7 @@ function sequenceFacts({ opening, system }: CircuitSpecification): SequenceFacts
   }
   return {
     refrigerant: system.refrigerant,
+    ...(makersTable ? { makersTable } : {}),
     atmospherePaAbs: atmosphere.pressure,
     elevationM: opening.elevationM,
     unitSystem: opening.unitSystem,
@@ -107,7 +117,7 @@ function targetsOf(
   specification: CircuitSpecification,
   facts: Facts,
 ): StepTarget[] {
-  if (scope === 'circuit') return [{ facts, fixture: null, coil: null }];
+  if (scope !== 'fixture' && scope !== 'coil') return [{ facts, fixture: null, coil: null }];
   return specification.circuit.fixtures.flatMap((fixture): StepTarget[] => {
     const withFixture = { ...facts, fixture: fixtureFacts(fixture) };
     if (scope === 'fixture') return [{ facts: withFixture, fixture, coil: null }];

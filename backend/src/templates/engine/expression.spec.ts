@@ -5,7 +5,7 @@ import type { Scope } from './fact-fields';
 import { specificationWith } from './circuit-specification.fixture';
 import { parseTemplate } from './parse-template';
 import { sizeOf } from './quantity-facts';
-import { circuitFacts, coilFacts, fixtureFacts } from './specification-facts';
+import { specificationFacts, coilFacts, fixtureFacts } from './specification-facts';
 import { stepText, templateText } from './written-template.fixture';
 
 function refusals(text: string, scope: Scope = 'circuit', wanted: Wanted = 'bool'): [number, string][] {
@@ -20,7 +20,7 @@ function valueOf(text: string, wanted: Wanted = 'bool', specification = specific
   const compiled = compileExpression(text, 'coil', wanted);
   if (!compiled.ok) throw new Error(JSON.stringify(compiled.problems));
   return compiled.expression.evaluate({
-    ...circuitFacts(specification),
+    ...specificationFacts(specification),
     fixture: fixtureFacts(fixture),
     coil: coilFacts(coil),
   });
@@ -235,7 +235,7 @@ describe('parseTemplate on expressions', () => {
   });
 
   it.each<[text: string, sentence: RegExp]>([
-    ['{{fixture.tag}}', /known only in a step with for_each/],
+    ['{{fixture.tag}}', /not known at this place, which knows opening, system, suctionGroup, circuit/],
     ['{{circuit.colour}}', /There is no such fact: circuit.colour/],
     ['{{opening.elevationM}}', /can't stand in a text/],
     ['{{circuit.fixtures}}', /can't stand in a text/],

@@ -1,7 +1,7 @@
 /** Fields of the specification as expressions see them, by type name; the order matters: a type before its user. */
 export const FACT_FIELDS = {
   Opening: { name: 'string', elevationM: 'Length', unitSystem: 'string' },
-  System: { name: 'string', kind: 'string', refrigerant: 'string' },
+  System: { name: 'string', kind: 'string', refrigerant: 'string', safetyClass: 'string' },
   SuctionGroup: { name: 'string', temperatureClass: 'string', saturatedSuctionTemperatureK: 'Temperature' },
   Coil: { number: 'int' },
   Fixture: {
@@ -35,6 +35,8 @@ export const FACT_FIELDS = {
     temperatureClass: 'string',
     feed: 'string',
     control: 'string',
+    evaporatingTemperatureK: 'Temperature',
+    evaporatingBasis: 'string',
     hasLoad: 'bool',
     loadW: 'HeatFlow',
     defrost: 'Defrost',
@@ -53,14 +55,17 @@ export const GUARDS: Readonly<Record<string, string>> = {
   loadW: 'hasLoad',
 };
 
-/** Where a step stands: there once, repeated for each fixture, or repeated for each coil. */
-export const SCOPES = ['circuit', 'fixture', 'coil'] as const;
+/** Where a step stands: there once, at the template's level, or repeated for each fixture or coil of a circuit. */
+export const SCOPES = ['system', 'suctionGroup', 'circuit', 'fixture', 'coil'] as const;
 export type Scope = (typeof SCOPES)[number];
 
-const CIRCUIT_NAMES = ['opening', 'system', 'suctionGroup', 'circuit'] as const;
+const GROUP_NAMES = ['opening', 'system', 'suctionGroup'] as const;
+const CIRCUIT_NAMES = [...GROUP_NAMES, 'circuit'] as const;
 
 /** The names that expressions and placeholders may begin with. */
 export const NAMES: Readonly<Record<Scope, readonly string[]>> = {
+  system: ['opening', 'system'],
+  suctionGroup: GROUP_NAMES,
   circuit: CIRCUIT_NAMES,
   fixture: [...CIRCUIT_NAMES, 'fixture'],
   coil: [...CIRCUIT_NAMES, 'fixture', 'coil'],

@@ -151,10 +151,10 @@ describe('parseTemplate refuses a wrong shape:', () => {
       '`min_count` is missing here: a photo step says how many photos it needs.',
     ],
     [
-      'a reserved level',
-      templateText().replace('level: circuit', 'level: system'),
+      'an unknown level',
+      templateText().replace('level: circuit', 'level: store'),
       '3:8',
-      '`level` must be circuit.',
+      '`level` must be one of system, suctionGroup, circuit.',
     ],
     [
       'a version that is no number',
@@ -180,7 +180,7 @@ describe('parseTemplate refuses a wrong shape:', () => {
       'an unknown dimension',
       templateText({ steps: stepText('kind: reading', 'key: a', 'dimension: colour') }),
       '14:20',
-      '`dimension` must be one of temperature, temperatureDifference, gaugePressure, absolutePressure, vacuum, length, area, heatFlow, mass, duration, electricCurrent, voltage, power, ratio, count.',
+      '`dimension` must be one of temperature, temperatureDifference, gaugePressure, absolutePressure, vacuum, pressureDifference, length, area, heatFlow, mass, duration, electricCurrent, voltage, power, ratio, count.',
     ],
     [
       'a choice of one',

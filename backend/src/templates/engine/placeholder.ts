@@ -34,7 +34,7 @@ function wrongWith(path: string, scope: Scope): string | null {
   const type = TYPE_OF_NAME[owner]?.[parts.at(-1) ?? ''];
   if (type === undefined || !Object.hasOwn(TYPE_OF_NAME, owner)) return `There is no such fact: ${path}.`;
   if (!NAMES[scope].includes(parts[0] ?? '')) {
-    return `\`${parts[0] ?? ''}\` is known only in a step with for_each; this place knows ${NAMES[scope].join(', ')}.`;
+    return `\`${parts[0] ?? ''}\` is not known at this place, which knows ${NAMES[scope].join(', ')}.`;
   }
   if (type === 'string' || type === 'int') return null;
   return `\`${path}\` can't stand in a text: a quantity is shown by the step's limits, in the opening's units.`;

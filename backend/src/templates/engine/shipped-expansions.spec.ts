@@ -1,7 +1,9 @@
 import { join } from 'node:path';
 import { describe, expect, it } from '@jest/globals';
 import type { Step } from '#shared/checklist/step';
+import type { Level } from '#shared/plant/words';
 import {
+  atLevel,
   COIL_A1,
   COIL_B1,
   COIL_B2,
@@ -12,6 +14,7 @@ import {
 import { chooseTemplate } from './choose-template';
 import { expandTemplate } from './expand-template';
 import { loadShippedTemplates } from './load-shipped-templates';
+import { EXPANSIONS } from './shipped-expansions.fixture';
 
 const documents = loadShippedTemplates(join(__dirname, '../../../../templates')).map(
   ({ document }) => document,
@@ -31,243 +34,9 @@ function shortOf(step: Step): string {
   return `${step.kind} ${key ?? ''}${id === undefined ? '' : ` ${SHORT[id] ?? id}`}`;
 }
 
-interface Expansion {
-  readonly key: string;
-  readonly changes: Parameters<typeof specificationWith>[0];
-  readonly steps: readonly string[];
-}
-
-/** What each shipped template makes of a circuit with fixture A of one coil and fixture B of two. */
-const EXPANSIONS: readonly Expansion[] = [
-  {
-    key: 'medium-temperature-cases',
-    changes: {},
-    steps: [
-      'confirm right-circuit',
-      'reading store-air',
-      'reading store-humidity',
-      'photo clean-photo A',
-      'confirm fans A',
-      'choose drain A',
-      'photo clean-photo B',
-      'confirm fans B',
-      'choose drain B',
-      'confirm suction-ready',
-      'override defrost-held',
-      'reading since-defrost',
-      'reading regulator-set',
-      'superheat superheat A1',
-      'superheat superheat B1',
-      'superheat superheat B2',
-      'choose regulator-again',
-      'confirm caps-and-bulbs',
-      'confirm defrost-settings',
-      'choose after-defrost',
-      'reading discharge-air A',
-      'reading discharge-air B',
-      'note remarks',
-      'signature installer-signature',
-    ],
-  },
-  {
-    key: 'low-temperature-electric-defrost',
-    changes: {
-      circuit: { temperatureClass: 'low' },
-      defrost: { type: 'electric', terminationTemperatureK: 285.0 },
-    },
-    steps: [
-      'confirm right-circuit',
-      'photo clean-photo A',
-      'confirm fans A',
-      'choose drain A',
-      'choose doors A',
-      'reading heater-amps A',
-      'reading anti-sweat-amps A',
-      'photo clean-photo B',
-      'confirm fans B',
-      'choose drain B',
-      'choose doors B',
-      'reading heater-amps B',
-      'reading anti-sweat-amps B',
-      'confirm suction-ready',
-      'override defrost-held',
-      'reading since-defrost',
-      'reading regulator-set',
-      'superheat superheat A1',
-      'superheat superheat B1',
-      'superheat superheat B2',
-      'choose regulator-again',
-      'confirm caps-and-bulbs',
-      'confirm defrost-settings',
-      'reading defrost-end-temperature',
-      'reading defrost-duration',
-      'choose after-defrost',
-      'reading discharge-air A',
-      'reading discharge-air B',
-      'note remarks',
-      'signature installer-signature',
-    ],
-  },
-  {
-    key: 'low-temperature-hot-gas-defrost',
-    changes: {
-      circuit: { temperatureClass: 'low' },
-      defrost: { type: 'hotGas', terminationTemperatureK: 285.0 },
-    },
-    steps: [
-      'confirm right-circuit',
-      'photo clean-photo A',
-      'confirm fans A',
-      'choose doors A',
-      'photo clean-photo B',
-      'confirm fans B',
-      'choose doors B',
-      'confirm suction-ready',
-      'override defrost-held',
-      'reading since-defrost',
-      'reading regulator-set',
-      'superheat superheat A1',
-      'superheat superheat B1',
-      'superheat superheat B2',
-      'confirm caps-and-bulbs',
-      'confirm gas-valves',
-      'confirm defrost-settings',
-      'reading defrost-end-temperature',
-      'reading defrost-duration',
-      'choose after-defrost',
-      'choose back-to-cold',
-      'reading discharge-air A',
-      'reading discharge-air B',
-      'note remarks',
-      'signature installer-signature',
-    ],
-  },
-  {
-    key: 'walk-in-cooler',
-    changes: { circuit: { control: 'liquidSolenoid' }, fixtures: { kind: 'walkIn' } },
-    steps: [
-      'confirm right-circuit',
-      'choose inside-release A',
-      'choose box-door A',
-      'photo clean-photo A',
-      'confirm fans A',
-      'choose inside-release B',
-      'choose box-door B',
-      'photo clean-photo B',
-      'confirm fans B',
-      'confirm suction-ready',
-      'choose pump-down',
-      'override defrost-held',
-      'reading since-defrost',
-      'superheat superheat A1',
-      'superheat superheat B1',
-      'superheat superheat B2',
-      'confirm caps-and-bulbs',
-      'confirm defrost-settings',
-      'choose after-defrost',
-      'reading discharge-air A',
-      'reading discharge-air B',
-      'reading product-temperature',
-      'note remarks',
-      'signature installer-signature',
-    ],
-  },
-  {
-    key: 'walk-in-freezer',
-    changes: {
-      circuit: { control: 'liquidSolenoid', temperatureClass: 'low' },
-      fixtures: { kind: 'walkIn' },
-      defrost: { type: 'electric', terminationTemperatureK: 285.0 },
-    },
-    steps: [
-      'confirm right-circuit',
-      'choose inside-release A',
-      'choose box-door A',
-      'photo clean-photo A',
-      'confirm fans A',
-      'reading heater-amps A',
-      'choose inside-release B',
-      'choose box-door B',
-      'photo clean-photo B',
-      'confirm fans B',
-      'reading heater-amps B',
-      'confirm suction-ready',
-      'choose pump-down',
-      'override defrost-held',
-      'reading since-defrost',
-      'superheat superheat A1',
-      'superheat superheat B1',
-      'superheat superheat B2',
-      'confirm caps-and-bulbs',
-      'confirm defrost-settings',
-      'reading defrost-end-temperature',
-      'reading defrost-duration',
-      'choose after-defrost',
-      'reading discharge-air A',
-      'reading discharge-air B',
-      'note remarks',
-      'signature installer-signature',
-    ],
-  },
-  {
-    key: 'electronic-valves',
-    changes: { circuit: { control: 'electronicValve' }, fixtures: { valveKind: 'electronic' } },
-    steps: [
-      'confirm right-circuit',
-      'photo clean-photo A',
-      'confirm fans A',
-      'photo clean-photo B',
-      'confirm fans B',
-      'confirm driver-set',
-      'choose transducer',
-      'reading outlet-sensor A',
-      'reading outlet-sensor B',
-      'confirm suction-ready',
-      'override defrost-held',
-      'reading since-defrost',
-      'superheat superheat-electronic A1',
-      'superheat superheat-electronic B1',
-      'superheat superheat-electronic B2',
-      'choose valve-openings',
-      'confirm caps-and-bulbs',
-      'confirm defrost-settings',
-      'choose after-defrost',
-      'reading discharge-air A',
-      'reading discharge-air B',
-      'note remarks',
-      'signature installer-signature',
-    ],
-  },
-  {
-    key: 'plain-circuit',
-    changes: {
-      circuit: { temperatureClass: 'low', control: 'suctionStop' },
-      defrost: { type: 'none', perDay: 0 },
-    },
-    steps: [
-      'confirm right-circuit',
-      'photo clean-photo A',
-      'confirm fans A',
-      'choose drain A',
-      'photo clean-photo B',
-      'confirm fans B',
-      'choose drain B',
-      'confirm suction-ready',
-      'superheat superheat A1',
-      'superheat superheat B1',
-      'superheat superheat B2',
-      'confirm caps-and-bulbs',
-      'reading discharge-air A',
-      'reading discharge-air B',
-      'note remarks',
-      'signature installer-signature',
-    ],
-  },
-];
-
 describe('the shipped templates', () => {
-  it.each(EXPANSIONS)('make the steps of $key', ({ key, changes, steps }) => {
-    const specification = specificationWith(changes);
+  it.each(EXPANSIONS)('make the steps of $key', ({ key, level = 'circuit', changes, steps }) => {
+    const specification = atLevel(level, specificationWith(changes));
     const template = chooseTemplate(documents, specification);
     if (!template) throw new Error('No template applies.');
     expect(template.key).toBe(key);
@@ -285,18 +54,69 @@ describe('the shipped templates', () => {
     });
     const template = chooseTemplate(documents, specification);
     if (!template) throw new Error('No template applies.');
-    const readings = new Map<string, { low: number | null; high: number | null }>();
-    for (const step of expandTemplate(template, specification).steps) {
-      if (step.kind === 'reading') readings.set(step.key, step.limits);
-    }
-    const air = readings.get(`discharge-air:${FIXTURE_A}`);
+    const steps = new Map(expandTemplate(template, specification).steps.map((step) => [step.key, step]));
+    const limitsOf = (key: string) => {
+      const step = steps.get(key);
+      return step?.kind === 'reading' ? step.limits : null;
+    };
+    const air = limitsOf(`discharge-air:${FIXTURE_A}`);
     expect(air?.low).toBeCloseTo(272.5 - 10 / 9, 9);
     expect(air?.high).toBeCloseTo(272.5 + 10 / 9, 9);
-    const end = readings.get('defrost-end-temperature');
-    expect(end?.low).toBeCloseTo(283.15 - 25 / 9, 9);
-    expect(end?.high).toBeCloseTo(283.15 + 25 / 9, 9);
-    expect(readings.get('defrost-duration')).toEqual({ low: null, high: 2640 });
-    expect(readings.get('since-defrost')).toEqual({ low: 3600, high: null });
+    expect(limitsOf('since-defrost')).toEqual({ low: 3600, high: null });
+    const defrost = steps.get('witnessed-defrost');
+    expect(defrost?.kind === 'measurement' && defrost.criteria).toEqual({
+      failSafe: 2700,
+      terminationTemperature: 283.15,
+      temperatureTolerance: expect.closeTo(25 / 9, 9),
+    });
+    const held = steps.get(`air-held:${FIXTURE_A}`);
+    expect(held).toMatchObject({ kind: 'trend', required: false, holdS: 86_400, longestExcursionS: 3600 });
+    expect(held?.kind === 'trend' && [held.bandLowK, held.bandHighK]).toEqual([
+      expect.closeTo(272.5 - 25 / 9, 9),
+      expect.closeTo(272.5 + 25 / 9, 9),
+    ]);
+  });
+
+  it.each([
+    [{ failSafeS: 2700, terminationTemperatureK: null }, 'measurement timed-defrost'],
+    [{ failSafeS: null, terminationTemperatureK: 283.15 }, 'reading defrost-end-temperature'],
+    [{ failSafeS: null, terminationTemperatureK: null }, null],
+  ])('watch a defrost by what the schedule says of it: %j', (defrost, step) => {
+    const specification = specificationWith({
+      circuit: { temperatureClass: 'low' },
+      defrost: { type: 'electric', ...defrost },
+    });
+    const template = chooseTemplate(documents, specification);
+    if (!template) throw new Error('No template applies.');
+    const watched = expandTemplate(template, specification)
+      .steps.map(shortOf)
+      .filter((name) => /(witnessed|timed)-defrost|defrost-end/.test(name));
+    expect(watched).toEqual(step === null ? [] : [step]);
+  });
+
+  it('test pressure, vacuum and return gas by the figures that their sources give', () => {
+    const criteria = (level: Level, key: string) => {
+      const specification = atLevel(level, specificationWith());
+      const template = chooseTemplate(documents, specification);
+      const step = template && expandTemplate(template, specification).steps.find((each) => each.key === key);
+      return step?.kind === 'measurement' ? step.criteria : null;
+    };
+    // 300 µm Hg, and no more than 500 µm Hg an hour later: UFGS 15182. 1 µm Hg is 101325/760000 Pa.
+    expect(criteria('system', 'rise-test')).toEqual({
+      target: expect.closeTo(39.99671, 5),
+      hold: 3600,
+      limit: expect.closeTo(66.66118, 5),
+    });
+    // 24 h without loss: UFGS 15182; 300 psi on the high side, 150 psi on the low: UFGS 15741N.
+    expect(criteria('system', 'high-side-test')).toEqual({
+      leastHold: 86_400,
+      leastPressure: expect.closeTo(300 * 6894.757293, 3),
+      allowedLoss: 0,
+    });
+    expect(criteria('system', 'low-side-test')?.['leastPressure']).toBeCloseTo(150 * 6894.757293, 3);
+    // Within a tenth of the plate: NEMA MG 1, 12.44; 2 % of unbalance: common practice.
+    expect(criteria('system', 'supply-voltage')).toEqual({ tolerance: 0.1, greatestUnbalance: 0.02 });
+    expect(criteria('suctionGroup', 'return-gas')).toEqual({ superheatLow: 10 });
   });
 
   it('work hot gas through on every circuit that defrosts by it', () => {

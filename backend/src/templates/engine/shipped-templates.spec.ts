@@ -5,16 +5,18 @@ import Ajv2020, { type ValidateFunction } from 'ajv/dist/2020';
 import { parse } from 'yaml';
 import * as z from 'zod/mini';
 import { stepListSchema } from '#shared/checklist/step';
+import type { CircuitSpecification } from '#shared/plant/plant';
 import {
   CONTROLS,
   DEFROST_TYPES,
   FIXTURE_KINDS,
+  LEVELS,
   TEMPERATURE_CLASSES,
   VALVE_KINDS,
 } from '#shared/plant/words';
 import { canonicalJson } from '#shared/sequences/canonical-json';
 import { chooseTemplate } from './choose-template';
-import { specificationWith } from './circuit-specification.fixture';
+import { atLevel, specificationWith } from './circuit-specification.fixture';
 import { expandTemplate } from './expand-template';
 import { loadShippedTemplates } from './load-shipped-templates';
 import { STEP_KEYS } from './step-shape';
@@ -60,6 +62,8 @@ describe('template.schema.json', () => {
     expect(keysOf(jsonSchema)).toEqual(Object.keys(templateShape.shape).sort());
   });
 });
+
+const keyOf = (specification: CircuitSpecification) => chooseTemplate(documents, specification)?.key;
 
 describe('the shipped templates', () => {
   const combinations = TEMPERATURE_CLASSES.flatMap((temperatureClass) =>
@@ -131,22 +135,53 @@ describe('the shipped templates', () => {
         caution: step.caution,
         source: step.source,
       });
-      // The freezer's door has more to look at, and a fan's step in a box has a drain line with heat trace.
-      if (['box-door', 'fans', 'discharge-air'].includes(step.key)) continue;
+      // The freezer's door has more to look at, and a fan's step in a box has a drain line with heat trace; what a
+      // lead should know is something else of a circuit, a group and a system.
+      if (['box-door', 'fans', 'discharge-air', 'remarks'].includes(step.key)) continue;
       expect(seen.get(name) ?? body).toBe(body);
       seen.set(name, body);
     }
   });
 
   it('warn of CO2 and of a flammable refrigerant before anything else is touched', () => {
-    for (const document of documents) {
+    const first = { circuit: 'right-circuit', suctionGroup: 'right-group', system: 'right-system' } as const;
+    for (const level of LEVELS) {
+      const keysFor = (refrigerant: string) => {
+        const specification = atLevel(level, specificationWith({ system: { refrigerant } }));
+        return documents
+          .filter((document) => document.level === level && document.key === keyOf(specification))
+          .flatMap((document) => expandTemplate(document, specification).steps.map((step) => step.key));
+      };
+      expect(keysFor('R-744').slice(0, 2)).toEqual([first[level], 'co2-ready']);
+      expect(keysFor('R-454C').slice(0, 2)).toEqual([first[level], 'flammable-ready']);
+      expect(keysFor('R-448A')).not.toContain('co2-ready');
+      expect(keysFor('R-448A')[0]).toBe(first[level]);
+    }
+  });
+
+  it.each(documents.filter(({ level }) => level === 'circuit'))(
+    '$key warns of both before anything else',
+    (document) => {
       const keysFor = (refrigerant: string) =>
         expandTemplate(document, specificationWith({ system: { refrigerant } })).steps.map(
           (step) => step.key,
         );
       expect(keysFor('R-744').slice(0, 2)).toEqual(['right-circuit', 'co2-ready']);
       expect(keysFor('R-454C').slice(0, 2)).toEqual(['right-circuit', 'flammable-ready']);
-      expect(keysFor('R-448A')).not.toContain('co2-ready');
+    },
+  );
+
+  it('put the work of one template on every system and on every group, with a signature at the end', () => {
+    for (const refrigerant of ['R-448A', 'R-449A', 'R-404A', 'R-454C', 'R-744']) {
+      for (const level of ['system', 'suctionGroup'] as const) {
+        const specification = atLevel(level, specificationWith({ system: { refrigerant } }));
+        const applying = documents.filter((document) => chooseTemplate([document], specification) !== null);
+        expect(applying.map((document) => document.level)).toEqual([level]);
+        const list = expandTemplate(applying[0] as (typeof documents)[number], specification);
+        expect(stepListSchema.safeParse(list).success).toBe(true);
+        expect(list.steps.at(-1)?.kind).toBe('signature');
+        expect(list.steps.every((step) => step.fixtureId === null && step.coilId === null)).toBe(true);
+      }
     }
   });
 });

@@ -1,12 +1,13 @@
 import type { Dimension, UnitId } from '#shared/units/unit';
 
-/** The SI unit that a step's limits and figures are stored in. A vacuum is an absolute pressure in pascals. */
+/** The SI unit that a step's limits and figures are stored in. */
 export const SI_UNIT: Readonly<Record<Dimension, UnitId>> = {
   temperature: 'K',
   temperatureDifference: 'K_diff',
   gaugePressure: 'Pag',
   absolutePressure: 'Pa',
-  vacuum: 'Pa',
+  vacuum: 'Pa_vac',
+  pressureDifference: 'Pa_diff',
   length: 'm',
   area: 'm2',
   heatFlow: 'W',

@@ -1,4 +1,5 @@
 import * as z from 'zod/mini';
+import { METHOD_KEYS } from '#shared/checklist/methods/method-keys';
 import { HAZARDS } from '#shared/checklist/text';
 import { DIMENSIONS } from './si-unit';
 
@@ -38,10 +39,14 @@ const optionShape = z.strictObject({
   value: keyShape,
   label: titleShape,
   outcome: z.enum(['within', 'outside', 'recorded']),
+  changes: z.optional(z.boolean()),
 });
 
+/** Whether recording the step means that the coils run otherwise now: what was read on them before turns stale. */
+const changes = z.optional(z.boolean());
+
 const stepShapes = {
-  confirm: z.strictObject({ kind: z.literal('confirm'), ...base }),
+  confirm: z.strictObject({ kind: z.literal('confirm'), ...base, changes }),
   choose: z.strictObject({
     kind: z.literal('choose'),
     ...base,
@@ -50,6 +55,7 @@ const stepShapes = {
   reading: z.strictObject({
     kind: z.literal('reading'),
     ...base,
+    changes,
     dimension: z.enum(DIMENSIONS),
     limits: z.optional(z.strictObject({ low: z.optional(limitShape), high: z.optional(limitShape) })),
   }),
@@ -57,6 +63,22 @@ const stepShapes = {
     kind: z.literal('superheat'),
     ...base,
     band: z.optional(z.strictObject({ low: limitShape, high: limitShape })),
+    judged_by: z.optional(z.enum(['midpoint', 'time_weighted'])),
+    wait: z.optional(limitShape),
+  }),
+  measurement: z.strictObject({
+    kind: z.literal('measurement'),
+    ...base,
+    changes,
+    method: z.enum(METHOD_KEYS),
+    criteria: z.optional(z.record(z.string(), limitShape)),
+  }),
+  trend: z.strictObject({
+    kind: z.literal('trend'),
+    ...base,
+    band: z.strictObject({ low: z.optional(limitShape), high: limitShape }),
+    hold: limitShape,
+    longest_excursion: z.optional(limitShape),
   }),
   photo: z.strictObject({
     kind: z.literal('photo'),
@@ -74,6 +96,8 @@ export const stepShape = z.discriminatedUnion('kind', [
   stepShapes.choose,
   stepShapes.reading,
   stepShapes.superheat,
+  stepShapes.measurement,
+  stepShapes.trend,
   stepShapes.photo,
   stepShapes.note,
   stepShapes.override,
@@ -88,6 +112,8 @@ export const STEP_KEYS: Readonly<Record<WrittenStep['kind'], readonly string[]>>
   choose: Object.keys(stepShapes.choose.shape),
   reading: Object.keys(stepShapes.reading.shape),
   superheat: Object.keys(stepShapes.superheat.shape),
+  measurement: Object.keys(stepShapes.measurement.shape),
+  trend: Object.keys(stepShapes.trend.shape),
   photo: Object.keys(stepShapes.photo.shape),
   note: Object.keys(stepShapes.note.shape),
   override: Object.keys(stepShapes.override.shape),

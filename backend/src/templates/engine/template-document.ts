@@ -1,4 +1,6 @@
+import type { MethodKey } from '#shared/checklist/methods/method-keys';
 import type { Caution, Text } from '#shared/checklist/text';
+import type { Level } from '#shared/plant/words';
 import type { Dimension } from '#shared/units/unit';
 import type { CompiledExpression } from './expression';
 import type { Scope } from './fact-fields';
@@ -21,14 +23,16 @@ export interface OptionDocument {
   readonly value: string;
   readonly label: Text;
   readonly outcome: 'within' | 'outside' | 'recorded';
+  readonly changes: boolean;
 }
 
 /** What only steps of one kind have. */
 export type StepBody =
-  | { readonly kind: 'confirm' }
+  | { readonly kind: 'confirm'; readonly changes: boolean }
   | { readonly kind: 'choose'; readonly options: readonly OptionDocument[] }
   | {
       readonly kind: 'reading';
+      readonly changes: boolean;
       readonly dimension: Dimension;
       readonly low: PlacedLimit | null;
       readonly high: PlacedLimit | null;
@@ -37,6 +41,23 @@ export type StepBody =
       readonly kind: 'superheat';
       /** `null`: the fixture's own band. */
       readonly band: { readonly low: PlacedLimit; readonly high: PlacedLimit } | null;
+      readonly judgedBy: 'midpoint' | 'timeWeighted';
+      /** Between a turn of the valve and the reading that counts; `null`: the program's default. */
+      readonly wait: PlacedLimit | null;
+    }
+  | {
+      readonly kind: 'measurement';
+      readonly changes: boolean;
+      readonly method: MethodKey;
+      /** By the keys that the method declares. */
+      readonly criteria: ReadonlyMap<string, PlacedLimit>;
+    }
+  | {
+      readonly kind: 'trend';
+      readonly low: PlacedLimit | null;
+      readonly high: PlacedLimit | null;
+      readonly hold: PlacedLimit | null;
+      readonly longestExcursion: PlacedLimit | null;
     }
   | { readonly kind: 'photo'; readonly minCount: number }
   | { readonly kind: 'note' }
@@ -46,7 +67,7 @@ export type StepBody =
 /** A step of a checked template. Texts may still hold placeholders. */
 export interface StepDocument {
   readonly key: string;
-  /** `circuit`: there once; otherwise repeated for each fixture or coil. */
+  /** The template's level: there once; otherwise repeated for each fixture or coil of a circuit. */
   readonly scope: Scope;
   readonly when: Condition | null;
   readonly title: Text;
@@ -69,7 +90,7 @@ export interface SectionDocument {
 export interface TemplateDocument {
   readonly key: string;
   readonly version: number;
-  readonly level: 'circuit';
+  readonly level: Level;
   readonly title: Text;
   readonly applies: Condition;
   readonly priority: number;

@@ -1,4 +1,5 @@
 import * as z from 'zod/mini';
+import { LEVELS } from '#shared/plant/words';
 import { expressionShape, keyShape, stepShape, titleShape } from './step-shape';
 
 /** A section as written: steps that belong together, in working order. */
@@ -9,11 +10,11 @@ export const sectionShape = z.strictObject({
   steps: z.array(stepShape).check(z.minLength(1), z.maxLength(200)),
 });
 
-/** A template as written. `level` is there for templates of systems, suction groups and openings to come. */
+/** A template as written, for circuits or for the own work of suction groups or systems. */
 export const templateShape = z.strictObject({
   key: keyShape,
   version: z.int().check(z.gte(1), z.lte(1_000_000)),
-  level: z.literal('circuit'),
+  level: z.enum(LEVELS),
   title: titleShape,
   applies: expressionShape,
   priority: z.int().check(z.gte(0), z.lte(1000)),
