@@ -6,9 +6,11 @@ import { Transform } from 'node:stream';
 import { pipeline } from 'node:stream/promises';
 import { uuidv7 } from 'uuidv7';
 import type { Language } from '#shared/checklist/text';
+import { Bug } from '#shared/failures/failure';
 import type { OpeningId, PackageId } from '#shared/plant/ids';
 import { canonicalJson } from '#shared/sequences/canonical-json';
 import type { Context, Transactions } from '../database/transactions';
+import type { DefrostPlansService } from '../defrosts/defrost-plans.service';
 import type { LiveEventsService } from '../events/live-events.service';
 import type { ObjectStorage } from '../files/object-storage';
 import type { JobPayloads } from '../jobs/job-kinds';
@@ -22,6 +24,7 @@ import type { SequencesService } from '../sequences/sequences.service';
 import type { InstallationKey } from '../signing/installation-key';
 import type { PackageContent } from './document/package-content';
 import { writePackageDocument } from './document/write-package-document';
+import { packageFailureOf } from './package-failure';
 import { sequencesOf, summaryOf, type PackageSnapshot } from './package-snapshot';
 import { packageKey } from './packages.service';
 import type { PackageRow, PackagesRepository } from './packages.repository';
@@ -41,6 +44,7 @@ export class PackageBuilder {
     private readonly transactions: Transactions,
     private readonly packages: PackagesRepository,
     private readonly openings: OpeningsService,
+    private readonly defrosts: DefrostPlansService,
     private readonly people: PeopleService,
     private readonly sequences: SequencesService,
     private readonly photos: PhotosService,
@@ -76,6 +80,13 @@ export class PackageBuilder {
       if (run.isLastTry && !run.signal.aborted) await this.giveUp(packageId, openingId, row.companyId, error);
       throw error;
     }
+  }
+
+  /** Says that a package can't be built whose workers died with it. */
+  async abandon({ packageId, openingId }: JobPayloads['package']): Promise<void> {
+    const row = await this.packages.find(this.transactions.outside, packageId);
+    if (row?.state === 'building')
+      await this.giveUp(packageId, openingId, row.companyId, new Bug('Its workers died with it.'));
   }
 
   /** Tells watchers how far it is, at a pace that a database likes, and notices a cancellation. */
@@ -153,8 +164,10 @@ export class PackageBuilder {
       },
       installation: { fingerprint: this.key.fingerprint },
       summary: { systems: summaryOf(snapshot) },
-      circuits: circuits.map(({ sequenceId, code, description, systemName, state }) => ({
+      defrostPlan: await this.defrostPlanOf(opening.id as OpeningId, snapshot),
+      circuits: circuits.map(({ sequenceId, level = 'circuit', code, description, systemName, state }) => ({
         sequenceId,
+        level,
         code,
         description,
         systemName,
@@ -164,6 +177,13 @@ export class PackageBuilder {
       loadCircuit: (id) => this.sequences.show(id, positions.get(id)),
       loadPhoto: (id, sha256) => this.photos.readForPrint(id, sha256),
     };
+  }
+
+  private async defrostPlanOf(
+    openingId: OpeningId,
+    { defrostPlanId }: PackageSnapshot,
+  ): Promise<PackageContent['defrostPlan']> {
+    return defrostPlanId ? this.defrosts.read(openingId, defrostPlanId) : null;
   }
 
   private async issue(row: PackageRow, written: Written): Promise<void> {
@@ -220,7 +240,7 @@ export class PackageBuilder {
     companyId: string,
     error: unknown,
   ): Promise<void> {
-    const failure = (error instanceof Error ? error.message : String(error)).slice(0, 500);
+    const failure = packageFailureOf(error);
     await this.transactions.run(async (context) => {
       await this.packages.update(context, id, { state: 'failed', failure });
       await this.announce(context, companyId, openingId, id);

@@ -1,4 +1,5 @@
 import type { CircuitRow } from '#shared/contracts/openings';
+import type { Level } from '#shared/plant/words';
 import type { SequenceId } from '#shared/plant/ids';
 import type { SummarySystem } from './document/package-content';
 
@@ -7,6 +8,8 @@ export interface SnapshotCircuit {
   readonly sequenceId: SequenceId | null;
   readonly position: number;
   readonly headHash: string | null;
+  /** Absent in snapshots that were taken before levels came: a circuit. */
+  readonly level?: Level;
   readonly code: string;
   readonly description: string;
   readonly area: string;
@@ -15,6 +18,8 @@ export interface SnapshotCircuit {
 
 /** All circuits of an opening in one moment, in the order of the schedule. */
 export interface PackageSnapshot {
+  /** The defrost plan that counted in that moment; absent in older snapshots, `null` for none. */
+  readonly defrostPlanId?: string | null;
   readonly systems: readonly {
     readonly name: string;
     readonly refrigerant: string;
@@ -22,11 +27,20 @@ export interface PackageSnapshot {
   }[];
 }
 
+/** Whether it counts as one of the store's circuits; the work of a system or a group has a chapter, but isn't counted. */
+export const isCircuit = ({ level = 'circuit' }: Pick<SnapshotCircuit, 'level'>): boolean =>
+  level === 'circuit';
+
 export function summaryOf(snapshot: PackageSnapshot): readonly SummarySystem[] {
   return snapshot.systems.map(({ name, refrigerant, circuits }) => ({
     name,
     refrigerant,
-    circuits: circuits.map(({ code, description, area, state }) => ({ code, description, area, state })),
+    work: circuits.flatMap(({ level = 'circuit', code, state }) =>
+      level === 'circuit' ? [] : [{ level, code, state }],
+    ),
+    circuits: circuits
+      .filter(isCircuit)
+      .map(({ code, description, area, state }) => ({ code, description, area, state })),
   }));
 }
 

@@ -2,6 +2,7 @@ import type { Signature } from '#shared/checklist/signature';
 import type { Language } from '#shared/checklist/text';
 import type { HandoverPackage } from '#shared/contracts/packages';
 import type { OpeningId, PackageId } from '#shared/plant/ids';
+import { storedPackageFailure } from './package-failure';
 import type { AcceptanceRow, PackageRow } from './packages.repository';
 
 /** A package as the contract has it. */
@@ -23,7 +24,7 @@ export function packageView(row: PackageRow, acceptance: AcceptanceRow | undefin
     pages: row.pages,
     bytes: row.bytes,
     sha256: row.sha256,
-    failure: row.failure,
+    failure: storedPackageFailure(row.failure),
     acceptance: acceptance
       ? {
           personName: acceptance.personName,

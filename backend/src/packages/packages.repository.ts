@@ -72,13 +72,12 @@ export class PackagesRepository {
   /** Where every circuit stands, read in one statement and so in one moment. */
   async takeSnapshot(context: Context, openingId: OpeningId): Promise<PackageSnapshot> {
     const rows: SnapshotRow[] = await managerOf(context).query(
-      `SELECT s.id AS sequenceId, COALESCE(s.head_position, 0) AS position, s.head_hash AS headHash, c.code,
+      `SELECT s.id AS sequenceId, COALESCE(s.head_position, 0) AS position, s.head_hash AS headHash, c.level, c.code,
               c.description, c.area, sys.name AS systemName, sys.refrigerant,
               CASE WHEN s.id IS NULL THEN 'noSequence'
                    WHEN s.state = 'open' AND s.head_position > 1 THEN 'underWay' ELSE s.state END AS state
          FROM circuit c
-         JOIN suction_group g ON g.id = c.suction_group_id
-         JOIN plant_system sys ON sys.id = g.system_id
+         JOIN plant_system sys ON sys.id = c.system_id
          LEFT JOIN sequence s ON s.circuit_id = c.id
         WHERE c.opening_id = ? AND c.removed_at IS NULL ORDER BY sys.ordinal, c.ordinal`,
       [openingId],

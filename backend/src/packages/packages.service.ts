@@ -6,6 +6,7 @@ import { DomainFailure } from '#shared/failures/failure';
 import type { OpeningId, PackageId } from '#shared/plant/ids';
 import { canonicalJson } from '#shared/sequences/canonical-json';
 import type { AuditService } from '../audit/audit.service';
+import type { DefrostPlansService } from '../defrosts/defrost-plans.service';
 import { isDuplicate, type Context, type Transactions } from '../database/transactions';
 import type { LiveEventsService } from '../events/live-events.service';
 import type { ObjectStorage, StoredObject } from '../files/object-storage';
@@ -15,6 +16,7 @@ import { requireFreshPassword } from '../http/password-age';
 import type { JobsService } from '../jobs/jobs.service';
 import type { OpeningsService } from '../openings/openings.service';
 import type { InstallationKey } from '../signing/installation-key';
+import { isCircuit } from './package-snapshot';
 import { packageView } from './package-view';
 import type { PackageRow, PackagesRepository } from './packages.repository';
 
@@ -29,6 +31,7 @@ export class PackagesService {
     private readonly transactions: Transactions,
     private readonly packages: PackagesRepository,
     private readonly openings: OpeningsService,
+    private readonly defrosts: DefrostPlansService,
     private readonly storage: ObjectStorage,
     private readonly jobs: JobsService,
     private readonly key: InstallationKey,
@@ -62,8 +65,12 @@ export class PackagesService {
     const id = uuidv7() as PackageId;
     await this.transactions.run(async (context) => {
       const opening = await this.openings.lockForSchedule(context, openingId);
-      const snapshot = await this.packages.takeSnapshot(context, openingId);
+      const snapshot = {
+        ...(await this.packages.takeSnapshot(context, openingId)),
+        defrostPlanId: await this.defrosts.newestId(context, openingId),
+      };
       const circuits = snapshot.systems.flatMap((system) => system.circuits);
+      const counted = circuits.filter(isCircuit);
       if (!circuits.some((circuit) => circuit.position > 1)) {
         throw new DomainFailure('nothingToHandOver', 'Nothing has been recorded in this opening yet.');
       }
@@ -76,8 +83,8 @@ export class PackagesService {
         state: 'building',
         progress: 0,
         heads: JSON.stringify(snapshot),
-        circuitsApproved: circuits.filter((circuit) => circuit.state === 'approved').length,
-        circuitsTotal: circuits.length,
+        circuitsApproved: counted.filter((circuit) => circuit.state === 'approved').length,
+        circuitsTotal: counted.length,
         createdBy: caller.person.id,
         createdAt: new Date(),
         issuedAt: null,

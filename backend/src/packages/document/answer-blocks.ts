@@ -8,10 +8,12 @@ import { STYLES } from '../../pdf/text-style';
 import { summarizeEntry } from './answer-summary';
 import { say } from './document-context';
 import { whoAndWhen, type CircuitContext } from './judged-entry';
+import { measurementBlocks } from './measurement-blocks';
 import { photoPlates } from './photo-plates';
 import { readingBlocks } from './reading-blocks';
 import { signedBlock } from './signature-lines';
 import { superheatBlocks } from './superheat-blocks';
+import { trendBlocks } from './trend-blocks';
 
 /** What stands on a step now, drawn in the way of its kind. */
 export function answerBlocks(
@@ -37,7 +39,11 @@ export function answerBlocks(
     case 'reading':
       return readingBlocks(circuit, entry, step);
     case 'superheat':
-      return superheatBlocks(circuit, entry);
+      return superheatBlocks(circuit, entry, step);
+    case 'measurement':
+      return measurementBlocks(circuit, entry, step);
+    case 'trend':
+      return trendBlocks(circuit, entry, step);
     case 'photo':
       if (answer.kind !== 'photo') return [];
       return [

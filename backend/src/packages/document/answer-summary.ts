@@ -1,6 +1,8 @@
+import type { SuperheatObservation, SuperheatPair } from '#shared/checklist/kinds/superheat';
 import type { Step } from '#shared/checklist/step';
 import { unreachable } from '#shared/failures/unreachable';
 import type { FoldEntry } from '#shared/sequences/fold';
+import { summarizeMeasurement } from './measurement-blocks';
 import { say } from './document-context';
 import { judgedOf, type CircuitContext } from './judged-entry';
 
@@ -52,6 +54,10 @@ function summarizeAnswer(circuit: CircuitContext, entry: FoldEntry, step: Step |
       return format.typed(answer.value);
     case 'superheat':
       return summarizeSuperheat(circuit, entry);
+    case 'measurement':
+      return summarizeMeasurement(circuit, entry);
+    case 'trend':
+      return `${answer.column}, ${words.superheat.log(answer.file.name, answer.file.rows)}`;
     case 'photo':
       return `${words.photo.count(answer.photos.length)}: ${answer.photos.map((photo) => photo.sha256.slice(0, 12)).join(', ')}`;
     case 'note':
@@ -65,16 +71,22 @@ function summarizeAnswer(circuit: CircuitContext, entry: FoldEntry, step: Step |
   }
 }
 
+/** The pairs of an observation that stand alone; a series is told by its working. */
+function pairsOf(observation: SuperheatObservation): readonly SuperheatPair[] {
+  if (observation.valve === 'steady') return [observation.pair];
+  return observation.valve === 'hunting' ? [observation.low, observation.high] : [];
+}
+
 function summarizeSuperheat(circuit: CircuitContext, entry: FoldEntry): string {
   const { format } = circuit.context;
   const { content } = entry.body;
   if (content.kind !== 'answer' || content.answer.kind !== 'superheat') return '';
   const figure = judgedOf(entry)?.figures.find((candidate) => candidate.label === 'superheat');
   const { asLeft } = content.answer;
-  const pairs = asLeft.valve === 'steady' ? [asLeft.pair] : [asLeft.low, asLeft.high];
+  const pairs = pairsOf(asLeft);
   const typed = pairs
     .map((pair) => `${format.typed(pair.pressure)}, ${format.typed(pair.temperature)}`)
     .join('; ');
   const value = figure ? `${format.quantity(figure.value, figure.unit)} ` : '';
-  return `${value}(${typed})`;
+  return typed === '' ? value.trim() : `${value}(${typed})`;
 }

@@ -9,7 +9,7 @@ import { baselineOf, hairline, paragraph } from '../../pdf/paragraph';
 import { COLOURS } from '../../pdf/colours';
 import type { Sheet } from '../../pdf/sheet';
 import { STYLES, type TextStyle } from '../../pdf/text-style';
-import { beginChapter, circuitKey, say, type DocumentContext } from './document-context';
+import { beginChapter, circuitKey, say, subjectOf, type DocumentContext } from './document-context';
 import { circuitContext, type CircuitContext } from './judged-entry';
 import type { PackageCircuitRef } from './package-content';
 import { reviewBlocks } from './review-blocks';
@@ -40,7 +40,9 @@ export async function drawCircuit(
   const { sheet } = context;
   const view = viewSequence(detail.stepList, detail.entries);
   const circuit = circuitContext(context, detail);
-  sheet.runningHead = [reference.code, reference.description].filter((part) => part !== '').join(' · ');
+  sheet.runningHead = [reference.code, subjectOf(context, reference)]
+    .filter((part) => part !== '')
+    .join(' · ');
   sheet.openPart('Sect');
   beginChapter(context, circuitKey(reference.sequenceId), sheet.runningHead, outline);
   await sheet.place(headBlocks(context, reference, detail, view));
@@ -80,7 +82,7 @@ function headBlocks(
         page.artifact(() => drawJoint(page, PAGE.right - width - 13, baseline - 3.5, 4.6, reference.state));
       },
     },
-    ...paragraph(sheet, reference.description, STYLES.lead),
+    ...paragraph(sheet, subjectOf(context, reference), STYLES.lead),
     gap(6),
     hairline(COLOURS.copperLine, PAGE.left, 2),
     ...factGrid(
@@ -90,7 +92,7 @@ function headBlocks(
           label: words.facts.checklist,
           value: words.checklistVersion(say(context, template.title), template.version),
         },
-        { label: words.facts.area, value: circuit.area },
+        ...(reference.level === 'circuit' ? [{ label: words.facts.area, value: circuit.area }] : []),
         { label: words.facts.steps, value: words.stepsDone(view.doneCount, view.steps.length) },
         { label: words.facts.outside, value: String(view.outsideCount) },
       ],

@@ -4,11 +4,25 @@ import { drawJoint } from '../../pdf/joint';
 import { PAGE, TEXT_WIDTH } from '../../pdf/page-geometry';
 import { baselineOf, paragraph } from '../../pdf/paragraph';
 import { STYLES } from '../../pdf/text-style';
-import { chaptersOf, circuitKey, HASHES_KEY, SUMMARY_KEY, type DocumentContext } from './document-context';
+import { SECTION_WORDS } from './defrost-section-words';
+import {
+  chaptersOf,
+  circuitKey,
+  DEFROST_KEY,
+  HASHES_KEY,
+  say,
+  subjectOf,
+  SUMMARY_KEY,
+  type DocumentContext,
+} from './document-context';
 import type { PackageCircuitRef } from './package-content';
 
 const ROW_HEIGHT = 17;
 const CODE_WIDTH = 78;
+/** Names of racks and groups are longer than codes, and what stands after them is one word. */
+const LEVEL_CODE_WIDTH = 190;
+/** Where the state's joint begins, from the left margin. */
+const SUBJECT_RIGHT = CODE_WIDTH + 232;
 
 /** The contents: every chapter with its page, as links. */
 export async function drawContents(context: DocumentContext): Promise<void> {
@@ -18,6 +32,8 @@ export async function drawContents(context: DocumentContext): Promise<void> {
   sheet.openPart('TOC');
   await sheet.place([...paragraph(sheet, words.contents, STYLES.chapter, { tag: 'H1' }), gap(10)]);
   await sheet.place([plainRow(context, SUMMARY_KEY, words.summary)]);
+  if (context.content.defrostPlan)
+    await sheet.place([plainRow(context, DEFROST_KEY, say(context, SECTION_WORDS.title))]);
   let system: string | null = null;
   for (const circuit of chaptersOf(context)) {
     const rows: Block[] = [];
@@ -49,9 +65,11 @@ function circuitRow(context: DocumentContext, circuit: PackageCircuitRef): Block
   return row(context, circuitKey(circuit.sequenceId), (top) => {
     const { sheet, words } = context;
     const baseline = baselineOf(top, STYLES.body);
-    sheet.text(sheet.fitted(circuit.code, STYLES.mono, CODE_WIDTH - 8), PAGE.left, baseline, STYLES.mono);
-    const x = PAGE.left + CODE_WIDTH;
-    sheet.text(sheet.fitted(circuit.description, STYLES.body, 232), x, baseline, STYLES.body);
+    const codeRoom = circuit.level === 'circuit' ? CODE_WIDTH : LEVEL_CODE_WIDTH;
+    sheet.text(sheet.fitted(circuit.code, STYLES.mono, codeRoom - 8), PAGE.left, baseline, STYLES.mono);
+    const x = PAGE.left + codeRoom;
+    const subject = sheet.fitted(subjectOf(context, circuit), STYLES.body, SUBJECT_RIGHT - codeRoom);
+    sheet.text(subject, x, baseline, STYLES.body);
     sheet.text(words.states[circuit.state], PAGE.right - 130, baseline, STYLES.small);
     drawJoint(sheet, PAGE.right - 142, baseline - 3, 3.2, circuit.state);
   });

@@ -108,9 +108,13 @@ function completeness(context: DocumentContext): Block[] {
   const circuits = circuitsOf(content);
   const { approved, total } = countApproved(circuits);
   if (total === 0) return paragraph(sheet, words.cover.noCircuits, STYLES.lead);
+  const work = content.summary.systems
+    .flatMap((system) => system.work)
+    .filter(({ state }) => state !== 'approved');
+  const isComplete = approved === total && work.length === 0;
   const blocks = [
     ...paragraph(sheet, words.cover.approvedCount(approved, total), BIG_COUNT, { tag: 'H2' }),
-    ...paragraph(sheet, approved === total ? words.cover.complete : words.cover.incomplete, STYLES.body),
+    ...paragraph(sheet, isComplete ? words.cover.complete : words.cover.incomplete, STYLES.body),
   ];
   for (const state of UNFINISHED) {
     const codes = circuits.filter((circuit) => circuit.state === state).map((circuit) => circuit.code);
@@ -124,6 +128,18 @@ function completeness(context: DocumentContext): Block[] {
         ornament: (page, baseline) => drawJoint(page, PAGE.left + 6, baseline - 3, 3.6, state),
       }),
       ...paragraph(sheet, codes.join(', '), STYLES.mono, { x: PAGE.left + 20, width: TEXT_WIDTH - 20 }),
+    );
+  }
+  if (work.length > 0) {
+    const list = work.map(({ code, state }) => `${code} (${words.states[state].toLowerCase()})`).join(', ');
+    blocks.push(
+      { ...gap(8), keepWithNext: true },
+      ...paragraph(sheet, words.cover.workNotApproved, STYLES.label, {
+        x: PAGE.left + 20,
+        width: TEXT_WIDTH - 20,
+        keepWithNext: true,
+      }),
+      ...paragraph(sheet, list, STYLES.mono, { x: PAGE.left + 20, width: TEXT_WIDTH - 20 }),
     );
   }
   return blocks;

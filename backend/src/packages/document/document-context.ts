@@ -34,6 +34,14 @@ export function chaptersOf(context: DocumentContext): readonly PackageCircuitRef
   return context.content.circuits.filter(({ sequenceId }) => context.survey.get(sequenceId)?.isBegun);
 }
 
+/** What a chapter is about: a circuit's description, or that it is the work of a whole system or suction group. */
+export function subjectOf(
+  { words }: Pick<DocumentContext, 'words'>,
+  { level, description }: Pick<PackageCircuitRef, 'level' | 'description'>,
+): string {
+  return level === 'circuit' ? description : words.levels[level];
+}
+
 /** Notes that a chapter begins on this page: for the contents, for links and for the outline. */
 export function beginChapter(
   context: DocumentContext,
@@ -48,5 +56,6 @@ export function beginChapter(
 }
 
 export const SUMMARY_KEY = 'summary';
+export const DEFROST_KEY = 'defrost-plan';
 export const HASHES_KEY = 'hashes';
 export const circuitKey = (sequenceId: SequenceId): string => `circuit-${sequenceId}`;

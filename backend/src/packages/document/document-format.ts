@@ -5,7 +5,7 @@ import { decimalsFor, formatNumber, formatQuantity } from '#shared/units/format'
 import { parseNumber } from '#shared/units/parse-number';
 import { roundTo } from '#shared/units/round';
 import { UNITS, type Dimension, type UnitId } from '#shared/units/unit';
-import { displayUnit, type UnitSystem } from '#shared/units/unit-system';
+import { displayUnit, displayUnitFor, type UnitSystem } from '#shared/units/unit-system';
 import type { DocumentWords } from './document-words';
 
 const LOCALES: Readonly<Record<Language, string>> = { en: 'en-US', es: 'es-US' };
@@ -32,7 +32,7 @@ export class DocumentFormat {
 
   /** A value in the SI unit of a dimension, in the opening's unit for it. */
   ofDimension(siValue: number, dimension: Dimension): string {
-    return formatQuantity(siValue, displayUnit(dimension, this.unitSystem), this.language);
+    return formatQuantity(siValue, displayUnitFor(siValue, dimension, this.unitSystem), this.language);
   }
 
   /** A length in whole feet or metres: an elevation isn't known any closer. */
@@ -58,7 +58,7 @@ export class DocumentFormat {
   range(low: number | null, high: number | null, dimension: Dimension): string {
     const { between, atLeast, atMost } = this.words.limits;
     if (low !== null && high !== null) {
-      const unit = displayUnit(dimension, this.unitSystem);
+      const unit = displayUnitFor(high, dimension, this.unitSystem);
       // The unit stands once, behind the second number.
       const lowNumber = formatNumber(fromSi(low, unit), decimalsFor(unit), this.language);
       return between(lowNumber, this.ofDimension(high, dimension));

@@ -1,4 +1,3 @@
-import type { DoubtKind } from '#shared/checklist/judgement';
 import type { Language } from '#shared/checklist/text';
 import type { Joint } from '#shared/contracts/openings';
 import type {
@@ -10,7 +9,6 @@ import type {
   TemperatureClass,
   ValveKind,
 } from '#shared/plant/words';
-import type { DoubtKind as InputDoubtKind } from '#shared/refrigeration/plausibility';
 import type { Verdict } from '#shared/sequences/entry';
 import type { MarkKind } from '../../pdf/outcome-mark';
 import { ENGLISH } from './words-en';
@@ -39,6 +37,7 @@ export interface DocumentWords {
     | 'complete'
     | 'incomplete'
     | 'noCircuits'
+    | 'workNotApproved'
     | 'standsAbove'
   > & {
     readonly builtBy: Said<[when: string, who: string]>;
@@ -46,8 +45,11 @@ export interface DocumentWords {
     readonly approvedCount: Said<[approved: number, total: number]>;
   };
   readonly states: Named<Joint['state']>;
+  /** What a chapter is about that isn't a circuit's. */
+  readonly levels: Named<'system' | 'suctionGroup'>;
   readonly columns: Named<
     | 'circuit'
+    | 'work'
     | 'description'
     | 'area'
     | 'state'
@@ -123,15 +125,19 @@ export interface DocumentWords {
   > & {
     readonly low: Said<[name: string]>;
     readonly high: Said<[name: string]>;
-    readonly hunting: Said<[low: string, high: string]>;
+    readonly hunting: Said<[low: string, high: string, byTime: boolean]>;
     readonly saturation: Said<[value: string]>;
     readonly wasFound: Said<[value: string]>;
+    readonly series: Said<[count: number, minutes: string]>;
+    readonly log: Said<[file: string, rows: number]>;
+    readonly turns: Said<[text: string]>;
+    readonly turn: Said<[turns: string, direction: 'clockwise' | 'counterclockwise']>;
+    readonly sheet: Said<[raises: boolean]>;
+    readonly error: Said<[value: string]>;
+    readonly elsewhere: Said<[drop: string]>;
+    readonly timeWeighted: Said<[value: string]>;
+    readonly gauges: Named<'vented' | 'sealed' | 'absolute'>;
   };
-  /** Formulas by their key, in words; one that is not here is named by its key. */
-  readonly formulas: Readonly<Record<string, string>>;
-  /** Lines of a working by their label. */
-  readonly figures: Readonly<Record<string, string>>;
-  readonly doubts: Named<DoubtKind | InputDoubtKind>;
   readonly override: Named<'set' | 'putBack' | 'standing'>;
   readonly photo: Named<'timeUnknown' | 'awaited' | 'broken'> & {
     readonly caption: Said<[when: string, hash: string]>;

@@ -2,10 +2,11 @@ import { beginCircuitPage, drawCircuit } from './circuit-chapter';
 import type { CircuitSource } from './circuit-source';
 import { drawContents } from './contents-pages';
 import { drawCover } from './cover-page';
+import { drawDefrostPlan } from './defrost-pages';
 import { chaptersOf, type DocumentContext } from './document-context';
 import { drawHashes, type CircuitHash } from './hash-page';
 import { drawSummary } from './summary-pages';
-import { sourcesOf } from './superheat-blocks';
+import { sourcesOf } from './working-blocks';
 
 /**
  * Draws the whole document, one circuit in memory at a time: the same for measuring and for writing.
@@ -21,6 +22,7 @@ export async function drawDocument(
   await drawCover(context);
   await drawContents(context);
   await drawSummary(context);
+  await drawDefrostPlan(context);
   const hashes: CircuitHash[] = [];
   const sources = new Set<string>();
   let systemName: string | null = null;

@@ -1,11 +1,15 @@
 import type { Language } from '#shared/checklist/text';
 import type { Joint } from '#shared/contracts/openings';
+import type { SavedDefrostPlan } from '#shared/contracts/defrost-plans';
 import type { SequenceDetail } from '#shared/contracts/sequences';
 import type { PackageId, SequenceId } from '#shared/plant/ids';
+import type { Level } from '#shared/plant/words';
 
 /** A circuit that has a sequence; it gets a chapter of its own once anything was recorded on it. */
 export interface PackageCircuitRef {
   readonly sequenceId: SequenceId;
+  /** A system's and a suction group's own work has a chapter too, before those of its circuits. */
+  readonly level: Level;
   readonly code: string;
   readonly description: string;
   readonly systemName: string;
@@ -19,9 +23,18 @@ export interface SummaryCircuit {
   readonly state: Joint['state'];
 }
 
+/** The own work of a system or of one of its suction groups. */
+export interface SummaryWork {
+  readonly level: Exclude<Level, 'circuit'>;
+  readonly code: string;
+  readonly state: Joint['state'];
+}
+
 export interface SummarySystem {
   readonly name: string;
   readonly refrigerant: string;
+  /** Told beside the circuits and never counted with them; empty where a schedule came before there was such work. */
+  readonly work: readonly SummaryWork[];
   readonly circuits: readonly SummaryCircuit[];
 }
 
@@ -51,6 +64,8 @@ export interface PackageContent {
   readonly installation: { readonly fingerprint: string };
   /** Every circuit of the opening, with or without a sequence: what isn't complete is counted on these. */
   readonly summary: { readonly systems: readonly SummarySystem[] };
+  /** The defrost plan that counted when the package was asked for; `null`: none, and no section about it. */
+  readonly defrostPlan: SavedDefrostPlan | null;
   /** In the order of the chapters. */
   readonly circuits: readonly PackageCircuitRef[];
   /** Called once for each circuit to survey it, then once in each of the two passes for one that gets a chapter. */

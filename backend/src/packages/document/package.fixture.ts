@@ -16,15 +16,14 @@ import { both, PEOPLE, SIGNATURE, specification, stepList, uuid } from './packag
 export class CircuitBuilder {
   readonly entries: StoredEntry[] = [];
   readonly photos: SequenceDetail['photos'] = [];
-  readonly steps: StepList;
   private minutes = 0;
 
   constructor(
     readonly number: number,
     readonly code: string,
     readonly description: string,
+    readonly steps: StepList = stepList(number),
   ) {
-    this.steps = stepList(number);
     this.append(
       {
         kind: 'expansion',
@@ -131,6 +130,7 @@ export class CircuitBuilder {
   reference(): PackageCircuitRef {
     return {
       sequenceId: this.sequenceId,
+      level: 'circuit',
       code: this.code,
       description: this.description,
       systemName: 'Rack A',
@@ -226,6 +226,7 @@ export function packageOf(
         {
           name: 'Rack A',
           refrigerant: 'R-448A',
+          work: [],
           circuits: [
             ...references.map(({ code, description, state }) => ({
               code,
@@ -238,6 +239,7 @@ export function packageOf(
         },
       ],
     },
+    defrostPlan: null,
     circuits: references,
     loadCircuit: async (id) => details.get(id) as SequenceDetail,
     loadPhoto: async (_id, sha256) => photos.get(sha256) ?? null,

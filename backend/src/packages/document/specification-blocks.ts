@@ -25,16 +25,25 @@ export function specificationBlocks(context: DocumentContext, specification: Cir
 
 function circuitFacts(context: DocumentContext, specification: CircuitSpecification): Fact[] {
   const { words, format } = context;
-  const { circuit, system, suctionGroup } = specification;
+  const { circuit, system, suctionGroup, level = 'circuit' } = specification;
   const { defrost } = circuit;
-  const facts: Fact[] = [
+  const plant: Fact[] = [
     { label: words.facts.system, value: system.name },
     { label: words.facts.refrigerant, value: system.refrigerant },
-    { label: words.facts.suctionGroup, value: suctionGroup.name },
-    {
-      label: words.facts.suctionTemperature,
-      value: format.ofDimension(suctionGroup.saturatedSuctionTemperatureK, 'temperature'),
-    },
+    ...(suctionGroup
+      ? [
+          { label: words.facts.suctionGroup, value: suctionGroup.name },
+          {
+            label: words.facts.suctionTemperature,
+            value: format.ofDimension(suctionGroup.saturatedSuctionTemperatureK, 'temperature'),
+          },
+        ]
+      : []),
+  ];
+  // The work of a whole group or system has nothing of what follows.
+  if (level !== 'circuit') return plant;
+  const facts: Fact[] = [
+    ...plant,
     { label: words.facts.temperatureClass, value: words.temperatureClasses[circuit.temperatureClass] },
     { label: words.facts.feed, value: words.feeds[circuit.feed] },
     { label: words.facts.control, value: words.controls[circuit.control] },

@@ -13,6 +13,7 @@ import { summarizeEntry } from './answer-summary';
 import { say } from './document-context';
 import { authorOf, judgedOf, whoAndWhen, type CircuitContext } from './judged-entry';
 import { sourceInWords } from '#shared/checklist/source-words';
+import { DOUBT_WORDS } from '#shared/checklist/words/doubt-words';
 
 const OUTCOME_ROOM = 150;
 
@@ -91,7 +92,7 @@ function placeAndInstruction(circuit: CircuitContext, step: Step): Block[] {
 function notices(circuit: CircuitContext, view: StepView, current: FoldEntry): Block[] {
   const { sheet, words } = circuit.context;
   const judged = judgedOf(current);
-  const cautions = (judged?.doubts ?? []).map((doubt) => words.doubts[doubt.kind]);
+  const cautions = (judged?.doubts ?? []).map((doubt) => say(circuit.context, DOUBT_WORDS[doubt.kind]));
   if (view.fold?.answeredTwice) cautions.push(words.answeredTwice);
   const source = judged?.limit?.source ?? '';
   return [

@@ -5,7 +5,7 @@ import { paragraph } from '../../pdf/paragraph';
 import { ruledTable } from '../../pdf/ruled-table';
 import { STYLES } from '../../pdf/text-style';
 import { countApproved } from './cover-page';
-import { beginChapter, SUMMARY_KEY, type DocumentContext } from './document-context';
+import { beginChapter, SUMMARY_KEY, subjectOf, type DocumentContext } from './document-context';
 import type { SummaryCircuit, SummarySystem } from './package-content';
 
 const ORDER = [
@@ -62,6 +62,7 @@ function systemBlocks(context: DocumentContext, system: SummarySystem): Block[] 
     ),
     ...line,
     gap(6),
+    ...workTable(context, system),
     ...circuitTable(context, begun),
     ...(notBegun.length > 0
       ? [
@@ -76,13 +77,34 @@ function systemBlocks(context: DocumentContext, system: SummarySystem): Block[] 
   ];
 }
 
+/** The own work of a system and its groups, which no circuit's state says anything of. */
+function workTable(context: DocumentContext, { work }: SummarySystem): Block[] {
+  const { sheet, words } = context;
+  if (work.length === 0) return [];
+  const columns = [
+    { title: words.columns.work, share: 40, style: STYLES.mono },
+    { title: '', share: 38 },
+    { title: words.columns.state, share: 26 },
+  ];
+  const rows = work.map(({ level, code, state }) => [
+    { text: code },
+    { text: subjectOf(context, { level, description: '' }) },
+    {
+      text: words.states[state],
+      mark: (page: typeof sheet, x: number, y: number) => drawJoint(page, x, y, 3.2, state),
+    },
+  ]);
+  return [...ruledTable(sheet, columns, rows, { hasRowHeads: true, padding: 2.5 }), gap(12)];
+}
+
 /** The circuits of a system that have a checklist and nothing on it, each with the number of its steps. */
 function notBegunIn(context: DocumentContext, system: SummarySystem): ReadonlyMap<SummaryCircuit, number> {
   const { content, survey } = context;
   const found = new Map<SummaryCircuit, number>();
   for (const circuit of system.circuits) {
     const reference = content.circuits.find(
-      ({ systemName, code }) => systemName === system.name && code === circuit.code,
+      ({ level, systemName, code }) =>
+        level === 'circuit' && systemName === system.name && code === circuit.code,
     );
     const surveyed = reference && survey.get(reference.sequenceId);
     if (surveyed && !surveyed.isBegun) found.set(circuit, surveyed.stepCount);

@@ -1,29 +1,22 @@
 import type { Judgement } from '#shared/checklist/judgement';
-import type { SuperheatAnswer, SuperheatObservation } from '#shared/checklist/kinds/superheat';
+import type { SuperheatAnswer, SuperheatObservation, SuperheatPair } from '#shared/checklist/kinds/superheat';
+import { unreachable } from '#shared/failures/unreachable';
+import type { StepOf } from '#shared/checklist/step';
 import type { FoldEntry } from '#shared/sequences/fold';
 import { gap, kept, type Block } from '../../pdf/block';
-import { PAGE, TEXT_WIDTH } from '../../pdf/page-geometry';
 import { paragraph } from '../../pdf/paragraph';
-import { ruledTable } from '../../pdf/ruled-table';
-import { tornEdge } from '../../pdf/slip';
 import { STYLES } from '../../pdf/text-style';
 import type { DocumentContext } from './document-context';
 import { judgedOf, type CircuitContext } from './judged-entry';
 import { gaugeBlock } from './reading-blocks';
-
-type Working = Judgement['working'][number];
-
-/** One observation as a column of the working: its name and what was worked out for it, if anything. */
-interface WorkingColumn {
-  readonly title: string;
-  readonly typed: { readonly pressure: string; readonly temperature: string };
-  readonly working: Working | undefined;
-}
-
-const SLIP_X = PAGE.left + 10;
+import { workingBlocks, type Working, type WorkingColumn } from './working-blocks';
 
 /** Superheat of a coil: the value as left on its strip, how the valve behaved, and the whole working as a slip. */
-export function superheatBlocks(circuit: CircuitContext, entry: FoldEntry): Block[] {
+export function superheatBlocks(
+  circuit: CircuitContext,
+  entry: FoldEntry,
+  step: StepOf<'superheat'>,
+): Block[] {
   const { content } = entry.body;
   if (content.kind !== 'answer' || content.answer.kind !== 'superheat') return [];
   const judged = judgedOf(entry);
@@ -31,13 +24,21 @@ export function superheatBlocks(circuit: CircuitContext, entry: FoldEntry): Bloc
   const { answer } = content;
   // A result and how it was worked out are read together: they never stand on two pages.
   return kept([
-    ...resultBlocks(circuit, answer, judged),
+    ...resultBlocks(circuit, answer, judged, step.judgedBy === 'timeWeighted'),
     gap(3),
-    ...workingBlocks(circuit.context, columnsOf(circuit.context, answer, judged.working)),
+    ...slipsOf(circuit.context, answer, judged.working).flatMap((columns) => [
+      ...workingBlocks(circuit.context, columns),
+      gap(2),
+    ]),
   ]);
 }
 
-function resultBlocks(circuit: CircuitContext, answer: SuperheatAnswer, judged: Judgement): Block[] {
+function resultBlocks(
+  circuit: CircuitContext,
+  answer: SuperheatAnswer,
+  judged: Judgement,
+  byTime: boolean,
+): Block[] {
   const { sheet, words, format } = circuit.context;
   const figure = (label: string): number | null =>
     judged.figures.find((one) => one.label === label)?.value ?? null;
@@ -50,11 +51,12 @@ function resultBlocks(circuit: CircuitContext, answer: SuperheatAnswer, judged: 
   const saturation = figure('saturation');
   const difference = (kelvins: number): string => format.ofDimension(kelvins, 'temperatureDifference');
   const facts = [
-    answer.asLeft.valve === 'steady' || !hunting
+    hunting === null
       ? words.superheat.steady
-      : words.superheat.hunting(difference(hunting.low), difference(hunting.high)),
+      : words.superheat.hunting(difference(hunting.low), difference(hunting.high), byTime),
     saturation === null ? '' : words.superheat.saturation(format.ofDimension(saturation, 'temperature')),
     asFound === null ? words.superheat.notAsFound : words.superheat.wasFound(difference(asFound)),
+    ...circumstances(circuit.context, answer, judged),
   ];
   const { limit } = judged;
   return kept([
@@ -67,23 +69,78 @@ function resultBlocks(circuit: CircuitContext, answer: SuperheatAnswer, judged: 
   ]);
 }
 
-function columnsOf(
+/** How it was read and what was done to the valve, as far as it was said. */
+function circumstances(context: DocumentContext, answer: SuperheatAnswer, judged: Judgement): string[] {
+  const { words, format } = context;
+  const { superheat } = words;
+  const figure = (label: string): string | null => {
+    const found = judged.figures.find((one) => one.label === label);
+    return found ? format.quantity(found.value, found.unit) : null;
+  };
+  const timeWeighted = figure('superheatTimeWeighted');
+  const error = figure('superheatUncertainty');
+  const { asLeft, turns = [], clockwise, takenAt, lineDrop, instruments } = answer;
+  return [
+    ...(asLeft.valve === 'series'
+      ? [superheat.series(asLeft.readings.length, lastedFor(context, asLeft))]
+      : []),
+    ...(asLeft.valve === 'log' ? [superheat.log(asLeft.file.name, asLeft.file.rows)] : []),
+    ...(timeWeighted === null ? [] : [superheat.timeWeighted(timeWeighted)]),
+    ...(turns.length === 0
+      ? []
+      : [superheat.turns(turns.map((one) => superheat.turn(String(one.turns), one.direction)).join(', '))]),
+    ...(clockwise ? [superheat.sheet(clockwise === 'raisesSuperheat')] : []),
+    ...(takenAt === 'elsewhere' && lineDrop ? [superheat.elsewhere(format.typed(lineDrop))] : []),
+    ...(instruments ? [superheat.gauges[instruments.gauge]] : []),
+    ...(error === null ? [] : [superheat.error(error)]),
+  ];
+}
+
+function lastedFor({ format }: DocumentContext, series: SuperheatObservation & { valve: 'series' }): string {
+  const first = series.readings[0]?.atS ?? 0;
+  return format.ofDimension((series.readings.at(-1)?.atS ?? first) - first, 'duration');
+}
+
+/**
+ * The slips of an answer: all single pairs side by side on one, each working of a series on its own, the instruments'
+ * error last. Judging writes the workings of the value as left first; an observation that couldn't be read has none.
+ */
+function slipsOf(
   context: DocumentContext,
   answer: SuperheatAnswer,
   workings: readonly Working[],
-): WorkingColumn[] {
+): WorkingColumn[][] {
   const { words } = context;
-  const left = observationColumns(context, answer.asLeft, words.superheat.asLeft);
-  const found = answer.asFound ? observationColumns(context, answer.asFound, words.superheat.asFound) : [];
-  // Judging writes the workings of the value as left first; an observation that couldn't be read has none at all.
-  const hasLeft = workings.length >= left.length;
-  const withWorking = (columns: readonly WorkingColumn[], from: number, present: boolean): WorkingColumn[] =>
-    columns.map((column, index) => ({ ...column, working: present ? workings[from + index] : undefined }));
+  const errors = workings.filter(isOfError);
+  const others = workings.filter((working) => !isOfError(working));
+  const leftCount = workingCount(answer.asLeft);
+  const looks = [
+    ...(answer.asFound
+      ? [{ look: answer.asFound, name: words.superheat.asFound, own: others.slice(leftCount) }]
+      : []),
+    { look: answer.asLeft, name: words.superheat.asLeft, own: others.slice(0, leftCount) },
+  ].map(({ look, name, own }) => ({
+    isSeries: look.valve === 'series' || look.valve === 'log',
+    name,
+    own,
+    columns: observationColumns(context, look, name).map((column, index) => ({
+      ...column,
+      working: own.length === workingCount(look) ? own[index] : undefined,
+    })),
+  }));
+  const pairs = looks.filter(({ isSeries }) => !isSeries).flatMap(({ columns }) => columns);
+  const series = looks.filter(({ isSeries }) => isSeries);
   return [
-    ...withWorking(found, left.length, workings.length >= left.length + found.length),
-    ...withWorking(left, 0, hasLeft),
+    ...(pairs.length > 0 ? [pairs] : []),
+    ...series.flatMap(({ name, own }) => own.map((working) => [{ title: name, typed: {}, working }])),
+    ...errors.map((working) => [{ title: words.superheat.asLeft, typed: {}, working }]),
   ];
 }
+
+const isOfError = ({ formula }: Working): boolean => formula === 'superheatUncertainty';
+
+/** How many workings judging writes for a look that it can read: a series has its readings and what they give. */
+const workingCount = ({ valve }: SuperheatObservation): number => (valve === 'steady' ? 1 : 2);
 
 function observationColumns(
   context: DocumentContext,
@@ -91,104 +148,23 @@ function observationColumns(
   name: string,
 ): WorkingColumn[] {
   const { words, format } = context;
-  const pairs =
-    observation.valve === 'steady'
-      ? [{ title: name, pair: observation.pair }]
-      : [
-          { title: words.superheat.low(name), pair: observation.low },
-          { title: words.superheat.high(name), pair: observation.high },
-        ];
-  return pairs.map(({ title, pair }) => ({
+  const column = (title: string, pair: SuperheatPair): WorkingColumn => ({
     title,
-    typed: { pressure: format.typed(pair.pressure), temperature: format.typed(pair.temperature) },
+    typed: { suctionPressure: format.typed(pair.pressure), lineTemperature: format.typed(pair.temperature) },
     working: undefined,
-  }));
-}
-
-function workingBlocks(context: DocumentContext, columns: readonly WorkingColumn[]): Block[] {
-  const { sheet, words } = context;
-  // Narrow for one column: a figure must not stand a page's width from its name.
-  const width = Math.min(PAGE.right - SLIP_X, 170 + 100 * columns.length);
-  const place = { x: SLIP_X, width };
-  const reference = columns.find((column) => column.working)?.working;
-  const table = ruledTable(
-    sheet,
-    [
-      { title: words.superheat.working, share: 30 },
-      ...columns.map((column) => ({
-        title: column.title,
-        share: 18,
-        style: STYLES.mono,
-        align: 'right' as const,
-      })),
-    ],
-    workingRows(context, columns, reference).map((row) =>
-      row.map((text, index) => (index === 0 ? { text, style: STYLES.small } : { text })),
-    ),
-    { ...place, hasRowHeads: true, padding: 1.5 },
-  );
-  const slip = [
-    tornEdge(SLIP_X, 'top'),
-    ...kept(table, true),
-    gap(4),
-    ...(reference ? explanation(context, reference) : []),
-    tornEdge(SLIP_X, 'bottom'),
-  ];
-  return kept(slip);
-}
-
-function workingRows(
-  context: DocumentContext,
-  columns: readonly WorkingColumn[],
-  reference: Working | undefined,
-): string[][] {
-  const { words, format } = context;
-  if (!reference) {
-    return [
-      [words.figures['suctionPressure'] ?? '', ...columns.map((column) => column.typed.pressure)],
-      [words.figures['lineTemperature'] ?? '', ...columns.map((column) => column.typed.temperature)],
-    ];
+  });
+  switch (observation.valve) {
+    case 'steady':
+      return [column(name, observation.pair)];
+    case 'hunting':
+      return [
+        column(words.superheat.low(name), observation.low),
+        column(words.superheat.high(name), observation.high),
+      ];
+    case 'series':
+    case 'log':
+      return [{ title: name, typed: {}, working: undefined }];
+    default:
+      return unreachable(observation);
   }
-  return reference.lines.map((line) => [
-    words.figures[line.label] ?? spelledOut(line.label),
-    ...columns.map((column) => {
-      const own = column.working?.lines.find((candidate) => candidate.label === line.label);
-      if (own) return format.quantity(own.value, own.unit);
-      if (line.label === 'suctionPressure') return column.typed.pressure;
-      return line.label === 'lineTemperature' ? column.typed.temperature : '—';
-    }),
-  ]);
-}
-
-function explanation(context: DocumentContext, working: Working): Block[] {
-  const { sheet, words } = context;
-  const formula = words.formulas[working.formula] ?? spelledOut(working.formula);
-  const place = { x: SLIP_X, width: TEXT_WIDTH - (SLIP_X - PAGE.left) };
-  return [
-    ...paragraph(sheet, `${words.superheat.formula} ${formula}`, STYLES.small, place),
-    ...paragraph(
-      sheet,
-      `${words.superheat.source} ${shortSource(working.source)}; ${words.superheat.inFull}`,
-      STYLES.small,
-      place,
-    ),
-  ];
-}
-
-/** The table and the program behind it; its literature is long and stands once, at the end of the chapter. */
-const shortSource = (source: string): string => source.split(';')[0] ?? source;
-
-/** Sources of all workings among the entries, each once and in full. */
-export function sourcesOf(entries: readonly FoldEntry[]): readonly string[] {
-  return [
-    ...new Set(entries.flatMap((entry) => (judgedOf(entry)?.working ?? []).map((working) => working.source))),
-  ];
-}
-
-/** A key as words, for a figure that has no name here yet: "oilLevel" becomes "oil level". */
-function spelledOut(key: string): string {
-  return key.replace(
-    /([a-z])([A-Z])/g,
-    (_match, before: string, after: string) => `${before} ${after.toLowerCase()}`,
-  );
 }

@@ -131,7 +131,7 @@ describe('writePackageDocument', () => {
   it('never puts a superheat and its working on two pages', () => {
     const starts = pages.filter((page) => page.includes('7. Superheat of the coil'));
     expect(starts.length).toBe(3);
-    starts.forEach((page) => expect(page).toContain('Formula: superheat'));
+    starts.forEach((page) => expect(page).toContain('Formula: Superheat'));
   });
 
   it('prints readings in the units of the opening, as typed, with their limits', () => {
@@ -145,15 +145,15 @@ describe('writePackageDocument', () => {
     const page = pageWith('7. Superheat of the coil');
     expect(page).toMatch(/As found\nAs left, lowest\nAs left, highest/);
     expect(page).toMatch(/Dew temperature\n24\.4 °F\n24\.4 °F\n24\.4 °F/);
-    expect(flat(page)).toContain('Formula: superheat = line temperature − dew temperature');
+    expect(flat(page)).toContain('Formula: Superheat = line temperature − dew temperature');
     expect(page).toContain('Source: R-448A');
   });
 
   it('prints what went wrong: outside, refused, standing, reopened', () => {
     const all = pages.join('\n');
     expect(all).toContain('Below limits');
-    expect(all).toContain('Liquid may be leaving the coil');
-    expect(all).toContain('What was entered is not a number.');
+    expect(all).toContain('liquid may be leaving the coil');
+    expect(all).toContain('This is not a number.');
     expect(all).toContain('Still standing: not put back.');
     expect(all).toContain('Fill the trap again.');
   });
