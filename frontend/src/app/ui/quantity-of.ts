@@ -3,7 +3,7 @@ import { fromSi } from '#shared/units/convert';
 import { formatNumber, formatQuantity } from '#shared/units/format';
 import { UNITS } from '#shared/units/unit';
 import type { Dimension } from '#shared/units/unit';
-import { displayUnit, type UnitSystem } from '#shared/units/unit-system';
+import { displayUnitFor, type UnitSystem } from '#shared/units/unit-system';
 import { readingLanguage } from './words/reading-language';
 
 /** A stored SI value in the opening's units with its symbol; an em dash for a value that isn't there. */
@@ -21,7 +21,7 @@ export class QuantityOf implements PipeTransform {
     unitSystem: UnitSystem,
     decimals?: number,
   ): string {
-    const unit = displayUnit(dimension, unitSystem);
+    const unit = displayUnitFor(si ?? 0, dimension, unitSystem);
     if (si === null || si === undefined || decimals === undefined) {
       return formatQuantity(si ?? Number.NaN, unit, this.language());
     }

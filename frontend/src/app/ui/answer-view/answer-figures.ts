@@ -12,6 +12,8 @@ export interface JudgedFigure {
   readonly high: number | null;
   readonly minimum: number | null;
   readonly maximum: number | null;
+  /** Half width of the instruments' error; `null` where it isn't known. */
+  readonly uncertainty: number | null;
 }
 
 /** One value just as it was typed, with what it is of. */
@@ -20,7 +22,13 @@ export interface TypedInput {
   readonly typed: TypedValue;
 }
 
-const ON_STRIP: readonly string[] = ['value', 'superheat', 'superheatLow', 'superheatHigh'];
+const ON_STRIP: readonly string[] = [
+  'value',
+  'superheat',
+  'superheatLow',
+  'superheatHigh',
+  'superheatUncertainty',
+];
 
 /**
  * The figure for the strip. Limits come from the judgement, because those applied on the day.
@@ -39,13 +47,23 @@ export function judgedFigure(judgement: Judgement | null): JudgedFigure | null {
     high: judgement.limit.high,
     minimum: named('superheatLow'),
     maximum: named('superheatHigh'),
+    uncertainty: named('superheatUncertainty'),
   };
 }
 
-/** The figures that the strip doesn't show already. */
-export function otherFigures(judgement: Judgement | null): readonly Figure[] {
+/** What belongs to one pair only: where an answer has several, each pair's own lines say it. */
+const OF_A_PAIR: readonly string[] = ['saturation', 'glide'];
+
+/**
+ * The figures that neither the strip nor the lines of the pairs show already.
+ *
+ * @param withPairs whether the pairs are shown with a saturation each
+ */
+export function otherFigures(judgement: Judgement | null, withPairs = false): readonly Figure[] {
   const onStrip = judgedFigure(judgement) !== null;
-  return (judgement?.figures ?? []).filter(({ label }) => !onStrip || !ON_STRIP.includes(label));
+  return (judgement?.figures ?? []).filter(
+    ({ label }) => !(onStrip && ON_STRIP.includes(label)) && !(withPairs && OF_A_PAIR.includes(label)),
+  );
 }
 
 /** The readings of an answer as they were typed: what was typed is shown, not only its conversion. */
@@ -53,28 +71,75 @@ export function typedInputs(content: EntryContent): readonly TypedInput[] {
   if (content.kind !== 'answer') return [];
   const { answer } = content;
   if (answer.kind === 'reading') return [{ label: 'typed_value', typed: answer.value }];
-  if (answer.kind !== 'superheat') return [];
-  const found = answer.asFound ? observationInputs(answer.asFound, 'Found') : [];
-  return [...found, ...observationInputs(answer.asLeft, 'Left')];
+  return answer.kind === 'superheat' ? pairsOf(answer).flatMap(pairInputs) : [];
 }
 
-type Observation = Extract<
-  Extract<EntryContent, { kind: 'answer' }>['answer'],
-  { kind: 'superheat' }
->['asLeft'];
+/** One pair of a superheat as it was typed, and the saturation that was worked out from its pressure. */
+export interface PairLines {
+  readonly inputs: readonly TypedInput[];
+  /** Label of the saturation. */
+  readonly label: string;
+  /** `null` for a pair that couldn't be worked out. */
+  readonly saturationK: number | null;
+}
 
-function observationInputs(observation: Observation, when: 'Found' | 'Left'): TypedInput[] {
-  const pairs =
-    observation.valve === 'steady'
-      ? [{ suffix: '', pair: observation.pair }]
-      : [
-          { suffix: 'Low', pair: observation.low },
-          { suffix: 'High', pair: observation.high },
-        ];
-  return pairs.flatMap(({ suffix, pair }) => [
-    { label: `typed_pressure${when}${suffix}`, typed: pair.pressure },
-    { label: `typed_temperature${when}${suffix}`, typed: pair.temperature },
-  ]);
+/**
+ * The pairs of a superheat answer, each with its own saturation: a hunting valve has two, before and after adjusting.
+ * Saturations come from the working that was kept with the judgement.
+ *
+ * @returns `null` for any other answer, a single pair (its saturation is among the figures), or one without working
+ */
+export function pairLines(content: EntryContent, judgement: Judgement | null): readonly PairLines[] | null {
+  if (content.kind !== 'answer' || content.answer.kind !== 'superheat') return null;
+  const pairs = pairsOf(content.answer);
+  const left = pairs.filter(({ when }) => when === 'Left');
+  const dews = dewTemperaturesK(judgement);
+  // Judging works out the as-left first; an as-found that can't be read has no working at all.
+  if (pairs.length < 2 || (dews.length !== pairs.length && dews.length !== left.length)) return null;
+  const judged = [...left, ...pairs.filter(({ when }) => when === 'Found')];
+  return pairs.map((pair) => ({
+    inputs: pairInputs(pair),
+    label: `saturation_${pair.when}${pair.suffix}`,
+    saturationK: dews[judged.indexOf(pair)] ?? null,
+  }));
+}
+
+type SuperheatAnswer = Extract<Extract<EntryContent, { kind: 'answer' }>['answer'], { kind: 'superheat' }>;
+type Observation = SuperheatAnswer['asLeft'];
+
+interface TypedPair {
+  readonly when: 'Found' | 'Left';
+  readonly suffix: '' | 'Low' | 'High';
+  readonly pressure: TypedValue;
+  readonly temperature: TypedValue;
+}
+
+/** All pairs that were typed, in the order of the work. */
+function pairsOf({ asFound, asLeft }: SuperheatAnswer): readonly TypedPair[] {
+  return [...(asFound ? observationPairs(asFound, 'Found') : []), ...observationPairs(asLeft, 'Left')];
+}
+
+function observationPairs(observation: Observation, when: TypedPair['when']): readonly TypedPair[] {
+  if (observation.valve === 'steady') return [{ when, suffix: '', ...observation.pair }];
+  if (observation.valve !== 'hunting') return [];
+  return [
+    { when, suffix: 'Low', ...observation.low },
+    { when, suffix: 'High', ...observation.high },
+  ];
+}
+
+function pairInputs({ when, suffix, pressure, temperature }: TypedPair): readonly TypedInput[] {
+  return [
+    { label: `typed_pressure${when}${suffix}`, typed: pressure },
+    { label: `typed_temperature${when}${suffix}`, typed: temperature },
+  ];
+}
+
+function dewTemperaturesK(judgement: Judgement | null): readonly number[] {
+  return (judgement?.working ?? []).flatMap(({ formula, lines }) => {
+    const dew = lines.find(({ label, unit }) => label === 'dewTemperature' && unit === 'K');
+    return formula === 'superheatFromDew' && dew ? [dew.value] : [];
+  });
 }
 
 /** The label of the chosen option; the stored value where the step has no such option any more. */

@@ -4,8 +4,9 @@ import type { SequenceFacts } from '#shared/checklist/facts';
 import { judge } from '#shared/checklist/judge';
 import type { Answer, Step } from '#shared/checklist/step';
 import type { FoldEntry } from '#shared/sequences/fold';
+import { PULL_DOWN, TREND_STEP } from '../trend-chart/trend.fixture';
 import { withWords } from '../words/with-words.fixture';
-import { judgedFigure, otherFigures, typedInputs } from './answer-figures';
+import { judgedFigure, otherFigures, pairLines, typedInputs } from './answer-figures';
 import { AnswerView } from './answer-view';
 
 const facts: SequenceFacts = {
@@ -77,7 +78,64 @@ describe('answer figures', () => {
   });
 });
 
+describe('pairLines', () => {
+  const lines = (answer: Answer) => {
+    const entry = entryOf(superheat, answer);
+    return pairLines(entry.body.content, entry.server.judgement);
+  };
+
+  it('gives each pair of a hunting valve the saturation of its own pressure', () => {
+    const [low, high] = lines(hunting)!;
+    const { working } = entryOf(superheat, hunting).server.judgement!;
+    const dewK = working.map((one) => one.lines.find(({ label }) => label === 'dewTemperature')?.value);
+    expect(low).toMatchObject({ label: 'saturation_LeftLow', saturationK: dewK[0] });
+    expect(high).toMatchObject({ label: 'saturation_LeftHigh', saturationK: dewK[1] });
+    // 48 psig lies above 47 psig, and so does its saturation.
+    expect(high!.saturationK).toBeGreaterThan(low!.saturationK!);
+  });
+
+  it('puts as found before as left, whatever the order of the working', () => {
+    const found = { valve: 'steady' as const, pair: pair('40', '14') };
+    const all = lines({ ...hunting, asFound: found } as Answer)!;
+    expect(all.map(({ label }) => label)).toEqual([
+      'saturation_Found',
+      'saturation_LeftLow',
+      'saturation_LeftHigh',
+    ]);
+    expect(all[0]!.saturationK).toBeLessThan(all[1]!.saturationK!);
+  });
+
+  it('leaves a saturation out where the as found could not be read', () => {
+    const found = { valve: 'steady' as const, pair: pair('forty', '14') };
+    const all = lines({ ...hunting, asFound: found } as Answer)!;
+    expect(all.map(({ saturationK }) => saturationK === null)).toEqual([true, false, false]);
+  });
+
+  it('has nothing to add to a single pair', () => {
+    const steady = { valve: 'steady' as const, pair: pair('47', '20') };
+    expect(lines({ kind: 'superheat', asFound: null, asLeft: steady })).toBeNull();
+  });
+});
+
 describe('AnswerView', () => {
+  it('shows both pairs of a hunting valve with their saturations, and no other', async () => {
+    const root = (await render(superheat, entryOf(superheat, hunting))).nativeElement as HTMLElement;
+    const terms = [...root.querySelectorAll(':scope > dl dt')].map((term) => term.textContent);
+    expect(terms).toEqual([
+      'Suction pressure, as left, at the lowest',
+      'Line temperature, as left, at the lowest',
+      'Saturation (dew), as left, at the lowest',
+      'Suction pressure, as left, at the highest',
+      'Line temperature, as left, at the highest',
+      'Saturation (dew), as left, at the highest',
+    ]);
+    const values = [...root.querySelectorAll(':scope > dl .worked-out dd')].map((one) =>
+      one.textContent.trim(),
+    );
+    expect(new Set(values).size).toBe(2);
+    expect(values.every((value) => value.endsWith('°F'))).toBe(true);
+  });
+
   it('shows outcome, criterion, and the working behind it', async () => {
     const root = (await render(superheat, entryOf(superheat, hunting))).nativeElement as HTMLElement;
     expect(root.querySelector('app-outcome-mark')?.textContent).toMatch(/Within|Outside/);
@@ -118,6 +176,16 @@ describe('AnswerView', () => {
     expect(root.querySelector('img')?.getAttribute('src')).toBe(`/photos/${'a'.repeat(64)}/thumbnail`);
     root.querySelectorAll<HTMLElement>('.photos button')[1]?.click();
     expect(opened).toEqual([1]);
+  });
+
+  it('shows a log: its file, how much of it, its line and what came of it', async () => {
+    const root = (await render(TREND_STEP, entryOf(TREND_STEP, PULL_DOWN))).nativeElement as HTMLElement;
+    const text = root.textContent.replace(/\s+/g, ' ');
+    expect(text).toContain('box 7.csv');
+    expect(text).toContain('217 of 217 rows recorded');
+    expect(text).toContain('Column: Air (°F)');
+    expect(text).toContain('Reached the band and held it.');
+    expect(root.querySelector('app-trend-chart path')?.getAttribute('d')).toMatch(/^M0\.0 /);
   });
 
   it('gives the reason of what does not apply', async () => {

@@ -9,9 +9,20 @@ import { QuantityOf } from '../quantity-of';
 import { SignatureView } from '../signature/signature-view';
 import { Strip } from '../strip/strip';
 import { TextOf } from '../text-of';
+import { TrendView } from '../trend-chart/trend-view';
+import { JudgedOf } from '../words/judged-words';
 import { SourceOf } from '../words/source-of';
 import { WorkingSlip } from '../working-slip/working-slip';
-import { chosenLabel, judgedFigure, otherFigures, typedInputs } from './answer-figures';
+import {
+  chosenLabel,
+  judgedFigure,
+  otherFigures,
+  pairLines,
+  typedInputs,
+  type TypedInput,
+} from './answer-figures';
+import { SuperheatExtras } from './superheat-extras';
+import { judgedMean } from './superheat-lines';
 
 /** Where a photo's bytes are read from; the thumbnail for the row, the full size for the dialog. */
 export type PhotoUrl = (sha256: string, size: 'full' | 'thumbnail') => string;
@@ -22,7 +33,19 @@ export type PhotoUrl = (sha256: string, size: 'full' | 'thumbnail') => string;
  */
 @Component({
   selector: 'app-answer-view',
-  imports: [TranslocoDirective, OutcomeMark, QuantityOf, SignatureView, SourceOf, Strip, TextOf, WorkingSlip],
+  imports: [
+    JudgedOf,
+    TranslocoDirective,
+    OutcomeMark,
+    QuantityOf,
+    SignatureView,
+    SourceOf,
+    Strip,
+    SuperheatExtras,
+    TextOf,
+    TrendView,
+    WorkingSlip,
+  ],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './answer-view.html',
   styleUrl: './answer-view.scss',
@@ -49,15 +72,30 @@ export class AnswerView {
     return this.judgement()?.outcome ?? (content.kind === 'answer' ? content.workedOut.outcome : 'recorded');
   });
   protected readonly judged = computed(() => judgedFigure(this.judgement()));
+  /** The pairs of a superheat with a saturation each, where there are several; `null` where there is one or none. */
+  private readonly pairs = computed(() => pairLines(this.content(), this.judgement()));
   protected readonly figures = computed(() =>
-    otherFigures(this.judgement()).map((figure) => ({ ...figure, dimension: UNITS[figure.unit].dimension })),
-  );
-  protected readonly typed = computed(() =>
-    typedInputs(this.content()).map(({ label, typed }) => ({
-      label,
-      text: `${typed.text} ${UNITS[typed.unit].symbol}`.trim(),
+    otherFigures(this.judgement(), this.pairs() !== null).map((figure) => ({
+      ...figure,
+      dimension: UNITS[figure.unit].dimension,
     })),
   );
+  /** Line by line: as it was typed, or, with a `saturationK`, worked out from the line's pair. */
+  protected readonly inputs = computed(() => {
+    const typed = ({ label, typed: { text, unit } }: TypedInput) => ({
+      label,
+      text: `${text} ${UNITS[unit].symbol}`.trim(),
+      saturationK: null,
+    });
+    return (
+      this.pairs()?.flatMap(({ inputs, label, saturationK }) => [
+        ...inputs.map(typed),
+        ...(saturationK === null ? [] : [{ label, text: '', saturationK }]),
+      ]) ?? typedInputs(this.content()).map(typed)
+    );
+  });
+  /** Which of a superheat's two averages is held against the band. */
+  protected readonly judgedMean = computed(() => judgedMean(this.step()));
   protected readonly chosen = computed(() => {
     const answer = this.answer();
     return answer?.kind === 'choose' ? chosenLabel(this.step(), answer.value) : null;

@@ -1,13 +1,14 @@
 import { describe, expect, it } from '@jest/globals';
 import { TestBed, type ComponentFixture } from '@angular/core/testing';
+import type { Language } from '#shared/checklist/text';
 import { FAILURE_CODES } from '#shared/failures/failure';
 import { WORDS as EN } from '../../../i18n/loader/en';
 import { WORDS as ES } from '../../../i18n/loader/es';
 import { withWords } from '../words/with-words.fixture';
 import { ProblemNote } from './problem-note';
 
-async function render(problem: unknown): Promise<ComponentFixture<ProblemNote>> {
-  TestBed.configureTestingModule({ imports: [ProblemNote, withWords()] });
+async function render(problem: unknown, language: Language = 'en'): Promise<ComponentFixture<ProblemNote>> {
+  TestBed.configureTestingModule({ imports: [ProblemNote, withWords(language)] });
   const fixture = TestBed.createComponent(ProblemNote);
   fixture.componentRef.setInput('problem', problem);
   await fixture.whenStable();
@@ -32,13 +33,15 @@ describe('ProblemNote', () => {
       status: 400,
       detail: '',
       code: 'invalidInput',
-      places: [{ path: 'name', message: 'must not be empty' }],
+      places: [{ path: 'body.personId', message: 'This person has no such role here.' }],
       facts: {},
       requestId: 'r-2',
     };
-    const root = (await render({ status: 400, error })).nativeElement as HTMLElement;
+    const root = (await render({ status: 400, error }, 'es')).nativeElement as HTMLElement;
     expect(root.querySelector('button')).toBeNull();
-    expect(root.querySelector('li')?.textContent).toContain('must not be empty');
+    expect(root.querySelector('li')?.textContent).toBe(
+      'Persona: los circuitos se asignan a instaladores y responsables de esta apertura.',
+    );
   });
 
   it.each([...FAILURE_CODES, 'temporary', 'bug', 'offline', 'unknown'])(

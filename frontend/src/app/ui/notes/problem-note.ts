@@ -2,6 +2,7 @@ import { ChangeDetectionStrategy, Component, computed, input, output } from '@an
 import { MatButton } from '@angular/material/button';
 import { TranslocoDirective } from '@jsverse/transloco';
 import { isWorthRetrying, problemCodeOf, problemOf } from '../problem-of';
+import { placeWords } from './place-words';
 
 /** Why something didn't work, in a sentence, and the way to try again where that can help. */
 @Component({
@@ -14,9 +15,7 @@ import { isWorthRetrying, problemCodeOf, problemOf } from '../problem-of';
       @if (places().length > 0) {
         <ul>
           @for (place of places(); track $index) {
-            <li>
-              <code>{{ place.path }}</code> {{ place.message }}
-            </li>
+            <li>{{ t(place.key, place.params) }}</li>
           }
         </ul>
       }
@@ -59,7 +58,9 @@ export class ProblemNote {
   readonly retry = output<void>();
 
   protected readonly code = computed(() => problemCodeOf(this.problem()));
-  protected readonly places = computed(() => problemOf(this.problem())?.places ?? []);
+  protected readonly places = computed(() =>
+    (problemOf(this.problem())?.places ?? []).map(({ path }) => placeWords(path)),
+  );
   protected readonly canRetry = computed(() => this.retryable() && isWorthRetrying(this.code()));
   /** Only for what a person can't put right: they may have to tell somebody which request it was. */
   protected readonly requestId = computed(() =>

@@ -45,4 +45,54 @@ describe('SignatureBox where nothing can be drawn', () => {
     await type('Inés V');
     expect(fixture.componentInstance.signature()).toBeNull();
   });
+
+  const message = (): string => root().querySelector('.wrong')?.textContent?.trim() ?? '';
+
+  it('says beneath the box what is wrong with the name, once the box is left', async () => {
+    await type('Ines Vegas');
+    expect(message()).toBe('');
+    const input = root().querySelector('input')!;
+    input.dispatchEvent(new Event('blur'));
+    await fixture.whenStable();
+    expect(message()).toBe('The name has to be as on your account: Inés Vega');
+    expect(input.getAttribute('aria-invalid')).toBe('true');
+    const described = input.getAttribute('aria-describedby')!;
+    expect(root().querySelector(`[id="${described}"]`)?.textContent).toContain('Inés Vega');
+    await type('Inés Vega');
+    expect(message()).toBe('');
+  });
+
+  it('says so at Enter too, but never about an empty box', async () => {
+    const input = root().querySelector('input')!;
+    input.dispatchEvent(new KeyboardEvent('keydown', { key: 'Enter' }));
+    await fixture.whenStable();
+    expect(message()).toBe('');
+    await type('Inés');
+    expect(message()).not.toBe('');
+  });
+});
+
+describe('SignatureBox', () => {
+  it('leads the keyboard to what takes the place of the button pressed', async () => {
+    jest
+      .spyOn(HTMLCanvasElement.prototype, 'getContext')
+      .mockReturnValue({ fillRect() {}, clearRect() {}, scale() {} } as unknown as RenderingContext);
+    TestBed.configureTestingModule({ imports: [SignatureBox, withWords()] });
+    const fixture = TestBed.createComponent(SignatureBox);
+    fixture.componentRef.setInput('meaning', 'Reviewed and approved');
+    fixture.componentRef.setInput('printedName', 'Inés Vega');
+    await fixture.whenStable();
+    const root = fixture.nativeElement as HTMLElement;
+    document.body.append(root);
+    const button = (words: string): HTMLButtonElement =>
+      [...root.querySelectorAll('button')].find((one) => one.textContent?.includes(words))!;
+
+    button('Type my name instead').click();
+    await fixture.whenStable();
+    expect(document.activeElement).toBe(root.querySelector('input'));
+    button('Draw instead').click();
+    await fixture.whenStable();
+    expect(document.activeElement).toBe(button('Type my name instead'));
+    root.remove();
+  });
 });

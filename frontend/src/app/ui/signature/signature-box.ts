@@ -1,10 +1,13 @@
-import type { ElementRef } from '@angular/core';
 import {
+  afterNextRender,
   afterRenderEffect,
   ChangeDetectionStrategy,
   Component,
+  computed,
   DestroyRef,
+  ElementRef,
   inject,
+  Injector,
   input,
   model,
   signal,
@@ -16,6 +19,8 @@ import { TranslocoDirective } from '@jsverse/transloco';
 import SignaturePad from 'signature_pad';
 import type { Signature } from '#shared/checklist/signature';
 import { isSameName, toPoints, toStrokes } from './strokes';
+
+let boxes = 0;
 
 /**
  * Takes a signature: drawn in the box, or the name typed for hands that can't draw (WCAG 2.2, 2.5.7). What signing means
@@ -34,12 +39,21 @@ export class SignatureBox {
   readonly signature = model<Signature | null>(null);
 
   private readonly canvas = viewChild<ElementRef<HTMLCanvasElement>>('canvas');
+  private readonly nameBox = viewChild<ElementRef<HTMLInputElement>>('typed');
+  private readonly typeButton = viewChild('typeButton', { read: ElementRef<HTMLElement> });
   private readonly destroyed = inject(DestroyRef);
+  private readonly injector = inject(Injector);
   private pad: SignaturePad | null = null;
   private watcher: ResizeObserver | null = null;
 
   protected readonly isTyping = signal(false);
   protected readonly typedName = signal('');
+  /** Whether the name is said to be finished: the box was left, or Enter pressed. */
+  protected readonly isFinished = signal(false);
+  protected readonly isWrongName = computed(
+    () => this.isFinished() && this.typedName().trim() !== '' && this.signature() === null,
+  );
+  protected readonly wrongId = `signature-wrong-${(boxes += 1)}`;
 
   constructor() {
     afterRenderEffect(() => {
@@ -56,7 +70,12 @@ export class SignatureBox {
   protected setTyping(isTyping: boolean): void {
     this.signature.set(null);
     this.typedName.set('');
+    this.isFinished.set(false);
     this.isTyping.set(isTyping);
+    // The button that was pressed is gone: the cursor goes on to what took its place.
+    afterNextRender(() => (isTyping ? this.nameBox() : this.typeButton())?.nativeElement.focus(), {
+      injector: this.injector,
+    });
   }
 
   protected typeName(name: string): void {

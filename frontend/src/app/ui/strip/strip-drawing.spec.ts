@@ -20,6 +20,17 @@ describe('drawStrip', () => {
     expect(drawn.way).toEqual({ from: drawn.value, to: drawn.high, direction: 'down' });
   });
 
+  it('draws the instruments’ error around the value, on the bar', () => {
+    const drawn = drawStrip({ low: 3, high: 6, value: 4, ...steady, uncertainty: 40 });
+    expect((drawn.whisker!.from + drawn.whisker!.to) / 2).toBeCloseTo(drawn.value, 10);
+    expect(drawn.whisker!.from).toBeGreaterThan(0);
+    expect(drawn.whisker!.to).toBeLessThan(1);
+  });
+
+  it.each([null, 0, NaN, -1])('draws no error of %p', (uncertainty) => {
+    expect(drawStrip({ low: 3, high: 6, value: 4, ...steady, uncertainty }).whisker).toBeNull();
+  });
+
   it('shows no way for a value on the edge', () => {
     expect(drawStrip({ low: 278.15, high: null, value: 278.15 - 1e-10, ...steady }).way).toBeNull();
   });

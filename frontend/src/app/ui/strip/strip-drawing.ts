@@ -5,6 +5,8 @@ export interface StripValues {
   readonly value: number;
   readonly minimum: number | null;
   readonly maximum: number | null;
+  /** Half width of the instruments' error around the value, where it is known. */
+  readonly uncertainty?: number | null;
 }
 
 /** Positions along the bar as fractions: 0 is its left end, 1 its right end. */
@@ -15,6 +17,8 @@ export interface StripDrawing {
   readonly high: number | null;
   readonly value: number;
   readonly bracket: { readonly from: number; readonly to: number } | null;
+  /** The instruments' error around the value. */
+  readonly whisker: { readonly from: number; readonly to: number } | null;
   /** The way still to go, from the value to the nearer edge. `null` when it lies within, or nothing is wanted. */
   readonly way: { readonly from: number; readonly to: number; readonly direction: 'up' | 'down' } | null;
   /** Whether the channel is too narrow for both limits' labels under its edges; they then stand outside it. */
@@ -37,6 +41,7 @@ export function drawStrip(values: StripValues): StripDrawing {
   const { from, to } = scaleOf(values);
   const place = (si: number): number => (si - from) / (to - from);
   const { low, high, value, minimum, maximum } = values;
+  const error = errorOf(values);
   const slack = EDGE * Math.max(1, Math.abs(value));
   const edge =
     low !== null && value < low - slack ? low : high !== null && value > high + slack ? high : null;
@@ -49,6 +54,7 @@ export function drawStrip(values: StripValues): StripDrawing {
     high: high === null ? null : place(high),
     value: place(value),
     bracket: minimum === null || maximum === null ? null : { from: place(minimum), to: place(maximum) },
+    whisker: error === 0 ? null : { from: place(value - error), to: place(value + error) },
     way:
       edge === null ? null : { from: place(value), to: place(edge), direction: edge > value ? 'up' : 'down' },
     isNarrow: low !== null && high !== null && place(high) - place(low) < NARROW,
@@ -56,8 +62,13 @@ export function drawStrip(values: StripValues): StripDrawing {
   };
 }
 
-function scaleOf({ low, high, value, minimum, maximum }: StripValues): { from: number; to: number } {
-  const shown = [low, high, value, minimum, maximum].filter(
+const errorOf = ({ uncertainty }: StripValues): number =>
+  uncertainty && Number.isFinite(uncertainty) && uncertainty > 0 ? uncertainty : 0;
+
+function scaleOf(values: StripValues): { from: number; to: number } {
+  const { low, high, value, minimum, maximum } = values;
+  const error = errorOf(values);
+  const shown = [low, high, value - error, value + error, minimum, maximum].filter(
     (si): si is number => si !== null && Number.isFinite(si),
   );
   const least = Math.min(...shown);

@@ -1,14 +1,22 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import { TranslocoDirective } from '@jsverse/transloco';
 import type { Dimension } from '#shared/units/unit';
-import { formatQuantity } from '#shared/units/format';
+import { fromSi } from '#shared/units/convert';
+import { decimalsFor, formatNumber, formatQuantity } from '#shared/units/format';
 import { displayUnit, type UnitSystem } from '#shared/units/unit-system';
 import { readingLanguage } from '../words/reading-language';
 import { drawStrip } from './strip-drawing';
 
+/** What lies between two values of a dimension with a zero of its own. */
+const DIFFERENCE_OF: Readonly<Partial<Record<Dimension, Dimension>>> = {
+  temperature: 'temperatureDifference',
+  gaugePressure: 'pressureDifference',
+  absolutePressure: 'pressureDifference',
+};
+
 /**
  * A reading against its limits: the target as a channel in a ruled bar, a wedge for the value, a bracket for the low and
- * the high of a hunting valve, and an arrow only when there is a way to go. A sentence says the same to a screen reader.
+ * the high of a hunting valve, a whisker for the instruments' error, and only when there is a way to go an arrow and how far. A sentence says the same to a screen reader.
  */
 @Component({
   selector: 'app-strip',
@@ -23,6 +31,8 @@ export class Strip {
   readonly value = input.required<number>();
   readonly minimum = input<number | null>(null);
   readonly maximum = input<number | null>(null);
+  /** Half width of the instruments' error, in the same unit; `null` where it isn't known. */
+  readonly uncertainty = input<number | null>(null);
   readonly dimension = input.required<Dimension>();
   readonly unitSystem = input.required<UnitSystem>();
   readonly label = input.required<string>();
@@ -36,8 +46,16 @@ export class Strip {
       value: this.value(),
       minimum: this.minimum(),
       maximum: this.maximum(),
+      uncertainty: this.uncertainty(),
     }),
   );
+  /** How far it is to the nearer edge, and which way; `null` when there is no way to go. */
+  protected readonly toGo = computed(() => {
+    const way = this.drawing().way;
+    if (!way) return null;
+    const edge = way.direction === 'up' ? this.low() : this.high();
+    return { isUp: way.direction === 'up', by: Math.abs((edge ?? NaN) - this.value()) };
+  });
 
   /** The key of the sentence and its figures; parts that don't exist are empty. */
   protected readonly sentence = computed(() => {
@@ -51,6 +69,22 @@ export class Strip {
     return si === null
       ? ''
       : formatQuantity(si, displayUnit(this.dimension(), this.unitSystem()), this.language());
+  }
+
+  /** A distance on the scale: between two temperatures lies a difference, in its own unit. */
+  protected apart(si: number): string {
+    const dimension = DIFFERENCE_OF[this.dimension()] ?? this.dimension();
+    return formatQuantity(si, displayUnit(dimension, this.unitSystem()), this.language());
+  }
+
+  /** The value with its error, both in the one unit: "4.1 ± 1.6 °F". */
+  protected withError(): string {
+    const error = this.uncertainty();
+    const text = this.text(this.value());
+    if (error === null || this.drawing().whisker === null) return text;
+    const unit = displayUnit(this.dimension(), this.unitSystem());
+    const figure = formatNumber(fromSi(this.value(), unit), decimalsFor(unit), this.language());
+    return `${figure} ± ${this.apart(error)}`;
   }
 
   protected percent(fraction: number): string {

@@ -2,13 +2,14 @@ import { ChangeDetectionStrategy, Component, computed, input } from '@angular/co
 import { TranslocoDirective } from '@jsverse/transloco';
 import type { Judgement } from '#shared/checklist/judgement';
 import type { UnitSystem } from '#shared/units/unit-system';
+import { JudgedOf } from '../words/judged-words';
 import { readingLanguage } from '../words/reading-language';
 import { shortSource, workingLines } from './working-text';
 
 /** The torn-edge slip under a result: how it was worked out, line by line with units, and the formula's source. */
 @Component({
   selector: 'app-working-slip',
-  imports: [TranslocoDirective],
+  imports: [JudgedOf, TranslocoDirective],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <ng-container *transloco="let t; prefix: 'ui'">
@@ -17,11 +18,11 @@ import { shortSource, workingLines } from './working-text';
           <summary>{{ t('working') }}</summary>
           @for (slip of slips(); track $index) {
             <section class="slip">
-              <p class="formula">{{ t('formula_' + slip.formula) }}</p>
+              <p class="formula">{{ slip.formula | appJudged: 'formula' }}</p>
               <dl>
                 @for (line of slip.lines; track $index) {
                   <div [class.result]="$last">
-                    <dt>{{ t('figure_' + line.label) }}</dt>
+                    <dt>{{ line.label | appJudged: 'figure' }}</dt>
                     <dd>{{ line.text }}</dd>
                   </div>
                 }

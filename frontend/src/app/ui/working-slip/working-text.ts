@@ -2,7 +2,7 @@ import type { Judgement } from '#shared/checklist/judgement';
 import type { Language } from '#shared/checklist/text';
 import { formatQuantity } from '#shared/units/format';
 import { UNITS } from '#shared/units/unit';
-import { displayUnit, type UnitSystem } from '#shared/units/unit-system';
+import { displayUnitFor, type UnitSystem } from '#shared/units/unit-system';
 
 export type WorkingLineText = { readonly label: string; readonly text: string };
 
@@ -14,7 +14,7 @@ export function workingLines(
 ): readonly WorkingLineText[] {
   return working.lines.map(({ label, value, unit }) => ({
     label,
-    text: formatQuantity(value, displayUnit(UNITS[unit].dimension, unitSystem), language),
+    text: formatQuantity(value, displayUnitFor(value, UNITS[unit].dimension, unitSystem), language),
   }));
 }
 

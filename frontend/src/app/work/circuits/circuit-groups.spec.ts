@@ -2,7 +2,15 @@ import { describe, expect, it } from '@jest/globals';
 import { groupCircuits, type WorkRow } from './circuit-groups';
 
 const row = (code: string, area: string, state: WorkRow['state'] = 'open', opening = 'One'): WorkRow =>
-  ({ code, area, state, openingId: opening, openingName: opening, unsentCount: 0 }) as unknown as WorkRow;
+  ({
+    level: 'circuit',
+    code,
+    area,
+    state,
+    openingId: opening,
+    openingName: opening,
+    unsentCount: 0,
+  }) as unknown as WorkRow;
 const codes = (rows: readonly WorkRow[]): string[] => rows.map(({ code }) => code);
 
 describe('groupCircuits', () => {
@@ -26,6 +34,23 @@ describe('groupCircuits', () => {
   it('sorts codes as people count', () => {
     const { openings } = groupCircuits([row('A10', 'Dairy'), row('A2', 'Dairy')]);
     expect(codes(openings[0]!.areas[0]!.rows)).toEqual(['A2', 'A10']);
+  });
+
+  it('puts the work of systems and groups before the areas, and what was sent back of it first of all', () => {
+    const levelRow = (code: string, level: WorkRow['level'], state: WorkRow['state'] = 'open') => ({
+      ...row(code, '', state),
+      level,
+    });
+    const day = groupCircuits([
+      row('A1', 'Dairy'),
+      levelRow('Rack B', 'system'),
+      levelRow('Rack A AS-1', 'suctionGroup'),
+      levelRow('Rack A', 'system'),
+      levelRow('Rack A AS-2', 'suctionGroup', 'sentBack'),
+    ]);
+    expect(codes(day.openings[0]!.levels)).toEqual(['Rack A', 'Rack A AS-1', 'Rack B']);
+    expect(day.openings[0]!.areas.map(({ area }) => area)).toEqual(['Dairy']);
+    expect(codes(day.sentBack)).toEqual(['Rack A AS-2']);
   });
 
   it('keeps openings apart', () => {

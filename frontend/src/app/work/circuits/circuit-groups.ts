@@ -13,6 +13,8 @@ export interface AreaGroup {
 export interface OpeningGroup {
   readonly openingId: CircuitRow['openingId'];
   readonly openingName: string;
+  /** The own work of systems and suction groups, which comes before their circuits'. */
+  readonly levels: readonly WorkRow[];
   readonly areas: readonly AreaGroup[];
 }
 
@@ -30,7 +32,7 @@ const byCode = (a: WorkRow, b: WorkRow): number =>
 
 /**
  * Circuits as an installer walks them: what was sent back first, whatever its opening and area; then opening by opening
- * and area by area; what is approved at the end. Codes sort as people count: A2 before A10.
+ * the work of systems and suction groups, then area by area; what is approved at the end. Codes sort as people count: A2 before A10.
  */
 export function groupCircuits(rows: readonly WorkRow[]): DayOfWork {
   const others = rows.filter((row) => row.state !== 'sentBack' && row.state !== 'approved');
@@ -39,13 +41,20 @@ export function groupCircuits(rows: readonly WorkRow[]): DayOfWork {
     openings: grouped(others, (row) => row.openingId).map(([openingId, ofOpening]) => ({
       openingId,
       openingName: ofOpening[0]?.openingName ?? '',
-      areas: grouped(ofOpening, (row) => row.area)
+      levels: ofOpening.filter(isLevelWork).sort(byCode),
+      areas: grouped(
+        ofOpening.filter((row) => !isLevelWork(row)),
+        (row) => row.area,
+      )
         .map(([area, inArea]): AreaGroup => ({ area, rows: [...inArea].sort(byCode) }))
         .sort((a, b) => a.area.localeCompare(b.area)),
     })),
     done: rows.filter((row) => row.state === 'approved').sort(byCode),
   };
 }
+
+/** Rows that this phone kept before there was such work have no level: they are circuits. */
+const isLevelWork = ({ level }: WorkRow): boolean => level === 'system' || level === 'suctionGroup';
 
 /** Rows by a key, in the order in which the keys first appear. `Map.groupBy` is missing on phones a few years old. */
 function grouped<K>(rows: readonly WorkRow[], keyOf: (row: WorkRow) => K): [K, WorkRow[]][] {

@@ -17,6 +17,8 @@ export class CircuitRowLine {
   readonly row = input.required<WorkRow>();
   /** Whether it says which opening it belongs to, where circuits of several stand together. */
   readonly withOpening = input(false);
+  /** Kept rows from before there was such work have no level. */
+  protected readonly isLevelWork = computed(() => ['system', 'suctionGroup'].includes(this.row().level));
   /** How much of the line is brazed, from 0 to 100. */
   protected readonly reached = computed(() => {
     const { stepsDone, stepsTotal } = this.row();

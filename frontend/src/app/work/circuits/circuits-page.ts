@@ -7,13 +7,14 @@ import { DateTimeOf } from '../../ui/date-time-of';
 import { EmptyNote } from '../../ui/notes/empty-note';
 import { LoadingNote } from '../../ui/notes/loading-note';
 import { ProblemNote } from '../../ui/notes/problem-note';
+import { WaitingValves } from '../coil-walk/waiting-valves';
 import { CircuitRowLine } from './circuit-row';
 import { MyCircuitsStore } from './my-circuits-store';
 
 /** The day's work: what was sent back first, then area by area through the store. */
 @Component({
   selector: 'app-circuits-page',
-  imports: [CircuitRowLine, DateTimeOf, EmptyNote, LoadingNote, ProblemNote, TranslocoPipe],
+  imports: [CircuitRowLine, DateTimeOf, EmptyNote, LoadingNote, ProblemNote, TranslocoPipe, WaitingValves],
   providers: [MyCircuitsStore],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './circuits-page.html',

@@ -13,6 +13,7 @@ import { LiveEvents } from '../../shell/live-events';
 import { localView } from '../sequence/local-view';
 import { WorkApi } from '../work-api';
 import { groupCircuits, type WorkRow } from './circuit-groups';
+import { listZone } from './list-zone';
 import { TakeAlong } from './take-along';
 
 /** The circuits assigned to whoever is here; from this phone at once, then as the server has them. */
@@ -28,9 +29,12 @@ export class MyCircuitsStore {
   private readonly views = signal<ReadonlyMap<SequenceId, SequenceView>>(new Map());
   private readonly failure = signal<unknown>(null);
   private readonly read = signal<string | null>(null);
+  private readonly zone = signal(ownZone());
 
   readonly problem = this.failure.asReadonly();
   readonly readAt = this.read.asReadonly();
+  /** On whose clock `readAt` is told. */
+  readonly timeZone = this.zone.asReadonly();
   readonly isLoading = computed(() => this.rows() === null && this.failure() === null);
   readonly isEmpty = computed(() => this.rows()?.length === 0);
   readonly hasNothing = computed(() => (this.rows()?.length ?? 0) === 0);
@@ -63,6 +67,7 @@ export class MyCircuitsStore {
     if (kept) {
       this.rows.set(kept.rows);
       this.read.set(kept.readAt);
+      await this.findZone(me.id, kept.rows);
     }
     await this.refresh();
   }
@@ -77,10 +82,16 @@ export class MyCircuitsStore {
       this.rows.set(rows);
       this.read.set(now);
       this.failure.set(null);
-      void this.takeAlong.take(me.id, rows);
+      void this.takeAlong.take(me.id, rows).then(() => this.findZone(me.id, rows));
     } catch (error) {
       this.failure.set(error);
     }
+  }
+
+  private async findZone(personId: PersonId, rows: readonly CircuitRow[]): Promise<void> {
+    const zoneOf = async (id: SequenceId): Promise<string | null> =>
+      (await this.cache.sequence(personId, id))?.detail.timeZone ?? null;
+    this.zone.set(await listZone(rows, zoneOf, ownZone()));
   }
 
   private async lookAgain(touched: ReadonlySet<SequenceId>): Promise<void> {
@@ -94,6 +105,10 @@ export class MyCircuitsStore {
     const cached = await this.cache.sequence(personId, id);
     return cached && [id, localView(cached, this.outbox.entries())];
   }
+}
+
+function ownZone(): string {
+  return Intl.DateTimeFormat().resolvedOptions().timeZone;
 }
 
 function workRow(

@@ -1,4 +1,5 @@
 import type { StepKind } from '#shared/checklist/step';
+import { DOUBT_WORDS } from '#shared/checklist/words/doubt-words';
 import type { Language } from '#shared/checklist/text';
 import type { StepView } from '#shared/sequences/sequence-view';
 import type { StepDraft } from '../steps/step-draft';
@@ -19,7 +20,7 @@ export function whyNot(
   if (kind === 'signature' && override?.step.kind === 'override')
     return { key: 'work.putBackFirst', params: { subject: override.step.subject[language] } };
   const [refusal] = draft.refusals();
-  if (refusal) return { key: `ui.doubt_${refusal.kind}`, params: {} };
+  if (refusal) return { said: DOUBT_WORDS[refusal.kind][language] };
   const lacking = draft.lacking();
   return lacking && { key: `work.lacks_${lacking}`, params: {} };
 }

@@ -18,6 +18,7 @@ import { DateTimeOf } from '../../ui/date-time-of';
 import { LoadingNote } from '../../ui/notes/loading-note';
 import { ProblemNote } from '../../ui/notes/problem-note';
 import { StateMark } from '../../ui/state-mark/state-mark';
+import { readingLanguage } from '../../ui/words/reading-language';
 import { LocalPhotos } from './local-photos';
 import { RecordPause } from './record-pause';
 import { SequenceStore } from './sequence-store';
@@ -33,6 +34,8 @@ import { SubmitSheet } from './submit-sheet';
 /** The two places of a sequence that aren't steps; step keys can't be these, they hold a colon or a dot. */
 const OVERVIEW = 'overview';
 const SUBMIT = 'submit';
+/** End of the coil walk's address. */
+const COILS = 'coils';
 
 /** One circuit, step by step. `at` in the address says where, so that a reload or another day goes on there. */
 @Component({
@@ -61,14 +64,18 @@ const SUBMIT = 'submit';
 export class SequencePage {
   readonly sequenceId = input.required<SequenceId>();
   readonly at = input<string>();
+  /** `coils`: opened from the coil walk, which is gone back to when the coil is done. */
+  readonly from = input<string>();
 
   private readonly router = inject(Router);
   private readonly titles = inject(PageTitles);
   private readonly words = inject(TranslocoService);
+  private readonly language = readingLanguage();
   protected readonly store = inject(SequenceStore);
   protected readonly online = inject(Connectivity).online;
   protected readonly view = this.store.view;
   protected readonly detail = this.store.detail;
+  protected readonly level = computed(() => this.detail()?.specification.level ?? 'circuit');
 
   protected readonly place = computed<'step' | 'overview' | 'submit'>(() => {
     const at = this.at();
@@ -78,6 +85,16 @@ export class SequencePage {
   });
   protected readonly index = computed(
     () => this.view()?.steps.findIndex(({ step }) => step.key === this.at()) ?? -1,
+  );
+  /** Two coils and more are worked in turns, one's valve settling while another is read. */
+  protected readonly hasCoilWalk = computed(
+    () => (this.view()?.steps.filter(({ step }) => step.kind === 'superheat').length ?? 0) > 1,
+  );
+  protected readonly isAtCoil = computed(
+    () => this.hasCoilWalk() && this.view()?.steps[this.index()]?.step.kind === 'superheat',
+  );
+  protected readonly up = computed(() =>
+    this.from() === COILS ? ['/work', this.sequenceId(), COILS] : ['/work'],
   );
   protected readonly standing = computed(() => {
     const view = this.view();
@@ -104,6 +121,22 @@ export class SequencePage {
     () => this.view()?.steps.filter(({ fold }) => fold && fold.reopenedBy !== null).length ?? 0,
   );
 
+  /** The circuit's code, and where on it one is. */
+  private readonly title = computed(() => {
+    const circuit = this.detail()?.specification.circuit;
+    if (!circuit) return null;
+    const language = this.language();
+    const step = this.view()?.steps[this.index()]?.step;
+    if (step) return `${circuit.code} · ${this.index() + 1}. ${step.title[language]}`;
+    const submit = this.words.translate<string>('work.reviewTitle', {}, language);
+    const level = this.level();
+    const what =
+      level === 'circuit'
+        ? circuit.description
+        : this.words.translate<string>(`ui.level_${level}`, {}, language);
+    return `${circuit.code} · ${this.place() === 'submit' ? submit : what}`;
+  });
+
   constructor() {
     effect(() => {
       const id = this.sequenceId();
@@ -111,8 +144,8 @@ export class SequencePage {
       untracked(() => void this.store.open(id));
     });
     effect(() => {
-      const circuit = this.detail()?.specification.circuit;
-      if (circuit) this.titles.set(`${circuit.code} ${circuit.description}`);
+      const title = this.title();
+      if (title) this.titles.set(title);
     });
     effect(() => {
       const view = this.view();
@@ -132,6 +165,10 @@ export class SequencePage {
   }
 
   protected goOn(): void {
+    if (this.from() === COILS) {
+      void this.router.navigate(this.up(), { replaceUrl: true });
+      return;
+    }
     const view = this.view();
     const at = this.at();
     if (view && at) this.goTo(nextOpenStep(view, at) ?? SUBMIT);

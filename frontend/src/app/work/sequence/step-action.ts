@@ -17,11 +17,22 @@ export function sheetMode(view: StepView, isCorrecting: boolean, isClosed: boole
 }
 
 /** Why an answer that can be recorded deserves a second look first: the end of a key of the words. */
-export type SecondLook = 'outside' | 'finding' | 'doubt';
+export type SecondLook = 'outside' | 'finding' | 'doubt' | 'keep' | 'preliminary' | 'unsettled';
 
-/** @returns `null` when it is recorded at once */
-export function secondLook(kind: StepKind, judgement: Judgement | null): SecondLook | null {
+/**
+ * @param isUnsettled whether a valve hasn't had its wait since it was turned last
+ * @returns `null` when it is recorded at once
+ */
+export function secondLook(
+  kind: StepKind,
+  judgement: Judgement | null,
+  isUnsettled = false,
+): SecondLook | null {
   if (!judgement) return null;
+  const kept = judgement.doubts.filter((doubt) => doubt.severity === 'keep');
+  if (kept.some((doubt) => doubt.kind === 'preliminary')) return 'preliminary';
+  if (kept.length > 0) return 'keep';
+  if (isUnsettled) return 'unsettled';
   if (judgement.outcome === 'outside') return kind === 'choose' ? 'finding' : 'outside';
   return judgement.doubts.some((doubt) => doubt.severity === 'ask') ? 'doubt' : null;
 }

@@ -3,17 +3,19 @@ import { ChangeDetectionStrategy, Component, input, output } from '@angular/core
 import { MatButtonModule } from '@angular/material/button';
 import { MatIconModule } from '@angular/material/icon';
 import { TranslocoPipe } from '@jsverse/transloco';
+import { WantedLimits } from '../steps/wanted-limits';
+import type { OutsideValue } from './outside-value';
 
 /** Words with what stands in them. */
-export interface Reason {
-  readonly key: string;
-  readonly params: Readonly<Record<string, string>>;
-}
+/** Why the button is grey: a key of the words, or a sentence that stands in shared code already. */
+export type Reason =
+  | { readonly key: string; readonly params: Readonly<Record<string, string>>; readonly said?: never }
+  | { readonly said: string };
 
 /** The bar in the thumb's reach: a step back, the one action or why it isn't possible yet, a step on. */
 @Component({
   selector: 'app-step-footer',
-  imports: [CdkStepperModule, MatButtonModule, MatIconModule, TranslocoPipe],
+  imports: [CdkStepperModule, MatButtonModule, MatIconModule, TranslocoPipe, WantedLimits],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './step-footer.html',
   styleUrl: './step-footer.scss',
@@ -29,6 +31,8 @@ export class StepFooter {
   readonly reason = input<Reason | null>(null);
   /** Key of a question that the next tap on the action answers with yes. */
   readonly question = input<string | null>(null);
+  /** The value that the question is about, where that is one outside its limits. */
+  readonly outside = input<OutsideValue | null>(null);
   /** Key of what went wrong. */
   readonly failure = input<string | null>(null);
   readonly act = output<void>();

@@ -21,6 +21,9 @@ import { SequenceStore } from './sequence-store';
         </summary>
         @for (entry of earlier(); track entry.body.id) {
           <article>
+            @if (isStale() && $first) {
+              <p class="stale">{{ 'work.stale' | transloco }}</p>
+            }
             <app-entry-stamp
               [entry]="entry"
               [name]="store.nameOf(entry.body.authorId)"
@@ -47,6 +50,10 @@ import { SequenceStore } from './sequence-store';
       color: var(--app-ink-soft);
       cursor: pointer;
     }
+    .stale {
+      color: var(--app-plum);
+      font-weight: 500;
+    }
     article {
       padding: var(--app-space-3) 0;
       border-top: 1px solid var(--app-rule-thin);
@@ -61,6 +68,8 @@ export class StepHistory {
   readonly photoUrl = input.required<PhotoUrl>();
   /** Whether the last entry belongs to the history too, because the step is being asked anew. */
   readonly withLast = input(false);
+  /** Whether the last entry was read before a valve, regulator or set point was changed. */
+  readonly isStale = input(false);
 
   /** A photo of an earlier entry that is asked for at full size. */
   readonly openPhoto = output<{ readonly entry: FoldEntry; readonly index: number }>();

@@ -156,6 +156,9 @@ describe('secondLook', () => {
     const odd = plainJudgement('within', [{ kind: 'liquidRisk', severity: 'ask' }]);
     expect(secondLook('superheat', odd)).toBe('doubt');
     expect(secondLook('reading', plainJudgement('within'))).toBeNull();
+    const early = plainJudgement('recorded', [{ kind: 'preliminary', severity: 'keep' }]);
+    expect(secondLook('superheat', early)).toBe('preliminary');
+    expect(secondLook('superheat', plainJudgement('within'), true)).toBe('unsettled');
     expect(secondLook('reading', null)).toBeNull();
   });
 

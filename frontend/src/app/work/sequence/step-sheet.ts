@@ -25,6 +25,7 @@ import { photosOf } from '../../offline/append-entry';
 import type { OutboxEntry } from '../../offline/local-database';
 import { Session } from '../../session/session';
 import { AnswerView } from '../../ui/answer-view/answer-view';
+import { FloodLink } from '../../ui/flood-link/flood-link';
 import { TextOf } from '../../ui/text-of';
 import { readingLanguage } from '../../ui/words/reading-language';
 import { SourceOf } from '../../ui/words/source-of';
@@ -33,10 +34,12 @@ import { StepDraft } from '../steps/step-draft';
 import { EntryStamp } from './entry-stamp';
 import { arrivedPhotos, LocalPhotos } from './local-photos';
 import { NotApplicable } from './not-applicable';
+import { outsideValue } from './outside-value';
 import { PhotoViewer } from './photo-viewer';
 import { photosElsewhere } from './photos-elsewhere';
 import { RecordPause } from './record-pause';
 import { failureKey, whyNot } from './record-problem';
+import { refusalWords } from './refusal-words';
 import { SequenceStore } from './sequence-store';
 import { actionKey, secondLook, sheetMode, startingAnswer } from './step-action';
 import { StepFooter } from './step-footer';
@@ -49,6 +52,7 @@ import { StepHistory } from './step-history';
   imports: [
     AnswerView,
     EntryStamp,
+    FloodLink,
     MatIconModule,
     NgComponentOutlet,
     NotApplicable,
@@ -82,6 +86,7 @@ export class StepSheet implements OnInit {
 
   private readonly store = inject(SequenceStore);
   private readonly photos = inject(LocalPhotos);
+  protected readonly refusalWords = refusalWords;
   private readonly pause = inject(RecordPause);
   private readonly language = readingLanguage();
   private readonly announcer = inject(LiveAnnouncer);
@@ -108,11 +113,17 @@ export class StepSheet implements OnInit {
   protected readonly photoUrl = computed(() =>
     this.photos.urlFor(this.detail().id, arrivedPhotos(this.detail().photos)),
   );
+  private readonly look = computed(() =>
+    secondLook(this.step().kind, this.draft.judgement(), this.draft.isUnsettled()),
+  );
   /** Key of the question that the next tap answers with yes; `null` until the first tap, and after any change. */
   protected readonly question = computed(() => {
-    const look = secondLook(this.step().kind, this.draft.judgement());
+    const look = this.look();
     return look && this.lookedAt() === this.draft.answer() ? `work.secondLook_${look}` : null;
   });
+  protected readonly outside = computed(() =>
+    outsideValue(this.draft.answer(), this.draft.judgement(), this.unitSystem(), this.language()),
+  );
   protected readonly reason = computed(() =>
     this.mode() === 'ask' ? whyNot(this.step().kind, this.draft, this.standing(), this.language()) : null,
   );
@@ -147,7 +158,7 @@ export class StepSheet implements OnInit {
   protected act(): void {
     if (this.pause.isOn) return;
     if (this.mode() !== 'ask') this.goOn.emit();
-    else if (secondLook(this.step().kind, this.draft.judgement()) && this.question() === null) {
+    else if (this.look() && this.question() === null) {
       this.lookedAt.set(this.draft.answer());
       this.pause.begin();
     } else void this.record();
@@ -211,6 +222,8 @@ export class StepSheet implements OnInit {
       record: () => void this.record(),
       personName: this.me()?.name ?? '',
       arrivedPhotos: arrivedPhotos(photos),
+      view,
+      whole,
       photosElsewhere: whole ? photosElsewhere(whole, this.step().key) : new Map(),
     });
     this.round.update((round) => round + 1);

@@ -2,8 +2,15 @@ import { Injectable } from '@angular/core';
 import type { SequenceId } from '#shared/plant/ids';
 
 const FORMAT = 1;
-const keyOf = (sequenceId: SequenceId, stepKey: string): string =>
-  `firstcold.draft.${FORMAT}.${sequenceId}.${stepKey}`;
+const PREFIX = `firstcold.draft.${FORMAT}.`;
+const keyOf = (sequenceId: SequenceId, stepKey: string): string => `${PREFIX}${sequenceId}.${stepKey}`;
+
+/** A draft that this browser keeps. */
+export interface KeptDraft {
+  readonly sequenceId: SequenceId;
+  readonly stepKey: string;
+  readonly typed: unknown;
+}
 
 /**
  * What was typed on a step and isn't recorded yet, kept in this browser: an as-found reading must survive the quarter
@@ -22,6 +29,19 @@ export class DraftKeeper {
       if (error instanceof SyntaxError) return null;
       throw error;
     }
+  }
+
+  /** All drafts of this browser, of whatever circuit and whoever typed them. */
+  all(): readonly KeptDraft[] {
+    return Object.keys(localStorage)
+      .filter((key) => key.startsWith(PREFIX))
+      .flatMap((key) => {
+        // An id holds no dot; a step's key may.
+        const [, sequenceId, stepKey] = /^([^.]+)\.(.+)$/.exec(key.slice(PREFIX.length)) ?? [];
+        if (!sequenceId || !stepKey) return [];
+        const id = sequenceId as SequenceId;
+        return [{ sequenceId: id, stepKey, typed: this.read(id, stepKey) }];
+      });
   }
 
   keep(sequenceId: SequenceId, stepKey: string, typed: unknown): void {

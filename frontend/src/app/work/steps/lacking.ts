@@ -1,6 +1,7 @@
 /** What an answer in the making lacks: the end of a key of the words. */
 export const LACKINGS = [
   'reading',
+  'log',
   'choice',
   'photo',
   'words',
@@ -10,5 +11,7 @@ export const LACKINGS = [
   'asLeftTemperature',
   'asFoundPressure',
   'asFoundTemperature',
+  'seriesTime',
+  'lineDrop',
 ] as const;
 export type Lacking = (typeof LACKINGS)[number];

@@ -1,22 +1,22 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
-import { TranslocoPipe } from '@jsverse/transloco';
 import type { Judgement } from '#shared/checklist/judgement';
 import type { UnitSystem } from '#shared/units/unit-system';
 import { judgedFigure } from '../../ui/answer-view/answer-figures';
 import { OutcomeMark } from '../../ui/outcome-mark/outcome-mark';
 import { Strip } from '../../ui/strip/strip';
+import { JudgedOf } from '../../ui/words/judged-words';
 import { WorkingSlip } from '../../ui/working-slip/working-slip';
 
 /** How the answer stands while it is typed: mark, strip, what looks odd about it, and how it was worked out. */
 @Component({
   selector: 'app-live-judgement',
-  imports: [OutcomeMark, Strip, TranslocoPipe, WorkingSlip],
+  imports: [JudgedOf, OutcomeMark, Strip, WorkingSlip],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     @if (judgement(); as judged) {
       @if (isRefused()) {
         @for (doubt of judged.doubts; track doubt.kind) {
-          <p class="doubt">{{ 'ui.doubt_' + doubt.kind | transloco }}</p>
+          <p class="doubt">{{ doubt.kind | appJudged: 'doubt' }}</p>
         }
       } @else {
         @if (figure(); as figure) {
@@ -27,6 +27,7 @@ import { WorkingSlip } from '../../ui/working-slip/working-slip';
             [high]="figure.high"
             [minimum]="figure.minimum"
             [maximum]="figure.maximum"
+            [uncertainty]="figure.uncertainty"
             [dimension]="figure.dimension"
             [unitSystem]="unitSystem()"
           />
@@ -34,8 +35,11 @@ import { WorkingSlip } from '../../ui/working-slip/working-slip';
         @if (judged.limit) {
           <app-outcome-mark [outcome]="judged.outcome" [side]="judged.side" />
         }
+        @for (verdict of judged.verdicts ?? []; track verdict) {
+          <p class="verdict">{{ verdict | appJudged: 'verdict' }}</p>
+        }
         @for (doubt of judged.doubts; track doubt.kind) {
-          <p class="doubt ask">{{ 'ui.doubt_' + doubt.kind | transloco }}</p>
+          <p class="doubt ask">{{ doubt.kind | appJudged: 'doubt' }}</p>
         }
         @if (judged.working.length > 0) {
           <app-working-slip [working]="judged.working" [unitSystem]="unitSystem()" />
@@ -48,6 +52,9 @@ import { WorkingSlip } from '../../ui/working-slip/working-slip';
       display: grid;
       grid-template-columns: minmax(0, 1fr);
       gap: var(--app-space-3);
+    }
+    .verdict {
+      font-weight: 600;
     }
     .doubt {
       padding-left: var(--app-space-3);

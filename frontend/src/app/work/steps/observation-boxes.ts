@@ -3,20 +3,24 @@ import { TranslocoPipe } from '@jsverse/transloco';
 import type { SequenceFacts } from '#shared/checklist/facts';
 import type { SuperheatStep } from '#shared/checklist/kinds/superheat';
 import { PairBoxes } from './pair-boxes';
+import type { ReadHow } from './superheat-answer';
+import { SuperheatLog } from './superheat-log';
+import { SuperheatSeries } from './superheat-series';
 import type { TypedObservation } from './superheat-typed';
 
-const VALVES = ['steady', 'hunting'] as const;
+const VALVES = ['steady', 'hunting', 'series', 'log'] as const;
 
 /**
  * One look at a coil, the only one on the page at a time: its radio buttons keep one name, because buttons that change
- * theirs lose which of them is checked. Whether the valve holds still, and the pair or two that this takes.
+ * theirs lose which of them is checked. Whether the valve holds still, and the pair, the two, the series or the logger's
+ * file that this takes.
  */
 @Component({
   selector: 'app-observation-boxes',
-  imports: [PairBoxes, TranslocoPipe],
+  imports: [PairBoxes, SuperheatLog, SuperheatSeries, TranslocoPipe],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <fieldset class="valve">
+    <fieldset class="valve narrow">
       <legend class="heard-only">{{ 'work.valve' | transloco }}</legend>
       <div>
         @for (valve of valves; track valve) {
@@ -32,28 +36,40 @@ const VALVES = ['steady', 'hunting'] as const;
         }
       </div>
     </fieldset>
-    @if (observation().valve === 'steady') {
-      <app-pair-boxes
-        [step]="step()"
-        [facts]="facts()"
-        [pair]="observation().pair"
-        (pairChange)="change({ pair: $event })"
-      />
-    } @else {
-      <app-pair-boxes
-        [heading]="'work.atLowest' | transloco"
-        [step]="step()"
-        [facts]="facts()"
-        [pair]="observation().low"
-        (pairChange)="change({ low: $event })"
-      />
-      <app-pair-boxes
-        [heading]="'work.atHighest' | transloco"
-        [step]="step()"
-        [facts]="facts()"
-        [pair]="observation().high"
-        (pairChange)="change({ high: $event })"
-      />
+    @switch (observation().valve) {
+      @case ('steady') {
+        <app-pair-boxes
+          [step]="step()"
+          [facts]="facts()"
+          [how]="how()"
+          [pair]="observation().pair"
+          (pairChange)="change({ pair: $event })"
+        />
+      }
+      @case ('hunting') {
+        <app-pair-boxes
+          [heading]="'work.atLowest' | transloco"
+          [step]="step()"
+          [facts]="facts()"
+          [how]="how()"
+          [pair]="observation().low"
+          (pairChange)="change({ low: $event })"
+        />
+        <app-pair-boxes
+          [heading]="'work.atHighest' | transloco"
+          [step]="step()"
+          [facts]="facts()"
+          [how]="how()"
+          [pair]="observation().high"
+          (pairChange)="change({ high: $event })"
+        />
+      }
+      @case ('series') {
+        <app-superheat-series [step]="step()" [facts]="facts()" [how]="how()" [(observation)]="observation" />
+      }
+      @case ('log') {
+        <app-superheat-log [log]="observation().log" (logChange)="change({ log: $event })" />
+      }
     }
   `,
   styleUrl: './segments.scss',
@@ -61,6 +77,7 @@ const VALVES = ['steady', 'hunting'] as const;
 export class ObservationBoxes {
   readonly step = input.required<SuperheatStep>();
   readonly facts = input.required<SequenceFacts>();
+  readonly how = input.required<ReadHow>();
   readonly observation = model.required<TypedObservation>();
 
   protected readonly valves = VALVES;

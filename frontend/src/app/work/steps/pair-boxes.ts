@@ -4,6 +4,7 @@ import type { SequenceFacts } from '#shared/checklist/facts';
 import type { SuperheatStep } from '#shared/checklist/kinds/superheat';
 import { QuantityOf } from '../../ui/quantity-of';
 import { QuantityBox } from './quantity-box';
+import type { ReadHow } from './superheat-answer';
 import { livePair } from './superheat-live';
 import type { TypedPair } from './superheat-typed';
 
@@ -59,7 +60,8 @@ export class PairBoxes {
   readonly heading = input('');
   readonly step = input.required<SuperheatStep>();
   readonly facts = input.required<SequenceFacts>();
+  readonly how = input.required<ReadHow>();
   readonly pair = model.required<TypedPair>();
 
-  protected readonly live = computed(() => livePair(this.pair(), this.step(), this.facts()));
+  protected readonly live = computed(() => livePair(this.pair(), this.step(), this.facts(), this.how()));
 }

@@ -53,6 +53,8 @@ export class QuantityBox {
   readonly dimension = input.required<Dimension>();
   readonly unitSystem = input.required<UnitSystem>();
   readonly size = input<'medium' | 'large'>('medium');
+  /** Whether there is a key for the sign, where a value of the dimension may be negative. */
+  readonly withSign = input(true);
   /** Id of the element that says how the value is judged. */
   readonly describedBy = input<string | null>(null);
   readonly text = model.required<string>();
@@ -61,7 +63,7 @@ export class QuantityBox {
   protected readonly id = `quantity-${(boxes += 1)}`;
 
   protected readonly unit = computed(() => UNITS[displayUnit(this.dimension(), this.unitSystem())].symbol);
-  protected readonly hasSign = computed(() => MAY_BE_NEGATIVE.has(this.dimension()));
+  protected readonly hasSign = computed(() => this.withSign() && MAY_BE_NEGATIVE.has(this.dimension()));
   protected readonly turn = turnSign;
 
   protected take(event: Event): void {

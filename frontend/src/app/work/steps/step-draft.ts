@@ -5,6 +5,7 @@ import type { Text } from '#shared/checklist/text';
 import type { Answer, AnswerOf, Step, StepKind, StepOf } from '#shared/checklist/step';
 import { Bug } from '#shared/failures/failure';
 import type { SequenceId } from '#shared/plant/ids';
+import type { SequenceView, StepView } from '#shared/sequences/sequence-view';
 import type { UnitSystem } from '#shared/units/unit-system';
 import { DraftKeeper } from './draft-keeper';
 import type { Lacking } from './lacking';
@@ -24,6 +25,10 @@ export interface OpenStep {
   readonly arrivedPhotos: ReadonlySet<string>;
   /** Titles of the other steps of the circuit that pictures stand on, by the pictures' hashes. */
   readonly photosElsewhere: ReadonlyMap<string, Text>;
+  /** The step as it stands, with what was recorded on it before. */
+  readonly view: StepView;
+  /** The whole sequence as this phone sees it; `null` before it was read. */
+  readonly whole: SequenceView | null;
 }
 
 /**
@@ -37,7 +42,10 @@ export class StepDraft {
   private readonly typed = signal<{ form: WritableSignal<unknown>; initial: unknown } | null>(null);
   private readonly made = signal<Answer | null>(null);
   private readonly missing = signal<Lacking | null>(null);
+  private readonly unsettled = signal(false);
 
+  /** Whether the answer is about to be recorded before its valve had its wait: allowed, and asked about first. */
+  readonly isUnsettled = this.unsettled.asReadonly();
   readonly answer = this.made.asReadonly();
   /** What there has to be before there is an answer; `null` when there is one. */
   readonly lacking = computed(() => (this.made() ? null : this.missing()));
@@ -65,6 +73,7 @@ export class StepDraft {
     this.typed.set(null);
     this.made.set(null);
     this.missing.set(null);
+    this.unsettled.set(false);
     this.opened.set(step);
   }
 
@@ -105,6 +114,11 @@ export class StepDraft {
   propose(answer: Answer | null, lacking: Lacking | null = null): void {
     this.made.set(answer);
     this.missing.set(lacking);
+  }
+
+  /** Says whether the valve still has to settle. */
+  tellUnsettled(isUnsettled: boolean): void {
+    this.unsettled.set(isUnsettled);
   }
 
   /** Forgets what was typed, after it was recorded. */

@@ -1,7 +1,11 @@
-import type { SuperheatAnswer, SuperheatObservation, SuperheatPair } from '#shared/checklist/kinds/superheat';
-import { displayUnit, type UnitSystem } from '#shared/units/unit-system';
-import type { Lacking } from './lacking';
-import { typedOrNull } from './typed-text';
+import type {
+  SuperheatAnswer,
+  SuperheatCondition,
+  SuperheatObservation,
+  SuperheatPair,
+  ValveTurn,
+} from '#shared/checklist/kinds/superheat';
+import { sinceText } from '../coil-walk/clock-text';
 
 /** Two boxes of one pair, as texts. */
 export interface TypedPair {
@@ -9,33 +13,115 @@ export interface TypedPair {
   readonly temperature: string;
 }
 
+/** One row of a series: the pair, and how long after the first it was read ("4:30"). */
+export interface TypedReading extends TypedPair {
+  readonly since: string;
+}
+
+export type ValveMode = SuperheatObservation['valve'];
+
+/** A logger's file as it was taken; the file itself is gone when the page closes. */
+export type TakenLog = Omit<SuperheatObservation & { valve: 'log' }, 'valve'>;
+
 /** An observation in the making. All boxes are kept, so that switching the valve and back loses nothing. */
 export interface TypedObservation {
-  readonly valve: 'steady' | 'hunting';
+  readonly valve: ValveMode;
   readonly pair: TypedPair;
   readonly low: TypedPair;
   readonly high: TypedPair;
+  readonly readings: readonly TypedReading[];
+  /** The phone's clock at the first reading of the series; `null` before it, or when the series came from a record. */
+  readonly seriesFrom: string | null;
+  readonly log: TakenLog | null;
+}
+
+/** A turn in the making. What was read before it is kept beside it: after the turn it is no as-left any more. */
+export interface TypedTurn extends ValveTurn {
+  /** The superheat before the turn in kelvin, where it had settled. */
+  readonly beforeK: number | null;
+  readonly readBefore: TypedObservation | null;
+}
+
+export interface TypedInstruments {
+  readonly gauge: NonNullable<SuperheatAnswer['instruments']>['gauge'];
+  readonly pressureAccuracy: string;
+  readonly temperatureAccuracy: string;
 }
 
 export interface TypedSuperheat {
   readonly asFound: TypedObservation;
   readonly asLeft: TypedObservation;
+  readonly turns: readonly TypedTurn[];
+  readonly clockwise: NonNullable<SuperheatAnswer['clockwise']> | null;
+  readonly conditions: readonly SuperheatCondition[];
+  readonly takenAt: NonNullable<SuperheatAnswer['takenAt']>;
+  readonly lineDrop: string;
+  readonly instruments: TypedInstruments;
 }
 
 const EMPTY_PAIR: TypedPair = { pressure: '', temperature: '' };
-const EMPTY: TypedObservation = { valve: 'steady', pair: EMPTY_PAIR, low: EMPTY_PAIR, high: EMPTY_PAIR };
+export const EMPTY_OBSERVATION: TypedObservation = {
+  valve: 'steady',
+  pair: EMPTY_PAIR,
+  low: EMPTY_PAIR,
+  high: EMPTY_PAIR,
+  readings: [],
+  seriesFrom: null,
+  log: null,
+};
+export const NO_INSTRUMENTS: TypedInstruments = {
+  gauge: 'vented',
+  pressureAccuracy: '',
+  temperatureAccuracy: '',
+};
+
+/** What a form without an answer starts from: what this phone knows already. */
+export interface KnownBefore {
+  readonly instruments: TypedInstruments;
+  readonly conditions: readonly SuperheatCondition[];
+}
+const NOTHING_KNOWN: KnownBefore = { instruments: NO_INSTRUMENTS, conditions: [] };
 
 /** A form with nothing typed, or with what was recorded before. Texts stay in the unit they were typed in. */
-export function startSuperheat(previous: SuperheatAnswer | null): TypedSuperheat {
+export function startSuperheat(
+  previous: SuperheatAnswer | null,
+  known: KnownBefore = NOTHING_KNOWN,
+): TypedSuperheat {
   return {
-    asFound: previous?.asFound ? startObservation(previous.asFound) : EMPTY,
-    asLeft: previous ? startObservation(previous.asLeft) : EMPTY,
+    asFound: previous?.asFound ? startObservation(previous.asFound) : EMPTY_OBSERVATION,
+    asLeft: previous ? startObservation(previous.asLeft) : EMPTY_OBSERVATION,
+    turns: (previous?.turns ?? []).map((turn) => ({ ...turn, beforeK: null, readBefore: null })),
+    clockwise: previous?.clockwise ?? null,
+    conditions: previous ? (previous.conditions ?? []) : known.conditions,
+    takenAt: previous?.takenAt ?? 'coilOutlet',
+    lineDrop: previous?.lineDrop?.text ?? '',
+    instruments: previous ? startInstruments(previous) : known.instruments,
+  };
+}
+
+function startInstruments({ instruments }: SuperheatAnswer): TypedInstruments {
+  if (!instruments) return NO_INSTRUMENTS;
+  return {
+    gauge: instruments.gauge,
+    pressureAccuracy: instruments.pressureAccuracy?.text ?? '',
+    temperatureAccuracy: instruments.temperatureAccuracy?.text ?? '',
   };
 }
 
 function startObservation(observation: SuperheatObservation): TypedObservation {
-  if (observation.valve === 'steady') return { ...EMPTY, pair: textsOf(observation.pair) };
-  return { ...EMPTY, valve: 'hunting', low: textsOf(observation.low), high: textsOf(observation.high) };
+  const { valve } = observation;
+  if (valve === 'steady') return { ...EMPTY_OBSERVATION, pair: textsOf(observation.pair) };
+  if (valve === 'hunting')
+    return { ...EMPTY_OBSERVATION, valve, low: textsOf(observation.low), high: textsOf(observation.high) };
+  if (valve === 'series') {
+    const readings = observation.readings.map((reading) => ({
+      ...textsOf(reading),
+      since: sinceText(reading.atS),
+    }));
+    return { ...EMPTY_OBSERVATION, valve, readings };
+  }
+  const { file, atS, pressurePag, temperatureK } = observation;
+  return { ...EMPTY_OBSERVATION, valve, log: { file, atS, pressurePag, temperatureK } };
 }
 
 const textsOf = (pair: SuperheatPair): TypedPair => ({
@@ -43,52 +129,27 @@ const textsOf = (pair: SuperheatPair): TypedPair => ({
   temperature: pair.temperature.text,
 });
 
-/** A pair with the opening's units, or `null` while a box is empty. */
-export function pairOf(typed: TypedPair, system: UnitSystem): SuperheatPair | null {
-  const pressure = typedOrNull(typed.pressure, displayUnit('gaugePressure', system));
-  const temperature = typedOrNull(typed.temperature, displayUnit('temperature', system));
-  return pressure && temperature ? { pressure, temperature } : null;
+/** Whether nothing was typed in the two boxes. */
+export const isBlankPair = (pair: TypedPair): boolean =>
+  pair.pressure.trim() === '' && pair.temperature.trim() === '';
+
+/** The pairs that the valve's behaviour asks for; none of a logger's file. */
+export function pairsOf(typed: TypedObservation): readonly TypedPair[] {
+  if (typed.valve === 'steady') return [typed.pair];
+  if (typed.valve === 'hunting') return [typed.low, typed.high];
+  return typed.valve === 'series' ? typed.readings : [];
 }
 
 /** Whether nothing was typed in the boxes that the valve's behaviour asks for. */
 export function isBlank(typed: TypedObservation): boolean {
-  const pairs = typed.valve === 'steady' ? [typed.pair] : [typed.low, typed.high];
-  return pairs.every((pair) => pair.pressure.trim() === '' && pair.temperature.trim() === '');
+  return typed.valve === 'log' ? typed.log === null : pairsOf(typed).every(isBlankPair);
 }
 
-export function observationOf(typed: TypedObservation, system: UnitSystem): SuperheatObservation | null {
-  if (typed.valve === 'steady') {
-    const pair = pairOf(typed.pair, system);
-    return pair && { valve: 'steady', pair };
-  }
-  const low = pairOf(typed.low, system);
-  const high = pairOf(typed.high, system);
-  return low && high && { valve: 'hunting', low, high };
-}
-
-/** What still has to be typed before there is an answer; `null` when nothing has. */
-export function superheatLacks(typed: TypedSuperheat): Lacking | null {
-  if (isBlank(typed.asLeft)) return lackOf(typed.asFound, 'asFound') ?? 'asLeft';
-  return lackOf(typed.asFound, 'asFound') ?? lackOf(typed.asLeft, 'asLeft');
-}
-
-function lackOf(typed: TypedObservation, look: 'asFound' | 'asLeft'): Lacking | null {
-  if (isBlank(typed)) return null;
-  const pairs = typed.valve === 'steady' ? [typed.pair] : [typed.low, typed.high];
-  const isEmpty = (text: string): boolean => typedOrNull(text, 'degF') === null;
-  if (pairs.some((pair) => isEmpty(pair.pressure))) return `${look}Pressure`;
-  return pairs.some((pair) => isEmpty(pair.temperature)) ? `${look}Temperature` : null;
-}
-
-/**
- * The answer that the boxes make.
- *
- * @returns `null` while the as-left isn't complete, or an as-found was begun and isn't complete
- */
-export function superheatAnswerOf(typed: TypedSuperheat, system: UnitSystem): SuperheatAnswer | null {
-  const asLeft = observationOf(typed.asLeft, system);
-  if (!asLeft) return null;
-  if (isBlank(typed.asFound)) return { kind: 'superheat', asFound: null, asLeft };
-  const asFound = observationOf(typed.asFound, system);
-  return asFound && { kind: 'superheat', asFound, asLeft };
+/** A draft as it was kept by this browser, or `null` when it is none of this kind and version. */
+export function keptSuperheat(kept: unknown): TypedSuperheat | null {
+  if (typeof kept !== 'object' || kept === null) return null;
+  const fresh = startSuperheat(null);
+  return Object.keys(fresh).every((key) => key in kept) && Array.isArray((kept as TypedSuperheat).turns)
+    ? (kept as TypedSuperheat)
+    : null;
 }
