@@ -13,7 +13,15 @@ const SHARED = {
   contracts: ['units', 'failures', 'plant', 'refrigeration', 'access', 'checklist', 'sequences'],
 };
 
-const FRONTEND_FEATURES = ['openings', 'schedules', 'reviews', 'packages', 'work'];
+const FRONTEND_FEATURES = [
+  'openings',
+  'schedules',
+  'reviews',
+  'packages',
+  'refrigerants',
+  'work',
+  'defrosts',
+];
 
 /** Zones for import-x/no-restricted-paths, which looks at the file that an import really means. */
 export function folderZones() {

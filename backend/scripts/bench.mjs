@@ -11,7 +11,7 @@ import { Interrupted, Shutdown } from './shutdown.mjs';
  * table for the README. Starts everything it needs on folders of its own and leaves nothing behind.
  */
 
-const MEASURES = ['saving', 'memory', 'queue', 'opening', 'screen', 'saturation'];
+const MEASURES = ['saving', 'memory', 'queue', 'opening', 'screen', 'saturation', 'logger', 'defrost'];
 const USAGE = `npm run bench -- [--quick] [--only NAME]… [--profile] [--no-build]
 
   --quick     short rounds: shows whether everything works, its figures are rough
@@ -79,6 +79,16 @@ async function measureAll({ quick, profile, wants }) {
     const { measureSaturation } = await import('./bench/saturation.mjs');
     heading('Saturation');
     rows.push(...(await measureSaturation({ quick, log: shutdown.log })));
+  }
+  if (wants('logger')) {
+    const { measureLogger } = await import('./bench/logger.mjs');
+    heading("A logger's trace");
+    rows.push(...(await measureLogger({ quick, log: shutdown.log })));
+  }
+  if (wants('defrost')) {
+    const { measureDefrostPlan } = await import('./bench/defrost.mjs');
+    heading('A defrost plan');
+    rows.push(...(await measureDefrostPlan({ quick, log: shutdown.log })));
   }
   if (wants('saving', 'memory', 'queue', 'opening', 'screen')) {
     rows.unshift(...(await measureServer({ quick, profile, wants })));

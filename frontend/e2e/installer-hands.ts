@@ -1,6 +1,9 @@
 import { expect } from '@jest/globals';
-import type { Page } from 'playwright-core';
+import type { Locator, Page } from 'playwright-core';
 import type { Answer, Step } from '#shared/checklist/step';
+import type { MeasurementAnswer, MeasurementBoxes } from '#shared/checklist/kinds/measurement';
+import type { MethodField } from '#shared/checklist/methods/method';
+import { METHODS } from '#shared/checklist/methods/methods';
 import type { SuperheatObservation } from '#shared/checklist/kinds/superheat';
 import type { SequenceDetail } from '#shared/contracts/sequences';
 import { demoAnswer } from '../../backend/src/demo/demo-answer';
@@ -55,6 +58,7 @@ export class InstallerHands {
 
   async doStep(step: Step, superheatExcessK = 0): Promise<void> {
     this.kinds.add(step.kind);
+    if (step.kind === 'trend') return this.passOver('The logger stays in for a day.');
     const answer = await demoAnswer(step, {
       specification: this.detail.specification,
       facts: this.detail.stepList.facts,
@@ -74,6 +78,15 @@ export class InstallerHands {
     if (answer.kind === 'override')
       await this.page.getByRole('button', { name: 'I have put it back' }).click();
     else await this.record();
+  }
+
+  /** What nobody has on the day itself is left with its reason. */
+  private async passOver(reason: string): Promise<void> {
+    const form = this.page.locator('app-not-applicable');
+    await form.locator('summary').click();
+    await form.locator('textarea').fill(reason);
+    await this.page.waitForTimeout(700);
+    await form.getByRole('button').click();
   }
 
   /** The button rests for a moment after each recording, and asks first about what lies outside. */
@@ -115,6 +128,9 @@ export class InstallerHands {
       case 'reading':
         await page.locator('app-reading-step input').fill(answer.value.text);
         return;
+      case 'measurement':
+        await this.enterMeasurement(answer);
+        return;
       case 'superheat':
         await this.enterSuperheat(answer.asFound, answer.asLeft);
         return;
@@ -132,6 +148,35 @@ export class InstallerHands {
     }
   }
 
+  private async enterMeasurement(answer: MeasurementAnswer): Promise<void> {
+    const { fields, rows } = METHODS[answer.method];
+    const form = this.page.locator('app-measurement-step');
+    await this.enterBoxes(form.locator('> app-measurement-boxes'), fields, answer);
+    for (const [index, row] of answer.rows.entries()) {
+      const at = form.locator('fieldset.row').nth(index);
+      if (!(await at.isVisible())) await form.locator('button.add').click();
+      await this.enterBoxes(at, rows?.fields ?? [], row);
+    }
+  }
+
+  private async enterBoxes(
+    form: Locator,
+    fields: readonly MethodField[],
+    { quantities, words }: Pick<MeasurementBoxes, 'quantities' | 'words'>,
+  ): Promise<void> {
+    for (const field of fields) {
+      const text = field.kind === 'quantity' ? quantities[field.key]?.text : words[field.key];
+      if (text === undefined) continue;
+      if (field.kind === 'choice') {
+        const label = field.options.find((option) => option.value === text)?.label.en ?? '';
+        await form.getByText(label, { exact: true }).click();
+      } else {
+        const suffix = field.kind === 'quantity' && !field.required ? ' (if known)' : '';
+        await form.getByLabel(`${field.label.en}${suffix}`, { exact: true }).fill(text);
+      }
+    }
+  }
+
   private async enterSuperheat(
     found: SuperheatObservation | null,
     left: SuperheatObservation,
@@ -139,7 +184,16 @@ export class InstallerHands {
     if (found) await this.enterPair(found);
     await this.page.getByText('As left', { exact: true }).click();
     await this.enterPair(left);
+    await this.meetConditions();
     await expect(this.page.locator('app-live-judgement').innerText()).resolves.toMatch(/°F/);
+  }
+
+  /** Prefilled at the second coil of a circuit: what is ticked already stays so. */
+  private async meetConditions(): Promise<void> {
+    const conditions = this.page.locator('app-superheat-conditions');
+    if (await conditions.getByText('all met', { exact: true }).isVisible()) return;
+    await conditions.locator('summary').click();
+    for (const box of await conditions.getByRole('checkbox').all()) await box.check();
   }
 
   private async enterPair(observation: SuperheatObservation): Promise<void> {

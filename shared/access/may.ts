@@ -7,6 +7,8 @@ import type { Person, Role } from './roles';
  */
 export const PERMISSIONS = {
   'opening.create': { scope: 'company', roles: ['admin', 'lead'] },
+  'refrigerant.read': { scope: 'company', roles: ['admin', 'lead', 'installer'] },
+  'refrigerant.add': { scope: 'company', roles: ['admin', 'lead'] },
   'job.read': { scope: 'company', roles: ['admin'] },
   'opening.read': { scope: 'opening', roles: ['admin', 'lead', 'installer', 'contractor'] },
   'people.read': { scope: 'opening', roles: ['admin', 'lead'] },
@@ -19,6 +21,8 @@ export const PERMISSIONS = {
   'photo.read': { scope: 'opening', roles: ['admin', 'lead', 'installer'] },
   'review.read': { scope: 'opening', roles: ['admin', 'lead'] },
   'review.give': { scope: 'opening', roles: ['admin', 'lead'] },
+  'defrostPlan.read': { scope: 'opening', roles: ['admin', 'lead', 'installer'] },
+  'defrostPlan.save': { scope: 'opening', roles: ['admin', 'lead'] },
   'package.issue': { scope: 'opening', roles: ['admin', 'lead'] },
   'package.read': { scope: 'opening', roles: ['admin', 'lead', 'contractor'] },
   'package.accept': { scope: 'opening', roles: ['contractor'] },

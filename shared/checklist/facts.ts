@@ -1,5 +1,6 @@
 import * as z from 'zod/mini';
 import { UNIT_SYSTEMS } from '../plant/plant';
+import { SAFETY_CLASSES } from '../refrigeration/saturation/saturation-table';
 
 /** A refrigerant maker's own pressure–temperature table, as the company entered it. Pressures absolute. */
 export const makersTableSchema = z.object({
@@ -8,6 +9,8 @@ export const makersTableSchema = z.object({
   edition: z.string().check(z.maxLength(120)),
   /** The last digit of the printed pressures. */
   printedStepPa: z.number(),
+  /** What keeps a flammable refrigerant from passing for a harmless one: the program knows nothing else of it. */
+  safetyClass: z.enum(SAFETY_CLASSES),
   points: z
     .array(z.object({ temperatureK: z.number(), bubblePa: z.number(), dewPa: z.number() }))
     .check(z.maxLength(400)),

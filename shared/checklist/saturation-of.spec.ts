@@ -15,6 +15,7 @@ function printed(name = 'R-448A', lastDigitPa = 0): MakersTableFacts {
   return {
     ...named,
     printedStepPa: 690,
+    safetyClass: 'A2L',
     points: points.map(({ temperature, bubble, dew }) => ({
       temperatureK: temperature,
       bubblePa: bubble,
@@ -39,12 +40,19 @@ describe('saturationOf', () => {
   it('takes the maker’s, also of a refrigerant that the program has no figures of', () => {
     const table = printed();
     expect(makersTableSchema.parse(table)).toEqual(table);
+    expect(saturationOf({ refrigerant: 'R-999X', makersTable: table })?.safetyClass).toBe('A2L');
     const judgement = judged({ refrigerant: 'R-999X', makersTable: table });
     expect(judgement).toMatchObject({ outcome: 'within', counts: true, doubts: [] });
     // Between rows 5 K apart the table is good to 0.03 K.
     expect(Math.abs(superheatOf(judgement) - superheatOf(judged({ refrigerant: 'R-448A' })))).toBeLessThan(
       0.03,
     );
+  });
+
+  it('is not taken without a safety class of the standard', () => {
+    const { safetyClass: _safetyClass, ...unclassed } = printed();
+    expect(makersTableSchema.safeParse(unclassed).success).toBe(false);
+    expect(makersTableSchema.safeParse({ ...unclassed, safetyClass: 'A4' }).success).toBe(false);
   });
 
   it('goes before the program’s own of the same name', () => {
@@ -103,6 +111,7 @@ describe('makersTableOf', () => {
       issuer: 'a maker',
       edition: '2026-01',
       printedStepPa: 690,
+      safetyClass: 'A2L',
     });
     expect(points.map(({ temperature, bubble, dew }) => [temperature, bubble, dew])).toEqual(
       table.points.map(({ temperatureK, bubblePa, dewPa }) => [temperatureK, bubblePa, dewPa]),

@@ -8,8 +8,11 @@ import type { MakersTableFacts, SequenceFacts } from './facts';
 /** Built tables by the facts that they were built from: building takes a millisecond, judging happens at every key. */
 const built = new WeakMap<MakersTableFacts, SaturationTable | null>();
 
+/** A sheet while it is being entered may lack its safety class; what is kept never does. */
+type EnteredTable = Omit<MakersTableFacts, 'safetyClass'> & Partial<Pick<MakersTableFacts, 'safetyClass'>>;
+
 /** The table as the calculations take it: the same figures with their dimensions. */
-export const makersTableOf = ({ points, ...named }: MakersTableFacts): MakersTable => ({
+export const makersTableOf = ({ points, ...named }: EnteredTable): MakersTable => ({
   ...named,
   points: points.map(({ temperatureK, bubblePa, dewPa }) => ({
     temperature: kelvin(temperatureK),

@@ -10,7 +10,7 @@ import {
   systemIdSchema,
 } from '../plant/ids';
 import { UNIT_SYSTEMS } from '../plant/plant';
-import { TEMPERATURE_CLASSES } from '../plant/words';
+import { LEVELS, TEMPERATURE_CLASSES } from '../plant/words';
 import { SEQUENCE_STATES } from '../sequences/transitions';
 import { pageOf } from './paging';
 
@@ -59,6 +59,10 @@ export const jointSchema = z.object({
 });
 export type Joint = z.infer<typeof jointSchema>;
 
+/** The own work of a system or a suction group, and where it stands. */
+export const levelWorkSchema = z.object({ ...jointSchema.shape, level: z.enum(LEVELS) });
+export type LevelWork = z.infer<typeof levelWorkSchema>;
+
 export const openingDetailSchema = z.object({
   ...openingSummarySchema.shape,
   elevationM: z.number(),
@@ -68,7 +72,14 @@ export const openingDetailSchema = z.object({
   language: z.enum(LANGUAGES),
   scheduleRevision: z.int(),
   systems: z.array(
-    z.object({ id: systemIdSchema, name: z.string(), refrigerant: z.string(), joints: z.array(jointSchema) }),
+    z.object({
+      id: systemIdSchema,
+      name: z.string(),
+      refrigerant: z.string(),
+      joints: z.array(jointSchema),
+      /** Beside the line, not counted among its circuits: the system's first, then its groups'. */
+      work: z.array(levelWorkSchema),
+    }),
   ),
 });
 export type OpeningDetail = z.infer<typeof openingDetailSchema>;
@@ -76,6 +87,8 @@ export type OpeningDetail = z.infer<typeof openingDetailSchema>;
 /** One row of the circuits table. `sequenceId` is null where no template applies. */
 export const circuitRowSchema = z.object({
   circuitId: circuitIdSchema,
+  /** A suction group's and a system's own work stands among the circuits. */
+  level: z.enum(LEVELS),
   sequenceId: z.nullable(sequenceIdSchema),
   code: z.string(),
   description: z.string(),

@@ -5,6 +5,13 @@ import { openingIdSchema, packageIdSchema, sha256Schema } from '../plant/ids';
 
 export const PACKAGE_STATES = ['building', 'issued', 'failed', 'cancelled'] as const;
 
+/**
+ * Why a package couldn't be built: something it needs didn't answer or changed meanwhile, there was no room for it, or
+ * the fault is ours.
+ */
+export const PACKAGE_FAILURES = ['temporary', 'diskFull', 'bug'] as const;
+export type PackageFailure = (typeof PACKAGE_FAILURES)[number];
+
 export const packageRequestSchema = z.strictObject({ language: z.enum(LANGUAGES) });
 
 export const acceptanceSchema = z.object({
@@ -32,7 +39,7 @@ export const packageSchema = z.object({
   pages: z.nullable(z.int()),
   bytes: z.nullable(z.int()),
   sha256: z.nullable(sha256Schema),
-  failure: z.nullable(z.string()),
+  failure: z.nullable(z.enum(PACKAGE_FAILURES)),
   acceptance: z.nullable(acceptanceSchema),
 });
 export type HandoverPackage = z.infer<typeof packageSchema>;

@@ -1,11 +1,13 @@
 import * as z from 'zod/mini';
 import { circuitIdSchema, openingIdSchema, sequenceIdSchema } from '../plant/ids';
+import { LEVELS } from '../plant/words';
 import { pageOf } from './paging';
 
 /** One submitted sequence that waits for a lead, with what there is to look at. */
 export const queueItemSchema = z.object({
   sequenceId: sequenceIdSchema,
   circuitId: circuitIdSchema,
+  level: z.enum(LEVELS),
   openingId: openingIdSchema,
   openingName: z.string(),
   /** Of the opening: times are told as they were on site. */

@@ -1,10 +1,15 @@
 import * as z from 'zod/mini';
+import { scheduleReasonSchema } from './schedule-reasons';
 
-/** One thing wrong with a schedule: the line of the file (the headings are line 1), the column, and a sentence. */
+/**
+ * One thing wrong with a schedule: the line of the file (the headings are line 1), the column by its heading there, and
+ * why. `message` says the same in one English sentence, for clients without words for the reason's code.
+ */
 export const scheduleProblemSchema = z.object({
   row: z.int(),
   column: z.nullable(z.string()),
-  reason: z.string(),
+  reason: scheduleReasonSchema,
+  message: z.string(),
 });
 export type ScheduleProblem = z.infer<typeof scheduleProblemSchema>;
 

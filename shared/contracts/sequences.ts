@@ -37,8 +37,32 @@ export const entryBatchSchema = z.strictObject({
 });
 
 /**
+ * Why an entry is not taken. `unknown` is what a phone reads whose page is of another version than the server, so that
+ * one refusal that it doesn't know keeps it from no other result.
+ */
+export const ENTRY_REFUSALS = [
+  'notAnEntry',
+  'changedOnTheWay',
+  'otherAuthor',
+  'serverOnly',
+  'unknownDevice',
+  'idTaken',
+  'noSuchSequence',
+  'twiceInBatch',
+  'unknown',
+] as const;
+
+/** `path`: the field of the entry that isn't as documented, where it is one. */
+export const entryRefusalSchema = z.object({
+  code: z.enum(ENTRY_REFUSALS),
+  params: z.object({ path: z.optional(z.string()) }),
+});
+export type EntryRefusal = z.infer<typeof entryRefusalSchema>;
+
+/**
  * What became of one entry. `stored` and `alreadyStored` are final; `refused` means that it isn't an entry of this
- * person on anything they ever could see (the reason is a sentence), and only a person can put that right.
+ * person on anything they ever could see, and only a person can put that right. `message` says why in an English
+ * sentence, for clients without words for the reason's code.
  */
 export const entryResultSchema = z.discriminatedUnion('result', [
   z.object({
@@ -50,7 +74,12 @@ export const entryResultSchema = z.discriminatedUnion('result', [
     hash: sha256Schema,
     state: foldStateSchema.shape.state,
   }),
-  z.object({ result: z.literal('refused'), id: z.nullable(z.string()), reason: z.string() }),
+  z.object({
+    result: z.literal('refused'),
+    id: z.nullable(z.string()),
+    reason: z.catch(entryRefusalSchema, { code: 'unknown', params: {} }),
+    message: z.string(),
+  }),
 ]);
 export type EntryResult = z.infer<typeof entryResultSchema>;
 export const entryBatchResponseSchema = z.object({ results: z.array(entryResultSchema) });

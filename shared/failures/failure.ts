@@ -22,7 +22,10 @@ export const FAILURE_CODES = [
 
 export type FailureCode = (typeof FAILURE_CODES)[number];
 
-/** One place in the input and what is wrong there; `path` is a field path such as `entries.0.body`. */
+/**
+ * One place in the input and what is wrong there; `path` is a field path such as `entries.0.body`, by which screens have
+ * words of their own. `message` is English, for logs and for clients without words.
+ */
 export interface FailurePlace {
   readonly path: string;
   readonly message: string;

@@ -9,6 +9,7 @@ import { errorResponse } from '../http/error-response';
 import { mountRoutes } from '../http/mount-routes';
 import { openApiDocument } from '../http/openapi';
 import { giveRequestId, requestIdOf } from '../http/request-id';
+import { requestDeadline } from '../http/request-deadline';
 import { securityHeaders } from '../http/security-headers';
 import { PROJECT_FOLDER } from './project-folder';
 import { listRoutes } from './routes';
@@ -19,6 +20,9 @@ import { staticFiles } from './static-files';
 const JSON_LIMIT = '2mb';
 /** Batches of entries stay below: what is written often is not worth the processor's time. */
 const COMPRESS_FROM_BYTES = 24_000;
+
+/** Longer than any answer takes, shorter than a person waits: a database that hangs must not hold phones. */
+const ANSWER_WITHIN_MS = 40_000;
 
 export interface AppOptions {
   readonly secure: boolean;
@@ -39,6 +43,7 @@ export function createApp(services: Services, logger: Logger, options: AppOption
   app.use(securityHeaders(options.secure));
   const routes = listRoutes(services);
   const document = openApiDocument(routes);
+  app.use('/api', requestDeadline(ANSWER_WITHIN_MS));
   app.use('/api', compressLargeAnswers());
   app.use('/api', services.forgery.issue);
   app.get('/api/openapi.json', (_request, response) => {

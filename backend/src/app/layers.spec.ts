@@ -56,6 +56,7 @@ const FOLDERS: readonly Snippet[] = [
   bad('frontend/src/app/reviews/x.ts', '../packages/packages-api', FEATURE),
   bad('frontend/src/app/packages/x.ts', '../schedules/schedules-api', FEATURE),
   bad('frontend/src/app/schedules/x.ts', '../work/work-api', FEATURE),
+  bad('frontend/src/app/refrigerants/x.ts', '../openings/openings-api', FEATURE),
   bad('frontend/src/app/ui/x.ts', '../session/session', UI),
   bad('frontend/src/app/ui/x.ts', '../work/work-api', UI),
   bad('backend/src/database/migrations/x.ts', '../../jobs/job.entity', MIGRATION),

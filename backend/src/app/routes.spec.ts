@@ -31,16 +31,21 @@ const TABLE: Readonly<Record<string, Readonly<Record<Caller, 'ok' | 401 | 403 | 
   'get /review-queue': signedIn(),
   'get /jobs': { nobody: 401, installer: 403, lead: 403, admin: 'ok', contractor: 403, stranger: 403 },
   'post /openings': { nobody: 401, installer: 403, lead: 'ok', admin: 'ok', contractor: 403, stranger: 'ok' },
+  'get /refrigerant-tables': company('ok', 'ok', 'ok', 403),
+  'post /refrigerant-tables': company(403, 'ok', 'ok', 403),
   'get /openings/:openingId': opening('ok', 'ok', 'ok', 'ok'),
   'get /openings/:openingId/people': opening(403, 'ok', 'ok', 403),
   'get /openings/:openingId/circuits': opening('ok', 'ok', 'ok', 403),
   'put /openings/:openingId/assignments': opening(403, 'ok', 'ok', 403),
   'post /openings/:openingId/schedule-imports': opening(403, 'ok', 'ok', 403),
   'get /sequences/:sequenceId': opening('ok', 'ok', 'ok', 403),
+  'get /openings/:openingId/suction-groups/:suctionGroupId/coils': opening('ok', 'ok', 'ok', 403),
   // Its access is asked of the service, for people whose role has ended: others learn nothing.
   'put /sequences/:sequenceId/photos/:sha256': signedIn(),
   'get /sequences/:sequenceId/photos/:sha256': opening('ok', 'ok', 'ok', 403),
   'post /sequences/:sequenceId/reviews': opening(403, 'ok', 'ok', 403),
+  'get /openings/:openingId/defrost-plan': opening('ok', 'ok', 'ok', 403),
+  'post /openings/:openingId/defrost-plan': opening(403, 'ok', 'ok', 403),
   'get /openings/:openingId/packages': opening(403, 'ok', 'ok', 'ok'),
   'post /openings/:openingId/packages': opening(403, 'ok', 'ok', 403),
   'get /packages/:packageId': opening(403, 'ok', 'ok', 'ok'),
@@ -70,10 +75,16 @@ function opening(installer: Answer, lead: Answer, admin: Answer, contractor: Ans
   return { nobody: 401, installer, lead, admin, contractor, stranger: 404 } as const;
 }
 
+/** Of the caller's own company, whichever that is. */
+function company(installer: Answer, lead: Answer, admin: Answer, contractor: Answer) {
+  return { nobody: 401, installer, lead, admin, contractor, stranger: lead } as const;
+}
+
 let server: TestServer;
 let store: TestStore;
 let stranger: TestStore;
 let sequenceId: SequenceId;
+let suctionGroupId: string;
 let packageId: string;
 let routes: readonly AnyRoute[];
 
@@ -82,6 +93,10 @@ beforeAll(async () => {
   store = await makeStore(server, 'alpha');
   stranger = await makeStore(server, 'beta');
   sequenceId = (await importSmallSchedule(server, store)).get('A1') as SequenceId;
+  const groups: { id: string }[] = await server.sql('SELECT id FROM suction_group WHERE opening_id = ?', [
+    store.openingId,
+  ]);
+  suctionGroupId = groups[0]?.id ?? '';
   packageId = await insertPackage();
   routes = listRoutes(server.services);
 }, 60_000);
@@ -103,6 +118,7 @@ function pathOf(route: AnyRoute): string {
   return `/api${route.path}`
     .replace(':openingId', store.openingId)
     .replace(':sequenceId', sequenceId)
+    .replace(':suctionGroupId', suctionGroupId)
     .replace(':packageId', packageId)
     .replace(':sha256', 'a'.repeat(64));
 }

@@ -1,3 +1,5 @@
+import { saveDefrostPlan } from '../defrosts/routes/save-defrost-plan.route';
+import { showDefrostPlan } from '../defrosts/routes/show-defrost-plan.route';
 import { listen } from '../events/routes/listen.route';
 import { showHealth } from '../health/routes/show-health.route';
 import type { AnyRoute } from '../http/define-route';
@@ -21,11 +23,14 @@ import { setLanguage } from '../people/routes/set-language.route';
 import { showSession } from '../people/routes/show-session.route';
 import { signIn } from '../people/routes/sign-in.route';
 import { signOut } from '../people/routes/sign-out.route';
+import { addRefrigerantTable } from '../refrigerants/routes/add-refrigerant-table.route';
+import { listRefrigerantTables } from '../refrigerants/routes/list-refrigerant-tables.route';
 import { giveReview } from '../reviews/routes/give-review.route';
 import { listReviewQueue } from '../reviews/routes/list-review-queue.route';
 import { importSchedule } from '../schedules/routes/import-schedule.route';
 import { addPhoto } from '../sequences/routes/add-photo.route';
 import { appendEntries } from '../sequences/routes/append-entries.route';
+import { showFloodHunt } from '../sequences/routes/show-flood-hunt.route';
 import { showPhoto } from '../sequences/routes/show-photo.route';
 import { showSequence } from '../sequences/routes/show-sequence.route';
 import { showInstallationKey } from '../signing/routes/show-installation-key.route';
@@ -53,11 +58,16 @@ export function listRoutes(services: Services): readonly AnyRoute[] {
     importSchedule(services.schedules),
     listMyCircuits(services.openings),
     showSequence(services.sequences),
+    showFloodHunt(services.floodHunt),
     appendEntries(services.entries),
     addPhoto(services.photos),
     showPhoto(services.photos, services.sequences),
     listReviewQueue(services.queue),
     giveReview(services.reviews),
+    showDefrostPlan(services.defrosts),
+    saveDefrostPlan(services.defrosts),
+    listRefrigerantTables(services.refrigerants),
+    addRefrigerantTable(services.refrigerants),
     listPackages(services.packages),
     requestPackage(services.packages),
     showPackage(services.packages),

@@ -5,6 +5,8 @@ import type { DataSource } from 'typeorm';
 import { AuditRepository } from '../audit/audit.repository';
 import { AuditService } from '../audit/audit.service';
 import { Transactions } from '../database/transactions';
+import { DefrostPlansRepository } from '../defrosts/defrost-plans.repository';
+import { DefrostPlansService } from '../defrosts/defrost-plans.service';
 import { LiveEventsRepository } from '../events/live-events.repository';
 import { LiveEventsService } from '../events/live-events.service';
 import { ObjectStorage } from '../files/object-storage';
@@ -31,13 +33,18 @@ import { SignInLimit } from '../people/sign-in-limit';
 import { SubjectsRepository } from '../people/subjects.repository';
 import { PlantRepository } from '../plant/plant.repository';
 import { PlantService } from '../plant/plant.service';
+import { RefrigerantsRepository } from '../refrigerants/refrigerants.repository';
+import { RefrigerantsService } from '../refrigerants/refrigerants.service';
 import { ReviewQueueRepository } from '../reviews/review-queue.repository';
 import { ReviewQueueService } from '../reviews/review-queue.service';
 import { ReviewsRepository } from '../reviews/reviews.repository';
 import { ReviewsService } from '../reviews/reviews.service';
+import { SentBackExpansion } from '../reviews/sent-back-expansion.service';
 import { SentBackNotice } from '../reviews/sent-back-notice.service';
 import { SchedulesService } from '../schedules/schedules.service';
 import { EntriesService } from '../sequences/entries.service';
+import { FloodHuntRepository } from '../sequences/flood-hunt.repository';
+import { FloodHuntService } from '../sequences/flood-hunt.service';
 import { ExpansionService } from '../sequences/expansion.service';
 import { PhotosRepository } from '../sequences/photos.repository';
 import { PhotosService } from '../sequences/photos.service';
@@ -109,14 +116,27 @@ export function wireServices(config: Config, dataSource: DataSource, logger: Log
     audit,
     events,
   );
-  const templates = new TemplatesService(new TemplatesRepository(), join(PROJECT_FOLDER, 'templates'));
+  const refrigerants = new RefrigerantsService(transactions, new RefrigerantsRepository(), people, audit);
+  const templates = new TemplatesService(
+    new TemplatesRepository(),
+    refrigerants,
+    join(PROJECT_FOLDER, 'templates'),
+  );
   const register = new PeopleRegister(transactions, peopleRepository, templates);
 
   const sequencesRepository = new SequencesRepository();
   const photosRepository = new PhotosRepository();
   const stepLists = new StepLists(sequencesRepository);
   const expansion = new ExpansionService(templates, sequencesRepository, stepLists, events);
-  const schedules = new SchedulesService(transactions, openings, plant, expansion, audit, events);
+  const schedules = new SchedulesService(
+    transactions,
+    openings,
+    plant,
+    refrigerants,
+    expansion,
+    audit,
+    events,
+  );
   const entries = new EntriesService(transactions, sequencesRepository, stepLists, people, events);
   const sequences = new SequencesService(
     transactions,
@@ -125,6 +145,12 @@ export function wireServices(config: Config, dataSource: DataSource, logger: Log
     stepLists,
     openings,
     people,
+  );
+  const floodHunt = new FloodHuntService(
+    transactions,
+    new FloodHuntRepository(),
+    sequencesRepository,
+    stepLists,
   );
   const photos = new PhotosService(
     transactions,
@@ -147,14 +173,24 @@ export function wireServices(config: Config, dataSource: DataSource, logger: Log
     audit,
     events,
     notice,
+    new SentBackExpansion(openings, plant, expansion),
   );
   const queue = new ReviewQueueService(transactions, new ReviewQueueRepository(), openings);
+
+  const defrosts = new DefrostPlansService(
+    transactions,
+    new DefrostPlansRepository(),
+    openings,
+    plant,
+    audit,
+  );
 
   const packagesRepository = new PackagesRepository();
   const packages = new PackagesService(
     transactions,
     packagesRepository,
     openings,
+    defrosts,
     storage,
     jobs,
     key,
@@ -165,6 +201,7 @@ export function wireServices(config: Config, dataSource: DataSource, logger: Log
     transactions,
     packagesRepository,
     openings,
+    defrosts,
     people,
     sequences,
     photos,
@@ -180,7 +217,9 @@ export function wireServices(config: Config, dataSource: DataSource, logger: Log
     photoCheck: (payload, run) => photos.check(payload, run),
     package: (payload, run) => builder.build(payload, run),
   };
-  const worker = new JobWorker(transactions, jobsRepository, handlers, logger);
+  const worker = new JobWorker(transactions, jobsRepository, handlers, logger, {
+    package: (payload) => builder.abandon(payload),
+  });
   jobs.onEnqueued(() => worker.nudge());
 
   const health = new HealthService({
@@ -201,13 +240,16 @@ export function wireServices(config: Config, dataSource: DataSource, logger: Log
     door,
     openings,
     plant,
+    refrigerants,
     templates,
     schedules,
     entries,
     sequences,
+    floodHunt,
     photos,
     reviews,
     queue,
+    defrosts,
     packages,
     health,
     worker,

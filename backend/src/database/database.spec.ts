@@ -46,7 +46,7 @@ describe('grants of the application’s account', () => {
     expect(rights.map((row) => row.right).sort()).toEqual(expected);
   });
 
-  it.each(['entry', 'review', 'audit', 'acceptance', 'step_list', 'template_version'])(
+  it.each(['entry', 'review', 'audit', 'acceptance', 'step_list', 'template_version', 'refrigerant_table'])(
     'let nobody change or delete a row of %s',
     async (table) => {
       for (const statement of [`DELETE FROM ${table}`, `UPDATE ${table} SET company_id = company_id`]) {

@@ -1,4 +1,5 @@
 import { AuditEntity } from '../audit/audit.entity';
+import { DefrostPlanEntity } from '../defrosts/defrost-plan.entity';
 import { LiveEventEntity } from '../events/live-event.entity';
 import { JobEntity } from '../jobs/job.entity';
 import { OpeningEntity } from '../openings/opening.entity';
@@ -13,6 +14,7 @@ import { CoilEntity } from '../plant/coil.entity';
 import { FixtureEntity } from '../plant/fixture.entity';
 import { SuctionGroupEntity } from '../plant/suction-group.entity';
 import { SystemEntity } from '../plant/system.entity';
+import { RefrigerantTableEntity } from '../refrigerants/refrigerant-table.entity';
 import { ReviewEntity } from '../reviews/review.entity';
 import { EntryEntity } from '../sequences/entry.entity';
 import { PhotoEntity } from '../sequences/photo.entity';
@@ -33,6 +35,7 @@ export const ENTITIES = [
   FixtureEntity,
   CoilEntity,
   TemplateVersionEntity,
+  RefrigerantTableEntity,
   StepListEntity,
   SequenceEntity,
   EntryEntity,
@@ -41,6 +44,7 @@ export const ENTITIES = [
   AuditEntity,
   JobEntity,
   LiveEventEntity,
+  DefrostPlanEntity,
   PackageEntity,
   AcceptanceEntity,
 ];

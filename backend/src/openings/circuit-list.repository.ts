@@ -6,8 +6,8 @@ import { managerOf, type Context } from '../database/transactions';
 export type CircuitListRow = CircuitRow & { readonly ordinal: number };
 
 const COLUMNS = `
-  c.id AS circuitId, s.id AS sequenceId, c.code, c.description, c.area, sys.name AS systemName,
-  g.name AS suctionGroupName, c.temperature_class AS temperatureClass,
+  c.id AS circuitId, c.level, s.id AS sequenceId, c.code, c.description, c.area, sys.name AS systemName,
+  COALESCE(g.name, '') AS suctionGroupName, c.temperature_class AS temperatureClass,
   CASE WHEN s.id IS NULL THEN 'noSequence'
        WHEN s.state = 'open' AND s.head_position > 1 THEN 'underWay' ELSE s.state END AS state,
   COALESCE(s.steps_done, 0) AS stepsDone, COALESCE(s.steps_total, 0) AS stepsTotal,
@@ -17,8 +17,8 @@ const COLUMNS = `
 const TABLES = `
   circuit c
   JOIN opening o ON o.id = c.opening_id
-  JOIN suction_group g ON g.id = c.suction_group_id
-  JOIN plant_system sys ON sys.id = g.system_id
+  JOIN plant_system sys ON sys.id = c.system_id
+  LEFT JOIN suction_group g ON g.id = c.suction_group_id
   LEFT JOIN sequence s ON s.circuit_id = c.id
   LEFT JOIN person p ON p.id = c.assignee_id`;
 

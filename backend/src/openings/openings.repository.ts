@@ -79,7 +79,7 @@ export class OpeningsRepository {
       `SELECT s.opening_id AS openingId,
               CASE WHEN s.state = 'open' AND s.head_position > 1 THEN 'underWay' ELSE s.state END AS state,
               COUNT(*) AS n
-         FROM sequence s JOIN circuit c ON c.id = s.circuit_id AND c.removed_at IS NULL
+         FROM sequence s JOIN circuit c ON c.id = s.circuit_id AND c.level = 'circuit' AND c.removed_at IS NULL
         WHERE s.opening_id IN (${ids.map(() => '?').join(',')}) GROUP BY 1, 2`,
       [...ids],
     );

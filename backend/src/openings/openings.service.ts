@@ -25,6 +25,9 @@ import type { OpeningsRepository } from './openings.repository';
 type OpeningList = z.infer<typeof openingListSchema>;
 type CircuitList = z.infer<typeof circuitListSchema>;
 
+/** Ordinals begin below zero: systems, then suction groups, then circuits from 0. */
+const BEFORE_ALL = -1_000_000;
+
 const RECORDING_ROLES: readonly string[] = ['installer', 'lead'];
 
 export class OpeningsService {
@@ -114,7 +117,7 @@ export class OpeningsService {
       this.transactions.outside,
       openingId,
       limit,
-      after === undefined ? -1 : Number.parseInt(after, 10) || 0,
+      after === undefined ? BEFORE_ALL : Number.parseInt(after, 10) || 0,
     );
     return { items: rows.map(toRow), next: rows.length === limit ? String(rows.at(-1)?.ordinal) : null };
   }
@@ -127,7 +130,7 @@ export class OpeningsService {
       person.id,
       person.memberships.map((membership) => membership.openingId),
       limit,
-      openingId && /^\d{1,9}$/.test(ordinal ?? '') ? { openingId, ordinal: Number(ordinal) } : null,
+      openingId && /^-?\d{1,9}$/.test(ordinal ?? '') ? { openingId, ordinal: Number(ordinal) } : null,
     );
     const last = rows.at(-1);
     return {
@@ -225,7 +228,7 @@ export class OpeningsService {
     const systems = await this.plant.systemsOf(context, id);
     const rows: CircuitListRow[] = [];
     // In pages, so that no single statement grows with the store.
-    for (let after = -1; ; after = rows.at(-1)?.ordinal ?? after) {
+    for (let after = BEFORE_ALL; ; after = rows.at(-1)?.ordinal ?? after) {
       const page = await this.circuits.findOfOpening(context, id, 500, after);
       rows.push(...page);
       if (page.length < 500) break;
@@ -235,8 +238,11 @@ export class OpeningsService {
       name: system.name,
       refrigerant: system.refrigerant,
       joints: rows
-        .filter((row) => row.systemName === system.name)
+        .filter((row) => row.level === 'circuit' && row.systemName === system.name)
         .map(({ circuitId, code, state }) => ({ circuitId, code, state })),
+      work: rows
+        .filter((row) => row.level !== 'circuit' && row.systemName === system.name)
+        .map(({ circuitId, code, state, level }) => ({ circuitId, code, state, level })),
     }));
   }
 }

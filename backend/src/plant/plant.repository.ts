@@ -1,6 +1,7 @@
 import { In, IsNull } from 'typeorm';
 import type { CircuitId, CoilId, FixtureId, OpeningId, SuctionGroupId, SystemId } from '#shared/plant/ids';
 import type { CircuitSpecification, Fixture } from '#shared/plant/plant';
+import type { Level, TemperatureClass } from '#shared/plant/words';
 import type { OpeningEntity } from '../openings/opening.entity';
 import { managerOf, type Context } from '../database/transactions';
 import { CircuitEntity } from './circuit.entity';
@@ -97,21 +98,22 @@ export function specificationsOf(opening: OpeningFacts, plant: PlantRows): Circu
   const systems = new Map(plant.systems.map((system) => [system.id, system]));
   const groups = new Map(plant.suctionGroups.map((group) => [group.id, group]));
   return plant.circuits.flatMap((circuit) => {
-    const group = groups.get(circuit.suctionGroupId);
-    const system = group && systems.get(group.systemId);
-    return group && system ? [specificationOf(opening, system, group, circuit, plant)] : [];
+    const system = systems.get(circuit.systemId);
+    const group = circuit.suctionGroupId === null ? null : groups.get(circuit.suctionGroupId);
+    return system && group !== undefined ? [specificationOf(opening, system, group, circuit, plant)] : [];
   });
 }
 
 function specificationOf(
   opening: OpeningFacts,
   system: SystemEntity,
-  group: SuctionGroupEntity,
+  group: SuctionGroupEntity | null,
   circuit: CircuitEntity,
   plant: PlantRows,
 ): CircuitSpecification {
   return {
     revision: circuit.revision,
+    ...(circuit.level === 'circuit' ? {} : { level: circuit.level as Level }),
     opening: {
       id: opening.id as OpeningId,
       name: opening.name,
@@ -124,10 +126,10 @@ function specificationOf(
       kind: system.kind as CircuitSpecification['system']['kind'],
       refrigerant: system.refrigerant,
     },
-    suctionGroup: {
+    suctionGroup: group && {
       id: group.id as SuctionGroupId,
       name: group.name,
-      temperatureClass: group.temperatureClass as CircuitSpecification['suctionGroup']['temperatureClass'],
+      temperatureClass: group.temperatureClass as TemperatureClass,
       saturatedSuctionTemperatureK: group.saturatedSuctionTemperatureK,
     },
     circuit: {

@@ -26,7 +26,7 @@ export class ReviewQueueRepository {
     if (openingIds.length === 0) return [];
     const cursor = after ? 'AND (s.outside_count = 0, s.submitted_at, s.id) > (?, ?, ?)' : '';
     const rows: QueueRow[] = await managerOf(context).query(
-      `SELECT s.id AS sequenceId, c.id AS circuitId, o.id AS openingId, o.name AS openingName, o.time_zone AS timeZone,
+      `SELECT s.id AS sequenceId, c.id AS circuitId, c.level, o.id AS openingId, o.name AS openingName, o.time_zone AS timeZone,
               o.opening_date AS openingDate, c.code, c.description, c.area, s.submitted_at AS submittedAt,
               COALESCE(p.name, '') AS submittedBy, s.round, s.steps_total AS stepsTotal,
               s.outside_count AS outsideCount, s.not_applicable_count AS notApplicableCount,

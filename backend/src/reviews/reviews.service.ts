@@ -18,6 +18,7 @@ import { requireFreshPassword } from '../http/password-age';
 import type { LockedForReview, SequenceReviewDesk } from '../sequences/sequence-review-desk.service';
 import type { InstallationKey } from '../signing/installation-key';
 import type { ReviewsRepository } from './reviews.repository';
+import type { SentBackExpansion } from './sent-back-expansion.service';
 import type { SentBackNotice } from './sent-back-notice.service';
 
 /** What an approval says under the name; printed with the signature (21 CFR 11.50(a)(3)). */
@@ -33,6 +34,7 @@ export class ReviewsService {
     private readonly audit: AuditService,
     private readonly events: LiveEventsService,
     private readonly notice: SentBackNotice,
+    private readonly reasked: SentBackExpansion,
   ) {}
 
   /**
@@ -174,6 +176,7 @@ export class ReviewsService {
     });
     if (request.verdict === 'sentBack') {
       await this.notice.send(context, caller.personName, locked, request.remarks);
+      await this.reasked.renew(context, caller.person.id, locked);
     }
   }
 }

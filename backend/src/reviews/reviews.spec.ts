@@ -305,6 +305,32 @@ describe('a schedule that changes while a circuit is with the installer again', 
     expect(view.steps.find((step) => step.step.key === stepKey)?.remark?.text).toBe('Again');
   });
 
+  it('asks by the schedule that stands now what was submitted during an import and then sent back', async () => {
+    const other = await makeStore(server, 'overtaken');
+    const id = (await importSmallSchedule(server, other)).get('A2') as SequenceId;
+    const [phone, chief] = [await other.client('installer'), await other.client('lead')];
+    await finishSequence(phone, id, random);
+    const person = await server.services.register.find(other.people.lead.id);
+    const revised = Buffer.from(
+      SMALL_SCHEDULE.toString('utf8').replace('Deli,20,29,6,8,1', 'Deli,20,29,6,8,2'),
+    );
+    await server.services.schedules.import(person, other.openingId, revised, true);
+    const submitted = await chief.sequence(id);
+    const superheats = (detail: SequenceDetail) =>
+      detail.stepList.steps.filter((step) => step.kind === 'superheat').length;
+    expect([submitted.fold.state, superheats(submitted)]).toEqual(['submitted', 1]);
+    const response = await chief.send('post', `/api/sequences/${id}/reviews`, {
+      verdict: 'sentBack',
+      headHash: submitted.fold.headHash,
+      remarks: [{ stepKey: submitted.stepList.steps[0]?.key, text: 'Again' }],
+    });
+    expect(response.status).toBe(201);
+    const after = await phone.sequence(id);
+    expect([after.fold.state, superheats(after)]).toEqual(['sentBack', 2]);
+    expect(foldEntries(after.entries, after.stepList.steps)).toEqual(after.fold);
+    expect(findBrokenLink(after.entries)).toBeNull();
+  });
+
   it('shows an approved circuit with the specification that was approved, and a dropped one still', async () => {
     const other = await makeStore(server, 'redesign');
     const id = (await importSmallSchedule(server, other)).get('A2') as SequenceId;

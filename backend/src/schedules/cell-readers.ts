@@ -1,20 +1,15 @@
+import type { ScheduleReason, ScheduleWord } from '#shared/contracts/schedule-reasons';
 import { convert, toSi } from '#shared/units/convert';
 import { parseNumber } from '#shared/units/parse-number';
 import { parseUnit } from '#shared/units/parse-unit';
-import { UNITS, type Dimension, type UnitId } from '#shared/units/unit';
+import type { Dimension, UnitId } from '#shared/units/unit';
 import { readFeetAndInches } from './feet-and-inches';
-import { either, quote } from './schedule-problems';
+import { quoted } from './schedule-problems';
 import { bare, type Spellings } from './schedule-words';
 
-/** What a cell says, or one sentence that tells what to write instead. */
+/** What a cell says, or why it can't be read. */
 export type CellReading<V> =
-  | { readonly ok: true; readonly value: V }
-  | {
-      readonly ok: false;
-      readonly reason: string;
-      /** Set when the number stands alone: likely so in the whole column, and put right in its heading. */
-      readonly lacksUnit?: true;
-    };
+  { readonly ok: true; readonly value: V } | { readonly ok: false; readonly reason: ScheduleReason };
 
 /** What a cell's reader has to know about the file around it. */
 export interface CellSurroundings {
@@ -33,7 +28,7 @@ export interface CellReader<V> {
   readonly measure?: { readonly dimension: Dimension; readonly units: readonly UnitId[] };
 }
 
-const refuse = (reason: string): { ok: false; reason: string } => ({ ok: false, reason });
+const refuse = (reason: ScheduleReason): { ok: false; reason: ScheduleReason } => ({ ok: false, reason });
 
 const SPREADSHEET_ERROR = /^#(REF!|N\/A|VALUE!|NAME\?|DIV\/0!|NUM!|NULL!)$/i;
 
@@ -45,26 +40,26 @@ const SPREADSHEET_ERROR = /^#(REF!|N\/A|VALUE!|NAME\?|DIV\/0!|NUM!|NULL!)$/i;
 export const text = (longest: number): CellReader<string> => ({
   read: (cell) => {
     if (SPREADSHEET_ERROR.test(cell)) {
-      return refuse(`${quote(cell)} is an error of the spreadsheet; put the formula right and export again.`);
+      return refuse({ code: 'spreadsheetError', params: { text: quoted(cell) } });
     }
     if (cell.length <= longest) return { ok: true, value: cell };
-    return refuse(`The text has ${cell.length} characters; shorten it to ${longest}.`);
+    return refuse({ code: 'textTooLong', params: { characterCount: cell.length, upTo: longest } });
   },
 });
 
 /** A member of a closed set, in any of its usual spellings. */
-export function word<Word extends string>(spellings: Spellings<Word>): CellReader<Word> {
+export function word<Word extends ScheduleWord>(spellings: Spellings<Word>): CellReader<Word> {
   const entries = Object.entries(spellings) as [Word, Spellings<Word>[Word]][];
   const words = new Map(
     entries.flatMap(([value, ways]) => [value, ...ways].map((way) => [bare(way), value] as const)),
   );
-  const shown = entries.map(([, [first]]) => first).join(', ');
+  const shown = entries.map(([value, [write]]) => ({ word: value, write }));
   return {
     read: (cell) => {
       const value = words.get(bare(cell));
       return value
         ? { ok: true, value }
-        : refuse(`${quote(cell)} is not a known word here; write one of: ${shown}.`);
+        : refuse({ code: 'unknownWord', params: { text: quoted(cell), words: shown } });
     },
   };
 }
@@ -73,9 +68,8 @@ export function word<Word extends string>(spellings: Spellings<Word>): CellReade
 function readNumber(cell: string, decimalComma: 'auto' | false, digits = cell): CellReading<number> {
   const parsed = parseNumber(digits, { decimalComma });
   if (parsed.ok) return parsed;
-  if (parsed.reason !== 'ambiguous')
-    return refuse(`${quote(cell)} is not a number; write digits only, such as 12.5.`);
-  return refuse(`${quote(cell)} can be read in two ways; write it without a thousands separator.`);
+  const code = parsed.reason === 'ambiguous' ? 'twoWaysToRead' : 'notANumber';
+  return refuse({ code, params: { text: quoted(cell) } });
 }
 
 /** A whole number within bounds, both included. */
@@ -84,15 +78,18 @@ export const wholeNumber = (low: number, high: number): CellReader<number> => ({
     const number = readNumber(cell, decimalComma);
     if (!number.ok) return number;
     if (Number.isInteger(number.value) && number.value >= low && number.value <= high) return number;
-    return refuse(`${quote(cell)} is not a whole number from ${low} to ${high}; correct it.`);
+    return refuse({
+      code: 'notAWholeNumber',
+      params: { text: quoted(cell), lowCount: low, highCount: high },
+    });
   },
 });
 
 /** Where a number ends and its unit begins: a letter, a degree, per cent, foot or inch sign. */
 const UNIT_START = /[\p{L}°º˚∘%'’′"”″]/u;
 
-const bound = (value: number, from: UnitId, to: UnitId): string =>
-  `${Number(convert(value, from, to).toPrecision(3))} ${UNITS[to].symbol}`;
+const bound = (value: number, from: UnitId, to: UnitId): number =>
+  Number(convert(value, from, to).toPrecision(3));
 
 /**
  * A quantity with its unit in the heading or in the cell; a unit in both has to be the same one.
@@ -109,12 +106,11 @@ export function quantity(
   low: number,
   high: number,
 ): CellReader<number> {
-  const symbols = either(units.map((unit) => UNITS[unit].symbol));
   const inUnit = (cell: string, value: number, unit: UnitId): CellReading<number> => {
     const si = toSi(value, unit);
     if (si >= toSi(low, units[0]) - 1e-9 && si <= toSi(high, units[0]) + 1e-9) return { ok: true, value: si };
-    const range = `${bound(low, units[0], unit)} to ${bound(high, units[0], unit)}`;
-    return refuse(`${quote(cell)} is out of the plausible range, ${range}; check the number and its unit.`);
+    const range = { low: bound(low, units[0], unit), high: bound(high, units[0], unit), unit };
+    return refuse({ code: 'outOfRange', params: { text: quoted(cell), ...range } });
   };
   return {
     measure: { dimension, units },
@@ -127,18 +123,12 @@ export function quantity(
       if (!number.ok) return number;
       const own = written === '' ? undefined : parseUnit(written, dimension);
       if (written !== '' && !own)
-        return refuse(`The unit ${quote(written)} is not known here; write ${symbols}.`);
-      if (own && unit && own !== unit) {
-        return refuse(
-          `The cell says ${UNITS[own].symbol} and its heading ${UNITS[unit].symbol}; write one of the two.`,
-        );
-      }
+        return refuse({ code: 'unknownUnit', params: { text: quoted(written), units: [...units] } });
+      if (own && unit && own !== unit)
+        return refuse({ code: 'twoUnits', params: { cell: own, heading: unit } });
       const unitOfValue = own ?? unit;
       if (unitOfValue) return inUnit(cell, number.value, unitOfValue);
-      return {
-        ...refuse(`The unit is missing; write it in brackets into the heading: ${symbols}.`),
-        lacksUnit: true,
-      };
+      return refuse({ code: 'missingUnit', params: { units: [...units] } });
     },
   };
 }
@@ -148,6 +138,6 @@ export const refrigerant: CellReader<string> = {
   read: (cell, { knowsRefrigerant }) => {
     const designation = knowsRefrigerant(cell);
     if (designation !== undefined) return { ok: true, value: designation };
-    return refuse(`${quote(cell)} is not a known refrigerant; write its full designation, such as R-448A.`);
+    return refuse({ code: 'unknownRefrigerant', params: { text: quoted(cell) } });
   },
 };

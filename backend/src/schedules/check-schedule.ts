@@ -1,8 +1,10 @@
+import type { ScheduleReason } from '#shared/contracts/schedule-reasons';
 import { toSi } from '#shared/units/convert';
 import type { FoundColumn } from './find-columns';
-import { SCHEDULE_COLUMNS, type ColumnId } from './schedule-columns';
+import type { ColumnId } from './schedule-columns';
 import type { ScheduleProblems } from './schedule-problems';
 import {
+  missingValue,
   missingValues,
   type CircuitPart,
   type Part,
@@ -14,49 +16,44 @@ import {
 const WARMEST_LOW_EVAPORATING_K = toSi(-5, 'degC');
 const COLDEST_MEDIUM_EVAPORATING_K = toSi(-30, 'degC');
 
+const OUT_OF_CLASS = { low: 'tooWarmForLow', medium: 'tooColdForMedium', high: 'tooColdForHigh' } as const;
+
 /** A suction at the dew point may lie above a blend's mean evaporating temperature by half its glide. */
 const HALF_A_GLIDE_K = 4;
 const ROUNDING_K = toSi(0.5, 'degF_diff');
 
 /** Names a problem at the line that a part's value was taken from. */
-type Complain = (part: Part, id: ColumnId, reason: string) => void;
+type Complain = (part: Part, id: ColumnId, reason: ScheduleReason) => void;
 
 function checkSuperheat(fixture: Part, complain: Complain): void {
   const { superheatLow, superheatHigh } = fixture.values;
   if (superheatLow === undefined || superheatHigh === undefined || superheatLow < superheatHigh) return;
-  complain(fixture, 'superheatHigh', 'The high superheat is not above the low one; correct the band.');
+  complain(fixture, 'superheatHigh', { code: 'superheatBandEmpty', params: {} });
 }
 
 function checkTemperatures(fixture: Part, circuit: CircuitPart, complain: Complain): void {
   const { evaporatingTemperature: evaporating, dischargeAirTemperature: air } = fixture.values;
   if (evaporating === undefined) return;
-  if (air !== undefined && air <= evaporating) {
-    const reason = 'Discharge air can not be as cold as the evaporating temperature; correct one of the two.';
-    complain(fixture, 'dischargeAirTemperature', reason);
-  }
+  if (air !== undefined && air <= evaporating)
+    complain(fixture, 'dischargeAirTemperature', { code: 'dischargeAirTooCold', params: {} });
   const { temperatureClass } = circuit.values;
   if (temperatureClass === undefined) return;
-  const isLow = temperatureClass === 'low';
-  const contradicts = isLow
-    ? evaporating > WARMEST_LOW_EVAPORATING_K
-    : evaporating < COLDEST_MEDIUM_EVAPORATING_K;
-  if (!contradicts) return;
-  const reason = `Too ${isLow ? 'warm' : 'cold'} for a ${temperatureClass}-temperature circuit; correct this or the class.`;
-  complain(fixture, 'evaporatingTemperature', reason);
+  const contradicts =
+    temperatureClass === 'low'
+      ? evaporating > WARMEST_LOW_EVAPORATING_K
+      : evaporating < COLDEST_MEDIUM_EVAPORATING_K;
+  if (contradicts)
+    complain(fixture, 'evaporatingTemperature', { code: OUT_OF_CLASS[temperatureClass], params: {} });
 }
 
 function checkDefrost(circuit: CircuitPart, complain: Complain): void {
   const { defrostType, defrostsPerDay } = circuit.values;
   if (defrostsPerDay === undefined) return;
   if (defrostType === 'none' && defrostsPerDay > 0) {
-    complain(circuit, 'defrostsPerDay', 'There is no defrost; write 0 here, or correct the defrost type.');
+    complain(circuit, 'defrostsPerDay', { code: 'defrostsWithoutDefrost', params: {} });
   }
   if (defrostType !== 'none' && defrostsPerDay === 0) {
-    complain(
-      circuit,
-      'defrostsPerDay',
-      'No defrosts a day; write how many there are, or "none" as the defrost type.',
-    );
+    complain(circuit, 'defrostsPerDay', { code: 'defrostWithoutDefrosts', params: {} });
   }
 }
 
@@ -67,9 +64,7 @@ function checkSuction(group: SuctionGroupPart, complain: Complain): void {
     const { evaporatingTemperature, evaporatingBasis } = fixture.values;
     const allowance = evaporatingBasis === 'mean' ? HALF_A_GLIDE_K : ROUNDING_K;
     if (evaporatingTemperature === undefined || evaporatingTemperature >= suction - allowance) continue;
-    const reason =
-      'Colder than the saturated suction temperature of its suction group; correct one of the two.';
-    complain(fixture, 'evaporatingTemperature', reason);
+    complain(fixture, 'evaporatingTemperature', { code: 'colderThanSuction', params: {} });
   }
 }
 
@@ -94,7 +89,7 @@ export function checkSchedule(
   for (const part of [...systems, ...groups, ...circuits, ...fixtures]) {
     for (const id of missingValues(part)) {
       // A missing column is named once, in the line of headings.
-      if (columns.has(id)) complain(part, id, `${SCHEDULE_COLUMNS[id].label} is missing; fill in the cell.`);
+      if (columns.has(id)) complain(part, id, missingValue(id));
     }
   }
   for (const group of groups) checkSuction(group, complain);

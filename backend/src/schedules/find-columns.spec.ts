@@ -1,4 +1,5 @@
 import { describe, expect, it } from '@jest/globals';
+import { NEEDED_COLUMN_IDS } from '#shared/contracts/schedule-reasons';
 import { recogniseHeading } from './find-columns';
 import { COLUMN_IDS, SCHEDULE_COLUMNS } from './schedule-columns';
 import { bare } from './schedule-words';
@@ -28,6 +29,12 @@ describe('recogniseHeading', () => {
       expect(recogniseHeading(heading)).toBeUndefined();
     },
   );
+
+  it('needs the columns that the contract names, and no others', () => {
+    expect(COLUMN_IDS.filter((id) => SCHEDULE_COLUMNS[id].isNeeded).sort()).toEqual(
+      [...NEEDED_COLUMN_IDS].sort(),
+    );
+  });
 
   it('knows every spelling for one column only', () => {
     for (const id of COLUMN_IDS) {

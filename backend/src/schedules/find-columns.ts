@@ -1,7 +1,7 @@
 import { parseUnit } from '#shared/units/parse-unit';
-import { UNITS, type UnitId } from '#shared/units/unit';
-import { COLUMN_IDS, SCHEDULE_COLUMNS, type ColumnId } from './schedule-columns';
-import { either, quote, type ScheduleProblems } from './schedule-problems';
+import type { UnitId } from '#shared/units/unit';
+import { COLUMN_IDS, isNeededColumn, SCHEDULE_COLUMNS, type ColumnId } from './schedule-columns';
+import { quoted, type ScheduleProblems } from './schedule-problems';
 import { bare } from './schedule-words';
 
 /** Where a column stands in the file. */
@@ -66,17 +66,20 @@ function unitOf(
   const measure = measureOf(recognised.id);
   if (!measure || recognised.unitText === '') return { unit: undefined, hasUnknownUnit: false };
   const unit = parseUnit(recognised.unitText, measure.dimension);
-  const units = either(measure.units.map((id) => UNITS[id].symbol));
-  if (!unit)
-    problems.add(row, heading, `The unit ${quote(recognised.unitText)} is not known here; write ${units}.`);
+  if (!unit) {
+    const params = { text: quoted(recognised.unitText), units: [...measure.units] };
+    problems.add(row, heading, { code: 'unknownUnit', params });
+  }
   return { unit, hasUnknownUnit: unit === undefined };
 }
 
-/** Headings listed in a sentence; a file that is no schedule can have thousands. */
+/** Headings listed where one is missing; a file that is no schedule can have thousands. */
 const MOST_LISTED = 40;
 
-const listed = (headings: readonly string[]): string =>
-  headings.slice(0, MOST_LISTED).map(quote).join(', ') + (headings.length > MOST_LISTED ? ', …' : '');
+const listed = (headings: readonly string[]): { found: string[]; moreCount: number } => ({
+  found: headings.slice(0, MOST_LISTED).map(quoted),
+  moreCount: Math.max(0, headings.length - MOST_LISTED),
+});
 
 /**
  * Finds the columns of a schedule by the headings.
@@ -100,13 +103,8 @@ export function findColumns(
       return;
     }
     const other = columns.get(recognised.id);
-    const { label } = SCHEDULE_COLUMNS[recognised.id];
     if (other) {
-      problems.add(
-        row,
-        heading,
-        `${quote(other.heading)} is read as ${label} too; rename or remove one of the two.`,
-      );
+      problems.add(row, heading, { code: 'sameColumn', params: { other: quoted(other.heading) } });
       return;
     }
     columns.set(recognised.id, {
@@ -118,13 +116,9 @@ export function findColumns(
   });
   const found = listed(headings.filter((heading) => heading !== ''));
   for (const id of COLUMN_IDS) {
-    const { isNeeded, label } = SCHEDULE_COLUMNS[id];
-    if (!isNeeded || columns.has(id)) continue;
-    problems.add(
-      row,
-      null,
-      `The column ${quote(label)} is missing; add it. The headings found are: ${found}.`,
-    );
+    if (!isNeededColumn(id) || columns.has(id)) continue;
+    const params = { column: id, heading: SCHEDULE_COLUMNS[id].label, ...found };
+    problems.add(row, null, { code: 'missingColumn', params });
   }
   return { columns, ignored };
 }

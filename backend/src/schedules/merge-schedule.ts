@@ -1,3 +1,4 @@
+import type { Level } from '#shared/plant/words';
 import { canonicalJson } from '#shared/sequences/canonical-json';
 import type { CircuitEntity } from '../plant/circuit.entity';
 import type { CoilEntity } from '../plant/coil.entity';
@@ -38,6 +39,7 @@ export function mergeSchedule(
   const out: Lists = { systems: [], suctionGroups: [], circuits: [], fixtures: [], coils: [] };
   const find = finders(known);
   let circuitOrdinal = 0;
+  let groupCount = 0;
   for (const [systemOrdinal, { suctionGroups, ...facts }] of schedule.systems.entries()) {
     const system = {
       ...owner,
@@ -47,18 +49,29 @@ export function mergeSchedule(
       removedAt: null,
     };
     out.systems.push(system);
+    addLevel(
+      out,
+      owner,
+      { level: 'system', system, group: null, ordinal: FIRST_SYSTEM + systemOrdinal },
+      find,
+      newId,
+    );
     for (const [groupOrdinal, { circuits, ...groupFacts }] of suctionGroups.entries()) {
-      const id = find.suctionGroup(system.id, groupFacts.name)?.id ?? newId();
-      out.suctionGroups.push({
+      const group = {
         ...owner,
-        id,
+        id: find.suctionGroup(system.id, groupFacts.name)?.id ?? newId(),
         systemId: system.id,
         ...groupFacts,
         ordinal: groupOrdinal,
         removedAt: null,
-      });
+      };
+      out.suctionGroups.push(group);
+      const ordinal = FIRST_GROUP + groupCount;
+      addLevel(out, owner, { level: 'suctionGroup', system, group, ordinal }, find, newId);
+      groupCount += 1;
       for (const circuit of circuits) {
-        addCircuit(out, owner, { ...circuit, suctionGroupId: id, ordinal: circuitOrdinal }, find, newId);
+        const place = { systemId: system.id, suctionGroupId: group.id, ordinal: circuitOrdinal };
+        addCircuit(out, owner, { ...circuit, ...place }, find, newId);
         circuitOrdinal += 1;
       }
     }
@@ -80,12 +93,10 @@ function factsByCircuit(rows: PlantRows): ReadonlyMap<string, string> {
   const systems = new Map(rows.systems.map((system) => [system.id, system]));
   const parts = new Map<string, unknown[]>();
   for (const circuit of rows.circuits) {
-    const group = groups.get(circuit.suctionGroupId);
+    const group = groups.get(circuit.suctionGroupId ?? '');
     const { revision: _revision, ordinal: _ordinal, assigneeId: _assignee, ...facts } = circuit;
     const { ordinal: _groupOrdinal, ...groupFacts } = group ?? { ordinal: 0 };
-    const { ordinal: _systemOrdinal, ...systemFacts } = (group && systems.get(group.systemId)) ?? {
-      ordinal: 0,
-    };
+    const { ordinal: _systemOrdinal, ...systemFacts } = systems.get(circuit.systemId) ?? { ordinal: 0 };
     parts.set(circuit.id, [facts, groupFacts, systemFacts]);
   }
   for (const { ordinal: _ordinal, ...fixture } of standing(rows.fixtures))
@@ -109,16 +120,21 @@ function standing<T extends { readonly removedAt: Date | null }>(rows: readonly 
 function addCircuit(
   out: Lists,
   owner: Owner,
-  parsed: ParsedCircuit & { readonly suctionGroupId: string; readonly ordinal: number },
+  parsed: ParsedCircuit & {
+    readonly systemId: string;
+    readonly suctionGroupId: string;
+    readonly ordinal: number;
+  },
   find: ReturnType<typeof finders>,
   newId: () => string,
 ): void {
   const { fixtures, defrost, ...facts } = parsed;
-  const before = find.circuit(facts.code);
+  const before = find.circuit('circuit', facts.code);
   const id = before?.id ?? newId();
   const row: CircuitEntity = {
     ...owner,
     id,
+    level: 'circuit',
     ...facts,
     defrostType: defrost.type,
     defrostPerDay: defrost.perDay,
@@ -132,6 +148,51 @@ function addCircuit(
   out.circuits.push(row);
   for (const [ordinal, fixture] of fixtures.entries())
     addFixture(out, owner, id, fixture, ordinal, find, newId);
+}
+
+// The work of systems and groups comes before all circuits in every list, in this order.
+const FIRST_SYSTEM = -200_000;
+const FIRST_GROUP = -100_000;
+
+/** The row for the work of a whole system or suction group. Groups of two systems may share a name. */
+function addLevel(
+  out: Lists,
+  owner: Owner,
+  at: {
+    readonly level: 'system' | 'suctionGroup';
+    readonly system: SystemEntity;
+    readonly group: SuctionGroupEntity | null;
+    readonly ordinal: number;
+  },
+  find: ReturnType<typeof finders>,
+  newId: () => string,
+): void {
+  const { level, system, group, ordinal } = at;
+  const code = group ? `${system.name} ${group.name}` : system.name;
+  const before = find.circuit(level, code);
+  out.circuits.push({
+    ...owner,
+    id: before?.id ?? newId(),
+    level,
+    systemId: system.id,
+    suctionGroupId: group?.id ?? null,
+    code,
+    description: '',
+    area: '',
+    temperatureClass: group?.temperatureClass ?? 'medium',
+    feed: 'homeRun',
+    control: 'evaporatorPressureRegulator',
+    loadW: null,
+    defrostType: 'none',
+    defrostPerDay: 0,
+    defrostFailSafeS: null,
+    defrostTerminationTemperatureK: null,
+    defrostDripS: null,
+    assigneeId: before?.assigneeId ?? null,
+    ordinal,
+    revision: before?.revision ?? 0,
+    removedAt: null,
+  });
 }
 
 function addFixture(
@@ -162,13 +223,13 @@ function finders(known: PlantRows) {
     new Map(rows.map((row) => [key(row), row]));
   const systems = index(known.systems, (row) => row.name);
   const groups = index(known.suctionGroups, (row) => `${row.systemId} ${row.name}`);
-  const circuits = index(known.circuits, (row) => row.code);
+  const circuits = index(known.circuits, (row) => `${row.level} ${row.code}`);
   const fixtures = index(known.fixtures, (row) => `${row.circuitId} ${row.tag}`);
   const coils = index(known.coils, (row) => `${row.fixtureId} ${row.number}`);
   return {
     system: (name: string) => systems.get(name),
     suctionGroup: (systemId: string, name: string) => groups.get(`${systemId} ${name}`),
-    circuit: (code: string) => circuits.get(code),
+    circuit: (level: Level, code: string) => circuits.get(`${level} ${code}`),
     fixture: (circuitId: string, tag: string) => fixtures.get(`${circuitId} ${tag}`),
     coil: (fixtureId: string, number: number) => coils.get(`${fixtureId} ${number}`),
   };

@@ -2,7 +2,7 @@ import type { CellReading, CellSurroundings } from './cell-readers';
 import type { FoundColumn } from './find-columns';
 import type { TableRow } from './read-table';
 import { SCHEDULE_COLUMNS, type ColumnId, type ColumnValues } from './schedule-columns';
-import { quote, type ScheduleProblems } from './schedule-problems';
+import { quoted, type ScheduleProblems } from './schedule-problems';
 
 /** One line of the schedule with what its cells say. */
 export interface ScheduleRow {
@@ -45,9 +45,10 @@ export function readRows(
     const reading: CellReading<unknown> = reader.read(cell, { ...surroundings, unit: found.unit });
     if (reading.ok) return reading;
     // A missing unit is put right in one place, the heading, so it is named once for the whole column.
-    const isNamed = reading.lacksUnit && (found.hasUnknownUnit || withoutUnit.has(found.id));
+    const lacksUnit = reading.reason.code === 'missingUnit';
+    const isNamed = lacksUnit && (found.hasUnknownUnit || withoutUnit.has(found.id));
     if (!isNamed) problems.add(line, found.heading, reading.reason);
-    if (reading.lacksUnit) withoutUnit.add(found.id);
+    if (lacksUnit) withoutUnit.add(found.id);
     return reading;
   };
 
@@ -62,10 +63,8 @@ export function readRows(
       else unreadable.add(found.id);
     }
     const stray = cells.slice(width).find((cell) => cell !== '');
-    if (stray !== undefined) {
-      const reason = `${quote(stray)} stands beyond the last heading; put a text with a delimiter into quotation marks.`;
-      problems.add(line, null, reason);
-    }
+    if (stray !== undefined)
+      problems.add(line, null, { code: 'beyondLastHeading', params: { text: quoted(stray) } });
     return { line, values: values as Partial<ColumnValues>, unreadable };
   });
 }

@@ -1,4 +1,5 @@
 import { CsvError, parse, type InfoRecord } from 'csv-parse/sync';
+import type { ScheduleReason } from '#shared/contracts/schedule-reasons';
 import { decodeText } from './decode-text';
 import { countHeadings } from './find-columns';
 
@@ -32,7 +33,7 @@ export type TableReading =
       readonly ok: false;
       readonly code: 'notATable' | 'tooLarge';
       readonly row: number;
-      readonly reason: string;
+      readonly reason: ScheduleReason;
     };
 
 const DELIMITERS = [',', ';', '\t'] as const;
@@ -47,7 +48,7 @@ const HEAD_LENGTH = 65_536;
 const refuse = (
   code: 'notATable' | 'tooLarge',
   row: number,
-  reason: string,
+  reason: ScheduleReason,
 ): TableReading & { ok: false } => ({
   ok: false,
   code,
@@ -117,30 +118,22 @@ export function readTable(bytes: Uint8Array): TableReading {
   const { text } = decoded;
   const { delimiter, line, recognised } = findHeadings(text);
   if (recognised === 0) {
-    const reason =
-      'No heading of a schedule was found, such as System, Circuit or Fixture tag; add a line of headings.';
-    return refuse('notATable', 1, reason);
+    return refuse('notATable', 1, { code: 'noHeadings', params: {} });
   }
   const parsed = parseRows(text, delimiter, MOST_RECORDS);
   if (parsed.brokenAt !== undefined) {
-    const reason =
-      'A quotation mark is opened on this line and never closed, so cells run together; close or remove it.';
-    return refuse('notATable', parsed.brokenAt, reason);
+    return refuse('notATable', parsed.brokenAt, { code: 'openQuotationMark', params: {} });
   }
   const [headings, ...rows] = parsed.rows.filter((row) => row.line >= line);
   if (!headings || rows.length === 0) {
-    return refuse('notATable', line, 'There are only headings; add one line for each fixture.');
+    return refuse('notATable', line, { code: 'onlyHeadings', params: {} });
   }
   if (headings.cells.length > MOST_COLUMNS) {
-    return refuse(
-      'tooLarge',
-      line,
-      `There are more than ${MOST_COLUMNS} columns; remove those that are no part of it.`,
-    );
+    return refuse('tooLarge', line, { code: 'tooManyColumns', params: { upTo: MOST_COLUMNS } });
   }
   if (rows.length > MOST_ROWS || parsed.records >= MOST_RECORDS) {
-    const reason = `There are more than ${MOST_ROWS} lines; import one store at a time and remove blank lines.`;
-    return refuse('tooLarge', rows[MOST_ROWS]?.line ?? line, reason);
+    const row = rows[MOST_ROWS]?.line ?? line;
+    return refuse('tooLarge', row, { code: 'tooManyRows', params: { upTo: MOST_ROWS } });
   }
   return { ok: true, headings, rows, delimiter };
 }

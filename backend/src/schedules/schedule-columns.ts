@@ -1,3 +1,8 @@
+import {
+  NEEDED_COLUMN_IDS,
+  type NeededColumnId,
+  type ScheduleLevel,
+} from '#shared/contracts/schedule-reasons';
 import { quantity, refrigerant, text, wholeNumber, word, type CellReader } from './cell-readers';
 import {
   CONTROL_WORDS,
@@ -11,7 +16,7 @@ import {
 } from './schedule-words';
 
 /** What a column describes; below a fixture's own columns, cells repeat or are left blank on the following lines. */
-export type ColumnLevel = 'system' | 'suctionGroup' | 'circuit' | 'fixture';
+export type ColumnLevel = ScheduleLevel;
 
 /** One column that a schedule is read for. */
 export interface ScheduleColumn<V> {
@@ -297,3 +302,7 @@ export type ColumnValues = {
 };
 
 export const COLUMN_IDS = Object.keys(SCHEDULE_COLUMNS) as ColumnId[];
+
+/** Whether the schedule is refused without this column. */
+export const isNeededColumn = (id: ColumnId): id is NeededColumnId =>
+  NEEDED_COLUMN_IDS.some((needed) => needed === id);

@@ -45,6 +45,10 @@ export function scheduleOf(reading: ReturnType<typeof parseSchedule>): ParsedSch
 /** The problems, empty when the schedule was read. */
 export const problemsOf = (reading: ReturnType<typeof parseSchedule>) => (reading.ok ? [] : reading.problems);
 
+/** The same problems without their sentences. */
+export const reasonsOf = (reading: ReturnType<typeof parseSchedule>) =>
+  problemsOf(reading).map(({ row, column, reason }) => ({ row, column, ...reason }));
+
 export const circuitsOf = (schedule: ParsedSchedule): ParsedCircuit[] =>
   schedule.systems.flatMap(({ suctionGroups }) => suctionGroups.flatMap(({ circuits }) => circuits));
 

@@ -51,7 +51,8 @@ function check(bytes: Uint8Array, lines?: number): void {
   for (const problem of reading.problems) {
     expect(scheduleProblemSchema.safeParse(problem).success).toBe(true);
     expect(problem.row).toBeGreaterThanOrEqual(1);
-    expect(problem.reason).toMatch(/\.$/);
+    expect(problem.message).toMatch(/\.$/);
+    expect(problem.message).not.toMatch(/undefined|NaN|\[object/);
   }
 }
 

@@ -5,7 +5,7 @@ import { findColumns } from './find-columns';
 import type { ScheduleReading } from './parsed-schedule';
 import { readRows } from './read-rows';
 import { readTable } from './read-table';
-import { ScheduleProblems } from './schedule-problems';
+import { problemOf, ScheduleProblems } from './schedule-problems';
 import { ScheduleTree } from './schedule-tree';
 
 const designationOf = (text: string): string | undefined => findRefrigerant(text)?.designation;
@@ -28,7 +28,7 @@ export function parseSchedule(
     return {
       ok: false,
       code: table.code,
-      problems: [{ row: table.row, column: null, reason: table.reason }],
+      problems: [problemOf(table.row, null, table.reason)],
     };
   }
   const { headings, rows, delimiter } = table;

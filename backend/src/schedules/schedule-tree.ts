@@ -1,13 +1,15 @@
+import type { NeededColumnId, ScheduleReason } from '#shared/contracts/schedule-reasons';
 import type { FoundColumn } from './find-columns';
 import type { ScheduleRow } from './read-rows';
 import {
   COLUMN_IDS,
+  isNeededColumn,
   SCHEDULE_COLUMNS,
   type ColumnId,
   type ColumnLevel,
   type ColumnValues,
 } from './schedule-columns';
-import { quote, type ScheduleProblems } from './schedule-problems';
+import { quoted, type ScheduleProblems } from './schedule-problems';
 
 /** A part of the plant as put together from the lines that speak of it. */
 export interface Part {
@@ -48,13 +50,6 @@ const NAME_COLUMNS = {
   suctionGroup: 'suctionGroup',
   circuit: 'circuit',
   fixture: 'fixtureTag',
-} as const;
-
-const WORDS = {
-  system: 'system',
-  suctionGroup: 'suction group',
-  circuit: 'circuit',
-  fixture: 'fixture',
 } as const;
 
 /** Names differing in capitals or accents only are one name to people, and to the database. */
@@ -134,10 +129,8 @@ export class ScheduleTree {
     if (row.unreadable.has(id)) return undefined;
     const name = row.values[id] ?? above?.name;
     // A missing column is named once, in the line of headings, and so is the first of several lines without a place.
-    if (name === undefined && !this.isLost && this.columns.has(id)) {
-      const reason = `The ${WORDS[level]} is missing, and the line above has none to take over; fill in the cell.`;
-      this.problems.add(row.line, this.heading(id), reason);
-    }
+    if (name === undefined && !this.isLost && this.columns.has(id))
+      this.problems.add(row.line, this.heading(id), { code: 'missingName', params: { level } });
     return name;
   }
 
@@ -172,10 +165,13 @@ export class ScheduleTree {
     if (code === undefined) return undefined;
     const known = this.circuits.get(keyOf(code));
     if (known && known.group !== group) {
-      const reason =
-        `The circuit ${quote(code)} stands in suction group ${quote(known.group.name)} of system ` +
-        `${quote(known.group.system.name)} on line ${known.line}; give this one another code, or correct its suction group.`;
-      this.problems.add(row.line, this.heading('circuit'), reason);
+      const params = {
+        circuit: quoted(code),
+        suctionGroup: quoted(known.group.name),
+        system: quoted(known.group.system.name),
+        row: known.line,
+      };
+      this.problems.add(row.line, this.heading('circuit'), { code: 'circuitElsewhere', params });
       return undefined;
     }
     if (known) return known;
@@ -189,16 +185,13 @@ export class ScheduleTree {
     const tag = row.values.fixtureTag;
     if (tag === undefined) {
       const isNamed = row.unreadable.has('fixtureTag') || !this.columns.has('fixtureTag');
-      const reason = 'The fixture tag is missing; fill in the cell.';
-      if (!isNamed) this.problems.add(row.line, this.heading('fixtureTag'), reason);
+      if (!isNamed) this.problems.add(row.line, this.heading('fixtureTag'), missingValue('fixtureTag'));
       return;
     }
     const known = this.fixtures.get(keyOf(tag));
     if (known) {
-      const reason =
-        `The fixture tag ${quote(tag)} is used on line ${known.line} already; give each fixture, and each part of one on ` +
-        'two circuits, its own tag.';
-      this.problems.add(row.line, this.heading('fixtureTag'), reason);
+      const params = { text: quoted(tag), row: known.line };
+      this.problems.add(row.line, this.heading('fixtureTag'), { code: 'fixtureTagTwice', params });
       return;
     }
     const fixture = part('fixture', tag, row.line);
@@ -222,19 +215,20 @@ export class ScheduleTree {
       target.values[id] = value;
       target.lines.set(id, row.line);
     } else if (!isSame(target.values[id], value)) {
-      const what = `the ${WORDS[target.level]} ${quote(target.name)}`;
-      const reason = `Line ${from} says something else about ${what}; write the same on all its lines, or leave this blank.`;
-      this.problems.add(row.line, this.heading(id), reason);
+      const params = { row: from, level: target.level, name: quoted(target.name) };
+      this.problems.add(row.line, this.heading(id), { code: 'rowsDisagree', params });
     }
   }
 }
 
 /** @returns the needed columns of a part on which none of its lines says anything */
-export const missingValues = ({ level, values, unreadable }: Part): ColumnId[] =>
-  COLUMNS_OF[level].filter(
-    (id) =>
-      SCHEDULE_COLUMNS[id].isNeeded &&
-      id !== NAME_COLUMNS[level] &&
-      values[id] === undefined &&
-      !unreadable.has(id),
-  );
+export const missingValues = ({ level, values, unreadable }: Part): NeededColumnId[] =>
+  COLUMNS_OF[level]
+    .filter(isNeededColumn)
+    .filter((id) => id !== NAME_COLUMNS[level] && values[id] === undefined && !unreadable.has(id));
+
+/** @returns what is said where a needed cell is blank */
+export const missingValue = (column: NeededColumnId): ScheduleReason => ({
+  code: 'missingValue',
+  params: { column, heading: SCHEDULE_COLUMNS[column].label },
+});

@@ -8,6 +8,8 @@ import type { Context, Transactions } from '../database/transactions';
 import type { LiveEventsService } from '../events/live-events.service';
 import type { OpeningsService } from '../openings/openings.service';
 import type { PlantService } from '../plant/plant.service';
+import { designationKnownTo } from '../refrigerants/company-tables';
+import type { RefrigerantsService } from '../refrigerants/refrigerants.service';
 import type { ExpansionService } from '../sequences/expansion.service';
 import { mergeSchedule } from './merge-schedule';
 import type { ParsedSchedule } from './parsed-schedule';
@@ -19,6 +21,7 @@ export class SchedulesService {
     private readonly transactions: Transactions,
     private readonly openings: OpeningsService,
     private readonly plant: PlantService,
+    private readonly refrigerants: RefrigerantsService,
     private readonly expansion: ExpansionService,
     private readonly audit: AuditService,
     private readonly events: LiveEventsService,
@@ -30,13 +33,16 @@ export class SchedulesService {
    * @throws {DomainFailure} notATable, tooLarge, scheduleRefused; `facts.rows` names row, column and reason of each
    */
   async import(person: Person, openingId: OpeningId, bytes: Buffer, store: boolean): Promise<ScheduleImport> {
-    const reading = parseSchedule(bytes);
+    const { outside } = this.transactions;
+    const { companyId } = await this.openings.find(outside, openingId);
+    const tables = await this.refrigerants.inUse(outside, companyId);
+    const reading = parseSchedule(bytes, designationKnownTo(tables));
     if (!reading.ok) {
       const [first] = reading.problems;
       throw new DomainFailure(
         reading.code,
         reading.problems.length === 1 && first
-          ? first.reason
+          ? first.message
           : `The schedule has ${reading.problems.length} problems. Nothing was stored.`,
         [],
         { rows: reading.problems },

@@ -33,14 +33,18 @@ const importFile = (bytes: Buffer, store_ = true) =>
     'schedule.csv',
   );
 
-const circuits = async (): Promise<CircuitRow[]> =>
+/** Everything that is worked on: what stands for a system or a suction group too. */
+const listed = async (): Promise<CircuitRow[]> =>
   (await lead.get(`/api/openings/${store.openingId}/circuits?limit=200`)).body.items as CircuitRow[];
+
+const circuits = async (): Promise<CircuitRow[]> =>
+  (await listed()).filter(({ level }) => level === 'circuit');
 
 const edited = (change: (text: string) => string): Buffer =>
   Buffer.from(change(SMALL_SCHEDULE.toString('utf8')));
 
 describe('POST /openings/:openingId/schedule-imports', () => {
-  it('stores the whole schedule of the demo store, with a sequence for each circuit', async () => {
+  it('stores the whole schedule of the demo store, with a sequence for each system, group and circuit', async () => {
     const { status, body } = await importFile(harborStreetSchedule());
     expect(status).toBe(200);
     expect(body).toMatchObject({
@@ -51,9 +55,18 @@ describe('POST /openings/:openingId/schedule-imports', () => {
       circuits: 82,
       fixtures: 150,
     });
-    expect(body.sequences).toBe(82);
-    const rows = await circuits();
-    expect(rows.map((row) => row.code).slice(0, 3)).toEqual(['A1', 'A2', 'A3']);
+    expect(body.sequences).toBe(2 + 5 + 82);
+    const rows = await listed();
+    expect(rows.map((row) => row.code).slice(0, 8)).toEqual([
+      'Rack A',
+      'Rack B',
+      'Rack A AS-1',
+      'Rack A AS-2',
+      'Rack A AS-3',
+      'Rack B BS-1',
+      'Rack B BS-2',
+      'A1',
+    ]);
     expect(rows.every((row) => row.stepsTotal >= 8 && row.state === 'open')).toBe(true);
   });
 
@@ -94,8 +107,14 @@ describe('POST /openings/:openingId/schedule-imports', () => {
   it('names row, column and reason of each problem', async () => {
     const bytes = edited((text) => text.replace('Deli case,Deli,20,29', 'Deli case,Deli,twenty,29'));
     const { body } = await importFile(bytes);
+    expect(body.detail).toBe('"twenty" is not a number; write digits only, such as 12.5.');
     expect(body.facts.rows).toEqual([
-      { row: 4, column: 'Evap temp (°F)', reason: expect.stringContaining('twenty') },
+      {
+        row: 4,
+        column: 'Evap temp (°F)',
+        reason: { code: 'notANumber', params: { text: 'twenty' } },
+        message: '"twenty" is not a number; write digits only, such as 12.5.',
+      },
     ]);
   });
 

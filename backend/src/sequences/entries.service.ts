@@ -12,9 +12,12 @@ import { isDuplicate, type Context, type Transactions } from '../database/transa
 import type { LiveEventsService } from '../events/live-events.service';
 import type { PeopleService } from '../people/people.service';
 import { appendToChain, foldColumns, type AppendedEntry } from './chain-appending';
-import { storedResult } from './entry-results';
+import { refusedResult, storedResult, type RefusalCode } from './entry-results';
 import type { LockedSequence, SequencesRepository } from './sequences.repository';
 import type { StepLists } from './step-lists';
+
+type Checked =
+  { readonly ok: true; readonly body: EntryBody } | { readonly ok: false; readonly result: EntryResult };
 
 interface Item {
   readonly index: number;
@@ -46,13 +49,12 @@ export class EntriesService {
     const ownDevices = new Set<string>(caller.deviceId ? [caller.deviceId] : []);
     for (const [index, sent] of batch.entries()) {
       const checked = await this.check(caller, sent, ownDevices);
-      if (typeof checked === 'string')
-        results[index] = { result: 'refused', id: idOf(sent.body), reason: checked };
-      else
-        bySequence.set(checked.sequenceId, [
-          ...(bySequence.get(checked.sequenceId) ?? []),
-          item(index, checked, sent),
-        ]);
+      if (!checked.ok) results[index] = checked.result;
+      else {
+        const { sequenceId } = checked.body;
+        const others = bySequence.get(sequenceId) ?? [];
+        bySequence.set(sequenceId, [...others, item(index, checked.body, sent)]);
+      }
     }
     for (const [sequenceId, items] of bySequence) {
       for (const [index, result] of await this.appendToSequence(caller, sequenceId, items))
@@ -65,26 +67,23 @@ export class EntriesService {
     caller: Caller,
     sent: { readonly body?: unknown; readonly bodyHash: string },
     ownDevices: Set<string>,
-  ): Promise<EntryBody | string> {
+  ): Promise<Checked> {
+    const refuse = (code: RefusalCode, path?: string): Checked => ({
+      ok: false,
+      result: refusedResult(idOf(sent.body), code, path ? { path } : {}),
+    });
     const parsed = entryBodySchema.safeParse(sent.body);
-    if (!parsed.success) {
-      const issue = parsed.error.issues[0];
-      return `It is not an entry as documented: ${issue?.path.join('.')} ${issue?.message}`;
-    }
+    if (!parsed.success) return refuse('notAnEntry', parsed.error.issues[0]?.path.join('.'));
     const body = parsed.data;
-    if (bodyHash(body) !== sent.bodyHash)
-      return 'Its content does not match its hash: it was changed on the way.';
-    if (body.authorId !== caller.person.id) return 'It was recorded by somebody else than who sends it.';
-    if (body.deviceId === null || body.content.kind === 'expansion' || body.content.kind === 'review') {
-      return 'Only the server makes entries of this kind.';
-    }
+    if (bodyHash(body) !== sent.bodyHash) return refuse('changedOnTheWay');
+    if (body.authorId !== caller.person.id) return refuse('otherAuthor');
+    if (body.deviceId === null || body.content.kind === 'expansion' || body.content.kind === 'review')
+      return refuse('serverOnly');
     if (!ownDevices.has(body.deviceId)) {
-      if (!(await this.people.isDeviceOf(body.deviceId, caller.person.id))) {
-        return 'It names a device that is not registered for who sends it.';
-      }
+      if (!(await this.people.isDeviceOf(body.deviceId, caller.person.id))) return refuse('unknownDevice');
       ownDevices.add(body.deviceId);
     }
-    return body;
+    return { ok: true, body };
   }
 
   private async appendToSequence(
@@ -121,10 +120,7 @@ export class EntriesService {
     for (const entry of items) {
       const row = byId.get(entry.body.id);
       if (row && row.bodyHash !== entry.bodyHash) {
-        known.push([
-          entry.index,
-          { result: 'refused', id: row.id, reason: 'Another entry has this id already.' },
-        ]);
+        known.push([entry.index, refusedResult(row.id, 'idTaken')]);
       } else if (row)
         known.push([entry.index, storedResult('alreadyStored', row, JSON.parse(row.serverPart), state)]);
       else if (!inThisBatch.has(entry.body.id)) missing.push(entry);
@@ -145,10 +141,7 @@ export class EntriesService {
     const sequence = await this.sequences.lock(context, sequenceId);
     const allowed = sequence && (await this.standingOf(context, caller, sequence));
     if (!sequence || !allowed) {
-      return items.map(({ index, body }) => [
-        index,
-        { result: 'refused', id: body.id, reason: 'There is no such sequence for you.' },
-      ]);
+      return items.map(({ index, body }) => [index, refusedResult(body.id, 'noSuchSequence')]);
     }
     const { stepList } = await this.stepLists.find(context, sequence.companyId, sequence.stepListHash);
     const { steps } = stepList;
@@ -223,7 +216,7 @@ function item(index: number, body: EntryBody, sent: { readonly bodyHash: string 
 function twinResult(known: readonly [number, EntryResult][], twin: Item): EntryResult {
   const first = known.find(([, result]) => result.id === twin.body.id)?.[1];
   if (first?.result === 'stored') return { ...first, result: 'alreadyStored' };
-  return first ?? { result: 'refused', id: twin.body.id, reason: 'It stands twice in this batch.' };
+  return first ?? refusedResult(twin.body.id, 'twiceInBatch');
 }
 
 function idOf(body: unknown): string | null {

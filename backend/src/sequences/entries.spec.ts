@@ -161,12 +161,13 @@ describe('POST /entries', () => {
     const results = (response.body as { results: EntryResult[] }).results;
     expect(response.status).toBe(200);
     expect(results.map((result) => result.result)).toEqual(['refused', 'refused', 'refused', 'stored']);
-    expect(results.map((result) => ('reason' in result ? result.reason : ''))).toEqual([
-      expect.stringContaining('not an entry as documented'),
-      expect.stringContaining('somebody else'),
-      expect.stringContaining('does not match its hash'),
-      '',
+    expect(results.map((result) => ('reason' in result ? result.reason : null))).toEqual([
+      { code: 'notAnEntry', params: { path: 'id' } },
+      { code: 'otherAuthor', params: {} },
+      { code: 'changedOnTheWay', params: {} },
+      null,
     ]);
+    expect(results[0]).toMatchObject({ message: 'It is not an entry as documented. See id.' });
   });
 
   it('refuses an entry that only the server may make', async () => {
@@ -178,7 +179,9 @@ describe('POST /entries', () => {
       signature: null,
       meaning: null,
     });
-    expect(await installer.post([forged])).toMatchObject([{ result: 'refused' }]);
+    expect(await installer.post([forged])).toMatchObject([
+      { result: 'refused', reason: { code: 'serverOnly', params: {} } },
+    ]);
   });
 
   it('tells a stranger nothing, and stores nothing', async () => {
@@ -187,7 +190,11 @@ describe('POST /entries', () => {
     const detail = await installer.sequence(a1());
     const body = stranger.answer(detail, stepOf(detail, 'note'), { kind: 'note', text: 'Hello' });
     expect(await stranger.post([body])).toMatchObject([
-      { result: 'refused', reason: 'There is no such sequence for you.' },
+      {
+        result: 'refused',
+        reason: { code: 'noSuchSequence', params: {} },
+        message: 'There is no such sequence for you.',
+      },
     ]);
     expect((await installer.sequence(a1())).entries.length).toBe(detail.entries.length);
   });

@@ -73,6 +73,26 @@ export class ExpansionService {
     return expanded.length;
   }
 
+  /**
+   * Brings a sequence that was sent back up to the schedule. An import leaves what is submitted as it is; what goes back
+   * to the installer is asked by the schedule that stands now.
+   */
+  async catchUp(
+    context: Context,
+    sequence: {
+      readonly companyId: CompanyId;
+      readonly openingId: OpeningId;
+      readonly stepListHash: string;
+    },
+    specification: CircuitSpecification | undefined,
+    authorId: PersonId,
+  ): Promise<void> {
+    const { companyId, openingId, stepListHash } = sequence;
+    const asked = await this.stepLists.find(context, companyId, stepListHash);
+    if (!specification || asked.specification.revision === specification.revision) return;
+    await this.expand(context, { companyId, openingId }, [specification], authorId);
+  }
+
   private async expandAll(
     context: Context,
     companyId: CompanyId,
@@ -131,9 +151,13 @@ function changedSteps(before: StepList, after: StepList): string[] {
     .map((step) => step.key);
 }
 
+/** Kinds that read a saturation table: a maker's newer one asks these again, and no photo or confirmation. */
+const BY_SATURATION: ReadonlySet<Step['kind']> = new Set(['superheat', 'measurement', 'trend']);
+
 function substance(step: Step, { facts }: StepList): string {
   const { title: _title, instruction: _instruction, caution: _caution, section: _section, ...rest } = step;
-  return canonicalJson({ rest, facts });
+  const { makersTable: _makersTable, ...others } = facts;
+  return canonicalJson({ rest, facts: BY_SATURATION.has(step.kind) ? facts : others });
 }
 
 function bind(document: ExpansionDocument): Expanded {

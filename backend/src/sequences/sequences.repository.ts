@@ -81,6 +81,15 @@ export class SequencesRepository {
     return row?.content ?? null;
   }
 
+  async findStepLists(
+    context: Context,
+    companyId: CompanyId,
+    hashes: readonly string[],
+  ): Promise<Pick<StepListEntity, 'hash' | 'content'>[]> {
+    if (hashes.length === 0) return [];
+    return managerOf(context).findBy(StepListEntity, { companyId, hash: In([...hashes]) });
+  }
+
   /** Content-addressed: the same steps are stored once. */
   async insertStepLists(context: Context, rows: readonly StepListEntity[]): Promise<void> {
     if (rows.length === 0) return;

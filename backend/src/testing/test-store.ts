@@ -87,7 +87,7 @@ export async function makeStore(server: TestServer, name: string): Promise<TestS
   };
 }
 
-/** Imports the small schedule; the sequences by circuit code. */
+/** Imports the small schedule; the sequences by circuit code, and those of its system and group by their names. */
 export async function importSmallSchedule(
   server: TestServer,
   store: TestStore,

@@ -2,7 +2,6 @@ import { provideHttpClient, withFetch, withInterceptors } from '@angular/common/
 import {
   ErrorHandler,
   inject,
-  Injector,
   isDevMode,
   provideAppInitializer,
   provideBrowserGlobalErrorListeners,
@@ -16,7 +15,8 @@ import {
   withInMemoryScrolling,
   withRouterConfig,
 } from '@angular/router';
-import { provideTransloco } from '@jsverse/transloco';
+import { provideTransloco, provideTranslocoTranspiler } from '@jsverse/transloco';
+import { PlainTranspiler } from '../i18n/loader/plain-transpiler';
 import { WordsLoader } from '../i18n/loader/words-loader';
 import { APP_ROUTES } from './app.routes';
 import { reachInterceptor } from './offline/reach-interceptor';
@@ -26,6 +26,7 @@ import { AppErrors } from './shell/app-errors';
 import { LanguageChoice } from './shell/language-choice';
 import { LookChoice } from './shell/look-choice';
 import { PageTitles } from './shell/page-titles';
+import { WholeApplication } from './shell/whole-application';
 
 /** What the whole application is made with. Nothing here waits for the network: a phone offline starts as well. */
 export const APP_CONFIG: ApplicationConfig = {
@@ -52,14 +53,17 @@ export const APP_CONFIG: ApplicationConfig = {
       },
       loader: WordsLoader,
     }),
+    provideTranslocoTranspiler(PlainTranspiler),
     provideAppInitializer(async () => {
-      const injector = inject(Injector);
       inject(LookChoice).apply();
-      const language = inject(LanguageChoice);
-      inject(Session).begin();
-      // Words and icons come side by side; a page without either would flicker.
-      const icons = import('./shell/icons').then(({ registerIcons }) => registerIcons(injector));
-      await Promise.all([language.begin(), icons]);
+      const session = inject(Session);
+      const whole = inject(WholeApplication);
+      session.begin();
+      const words = inject(LanguageChoice).begin();
+      // Whoever is known here is about to open a page: what it needs comes beside the first words.
+      // Should it fail, the page's guard asks again.
+      if (session.me()) whole.load().catch(() => undefined);
+      await words;
     }),
   ],
 };

@@ -2,7 +2,7 @@ import { HttpErrorResponse } from '@angular/common/http';
 import { describe, expect, it } from '@jest/globals';
 import { TimeoutError } from 'rxjs';
 import { backOff } from './back-off';
-import { deliveryFailure, refusalReason } from './delivery-failure';
+import { deliveryFailure, refusalOf } from './delivery-failure';
 
 const answer = (status: number, error: unknown = null) => new HttpErrorResponse({ status, error });
 
@@ -26,10 +26,13 @@ describe('deliveryFailure', () => {
   });
 });
 
-describe('refusalReason', () => {
-  it('is the sentence of the server', () => {
-    expect(refusalReason(answer(413, { detail: 'Too large.' }))).toBe('Too large.');
-    expect(refusalReason(answer(404))).toBe('HTTP 404');
+describe('refusalOf', () => {
+  it('is the code of the server’s problem', () => {
+    expect(refusalOf(answer(413, { code: 'tooLarge', detail: 'Too large.' }))).toEqual({
+      code: 'callRefused',
+      params: { failure: 'tooLarge' },
+    });
+    expect(refusalOf(answer(404))).toEqual({ code: 'callRefused', params: { failure: 'unknown' } });
   });
 });
 

@@ -1,4 +1,5 @@
 import { TimeoutError } from 'rxjs';
+import type { EntryRefusal } from '#shared/contracts/sequences';
 import { httpFailure, problemCode } from '../session/problem-code';
 
 /**
@@ -24,13 +25,14 @@ export function isServerFailure(error: unknown): boolean {
   return (httpFailure(error)?.status ?? 0) >= 500;
 }
 
-/** The server's sentence about why, for the person who has to deal with it. */
-export function refusalReason(error: unknown): string {
-  const failure = httpFailure(error);
-  if (!failure) return String(error);
-  const { body } = failure;
-  if (typeof body === 'object' && body !== null && 'detail' in body && typeof body.detail === 'string') {
-    return body.detail;
-  }
-  return `HTTP ${failure.status}`;
+/**
+ * Why something recorded here was not taken, as kept on the phone: the server's answer about one entry, or the code of
+ * the problem with which it turned a whole call down. Screens have the words.
+ */
+export type Refusal =
+  EntryRefusal | { readonly code: 'callRefused'; readonly params: { readonly failure: string } };
+
+/** Why a call was turned down, for the person who has to deal with it. */
+export function refusalOf(error: unknown): Refusal {
+  return { code: 'callRefused', params: { failure: problemCode(error) ?? 'unknown' } };
 }

@@ -1,6 +1,6 @@
 import { inject, Injectable } from '@angular/core';
 import type { PersonId } from '#shared/plant/ids';
-import { deliveryFailure, isServerFailure, refusalReason, type DeliveryFailure } from './delivery-failure';
+import { deliveryFailure, isServerFailure, refusalOf, type DeliveryFailure } from './delivery-failure';
 import { batchesOf } from './delivery-batches';
 import { EntriesApi } from './entries-api';
 import { Remembered } from '../session/remembered';
@@ -71,7 +71,7 @@ export class Delivery {
     const [first, ...others] = batch;
     if (!first) return 'done';
     if (others.length === 0) {
-      await this.storage.refuse(first.id, refusalReason(error));
+      await this.storage.refuse(first.id, refusalOf(error));
       return 'done';
     }
     for (const entry of batch) {
@@ -90,7 +90,7 @@ export class Delivery {
       } catch (error) {
         const failure = deliveryFailure(error);
         if (failure !== 'refused') return failure;
-        await this.storage.markPhoto(photo, 'refused', refusalReason(error), new Date().toISOString());
+        await this.storage.markPhoto(photo, 'refused', refusalOf(error), new Date().toISOString());
       }
       await progress();
     }

@@ -5,7 +5,11 @@ import type { SequenceDetail } from '#shared/contracts/sequences';
 import type { DeviceId, EntryId, PersonId, SequenceId } from '#shared/plant/ids';
 import type { EntryBody } from '#shared/sequences/entry';
 import type { FoldEntry } from '#shared/sequences/fold';
+import type { Refusal } from './delivery-failure';
 import { openDB, type DBSchema, type IDBPDatabase } from 'idb';
+
+/** Why something was refused; a sentence of the server where an earlier version of these pages kept it. */
+export type KeptRefusal = Refusal | string | null;
 
 /** An entry that the server hasn't acknowledged. `refused` stays until a person deals with it; nothing is dropped. */
 export interface OutboxEntry {
@@ -18,7 +22,7 @@ export interface OutboxEntry {
   /** As judged on this phone; the server's own is the one that counts. */
   readonly judgement: Judgement | null;
   readonly state: 'waiting' | 'refused';
-  readonly reason: string | null;
+  readonly reason: KeptRefusal;
   /** How often the server failed while this entry was with it; absent before the first time. */
   readonly serverFailures?: number;
 }
@@ -38,7 +42,7 @@ export interface LocalPhoto {
   readonly height: number;
   readonly capturedAt: string | null;
   readonly state: LocalPhotoState;
-  readonly reason: string | null;
+  readonly reason: KeptRefusal;
   readonly changedAt: string;
 }
 

@@ -3,6 +3,7 @@ import type { EntryResult } from '#shared/contracts/sequences';
 import type { EntryId, PersonId, SequenceId } from '#shared/plant/ids';
 import type { FoldEntry } from '#shared/sequences/fold';
 import { appendEntry, type NewEntry } from './append-entry';
+import type { Refusal } from './delivery-failure';
 import { LocalDatabase, type LocalPhoto, type LocalPhotoState, type OutboxEntry } from './local-database';
 
 type Stored = Extract<EntryResult, { result: 'stored' | 'alreadyStored' }>;
@@ -40,7 +41,7 @@ export class OutboxStorage {
   }
 
   /** Kept, with the reason, until a person deals with it. */
-  async refuse(id: EntryId, reason: string): Promise<void> {
+  async refuse(id: EntryId, reason: Refusal): Promise<void> {
     await this.change(id, { state: 'refused', reason });
   }
 
@@ -87,7 +88,7 @@ export class OutboxStorage {
   async markPhoto(
     photo: LocalPhoto,
     state: LocalPhotoState,
-    reason: string | null,
+    reason: Refusal | null,
     now: string,
   ): Promise<void> {
     await (await this.local.open()).put('photos', { ...photo, state, reason, changedAt: now });

@@ -60,7 +60,8 @@ class FakeServer {
 
   private take({ id, body }: OutboxEntry): EntryResult {
     if (body.content.kind === 'answer' && body.content.stepKey === this.refuses) {
-      return { result: 'refused', id, reason: 'Not yours.' };
+      const reason = { code: 'otherAuthor', params: {} } as const;
+      return { result: 'refused', id, reason, message: 'Not yours.' };
     }
     const known = this.stored.includes(id);
     if (!known) this.stored.push(id);
@@ -208,7 +209,7 @@ describe('Outbox.drain', () => {
     await outbox.drain();
     server.mode = 'here';
     await outbox.drain();
-    expect(outbox.refused().map(({ reason }) => reason)).toEqual(['Not yours.']);
+    expect(outbox.refused().map(({ reason }) => reason)).toEqual([{ code: 'otherAuthor', params: {} }]);
     expect(outbox.waitingCount()).toBe(0);
     server.refuses = null;
     await outbox.retry(outbox.refused()[0]!.id);

@@ -1,5 +1,4 @@
 import { DOCUMENT, inject, Injectable } from '@angular/core';
-import { sha256OfBytes } from '#shared/sequences/sha256';
 import { imageDimensions } from './image-dimensions';
 import {
   looksLikeImage,
@@ -8,6 +7,7 @@ import {
   SURELY_OPENED_PIXELS,
   type PhotoRefusal,
 } from './photo-size';
+import { sha256Of } from './sha256-of';
 
 const QUALITY = 0.82;
 
@@ -65,16 +65,8 @@ export class PhotoShrinker {
     const blob = await new Promise<Blob | null>((resolve) => canvas.toBlob(resolve, 'image/jpeg', QUALITY));
     if (!blob) return { ok: false, reason: 'couldNotShrink' };
     const bytes = await blob.arrayBuffer();
-    const [sha256, originalSha256] = await Promise.all([hashOf(bytes), hashOf(original)]);
+    const [sha256, originalSha256] = await Promise.all([sha256Of(bytes), sha256Of(original)]);
     const capturedAt = Number.isFinite(takenMs) && takenMs > 0 ? new Date(takenMs).toISOString() : null;
     return { ok: true, photo: { bytes, sha256, originalSha256, width, height, capturedAt } };
   }
-}
-
-/** SHA-256 by the browser where it offers that (a secure address), else by our own code: slower, the same. */
-async function hashOf(bytes: ArrayBuffer): Promise<string> {
-  const subtle = globalThis.crypto.subtle as SubtleCrypto | undefined;
-  if (!subtle) return sha256OfBytes(new Uint8Array(bytes));
-  const digest = new Uint8Array(await subtle.digest('SHA-256', bytes));
-  return [...digest].map((byte) => byte.toString(16).padStart(2, '0')).join('');
 }

@@ -8,6 +8,7 @@ import { CircuitTable } from './circuit-table';
 const row = (code: string): CircuitRow =>
   ({
     circuitId: code,
+    level: code === 'Rack A' ? 'system' : 'circuit',
     sequenceId: code === 'A3' ? null : `s-${code}`,
     code,
     description: 'Dairy',
@@ -46,6 +47,13 @@ describe('CircuitTable', () => {
     expect(text).toContain('Submitted');
     expect(text).toContain('4/9');
     expect(text).toContain('Outside');
+  });
+
+  it('says what the work of a system is where a circuit has its description', async () => {
+    fixture.componentRef.setInput('rows', [{ ...row('Rack A'), description: '', suctionGroupName: '' }]);
+    await fixture.whenStable();
+    expect(rows()[0]?.querySelector('.description')?.textContent?.trim()).toBe('System');
+    expect(rows()[0]?.querySelector('.system')?.textContent?.trim()).toBe('Rack A');
   });
 
   it('links a circuit to its sequence, and none where no checklist applies', () => {

@@ -63,6 +63,10 @@ export class CircuitsPage {
     loader: ({ params }) => this.api.people(params),
   });
   protected readonly rows = computed(() => this.read()?.items ?? []);
+  /** The work of systems and groups stands in the table, and is no circuit. */
+  protected readonly circuitCount = computed(
+    () => this.rows().filter(({ level }) => level === 'circuit').length,
+  );
   protected readonly areas = computed(() => areasOf(this.rows()));
   protected readonly assignable = computed(() =>
     (this.people.hasValue() ? this.people.value() : []).filter(({ role }) => role !== 'contractor'),

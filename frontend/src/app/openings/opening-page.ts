@@ -18,6 +18,7 @@ import { OfflineNote } from '../ui/notes/offline-note';
 import { ProblemNote } from '../ui/notes/problem-note';
 import { DaysLeft } from '../ui/pages/days-left';
 import { lastRead } from '../ui/pages/last-read';
+import { StateMark } from '../ui/state-mark/state-mark';
 import { countedKey } from '../ui/words/counted';
 import { QuantityOf } from '../ui/quantity-of';
 import { circuitTotal, stateCounts } from './opening-counts';
@@ -38,6 +39,7 @@ import { OpeningsApi } from './openings-api';
     ProblemNote,
     QuantityOf,
     RouterLink,
+    StateMark,
     TranslocoDirective,
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -69,7 +71,13 @@ export class OpeningPage {
   protected readonly mayImport = computed(() => this.may('schedule.import'));
   protected readonly mayList = computed(() => this.may('circuit.list'));
   protected readonly mayReview = computed(() => this.may('review.read'));
+  protected readonly maySeeDefrost = computed(() => this.may('defrostPlan.read'));
   protected readonly maySeePackages = computed(() => this.may('package.read'));
+
+  /** Tables are a company's: only those who work for the owner of this opening can look at the ones it works with. */
+  protected readonly maySeeRefrigerants = computed(() =>
+    this.session.may('refrigerant.read', undefined, this.opening()?.companyId),
+  );
 
   protected readonly problem = signal<unknown>(null);
 

@@ -14,6 +14,10 @@ describe('systemLines', () => {
           { circuitId: 'c2', code: 'A2', state: 'sentBack' },
           { circuitId: 'c3', code: 'A3', state: 'noSequence' },
         ],
+        work: [
+          { circuitId: 'w1', code: 'Rack A', state: 'approved', level: 'system' },
+          { circuitId: 'w2', code: 'Rack A AS-1', state: 'underWay', level: 'suctionGroup' },
+        ],
       },
     ] as unknown as OpeningDetail['systems'];
     expect(systemLines(systems)).toEqual([
@@ -29,6 +33,10 @@ describe('systemLines', () => {
         circuitIds: ['c1', 'c2', 'c3'],
         approved: 1,
         total: 2,
+        work: [
+          { circuitId: 'w1', name: 'Rack A', state: 'approved', level: 'system' },
+          { circuitId: 'w2', name: 'AS-1', state: 'underWay', level: 'suctionGroup' },
+        ],
       },
     ]);
   });

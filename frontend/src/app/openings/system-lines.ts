@@ -1,4 +1,4 @@
-import type { OpeningDetail } from '#shared/contracts/openings';
+import type { LevelWork, OpeningDetail } from '#shared/contracts/openings';
 import type { LineJoint } from '../ui/copper-line/copper-line';
 
 /** One system as its page shows it: the line, and the same in figures. */
@@ -11,11 +11,13 @@ export interface SystemLine {
   readonly approved: number;
   /** Circuits that a checklist applies to. */
   readonly total: number;
+  /** The own work of the system and of its suction groups, each by its short name. */
+  readonly work: readonly (Pick<LevelWork, 'circuitId' | 'state' | 'level'> & { readonly name: string })[];
 }
 
 /** Turns an opening's systems into copper lines, in the order of the server. */
 export function systemLines(systems: OpeningDetail['systems']): readonly SystemLine[] {
-  return systems.map(({ id, name, refrigerant, joints }) => ({
+  return systems.map(({ id, name, refrigerant, joints, work }) => ({
     id,
     name,
     refrigerant,
@@ -23,5 +25,12 @@ export function systemLines(systems: OpeningDetail['systems']): readonly SystemL
     circuitIds: joints.map(({ circuitId }) => circuitId),
     approved: joints.filter(({ state }) => state === 'approved').length,
     total: joints.filter(({ state }) => state !== 'noSequence').length,
+    work: work.map(({ circuitId, state, level, code }) => ({
+      circuitId,
+      state,
+      level,
+      // A group's code begins with its system's name, which stands above already.
+      name: code.startsWith(`${name} `) ? code.slice(name.length + 1) : code,
+    })),
   }));
 }

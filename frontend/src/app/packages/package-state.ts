@@ -19,7 +19,7 @@ import { DateTimeOf } from '../ui/date-time-of';
           </label>
         }
         @case ('failed') {
-          <p class="failed">{{ t('failed') }} {{ pack().failure }}</p>
+          <p class="failed">{{ t('failed') }} {{ t('failure_' + (pack().failure ?? 'bug')) }}</p>
         }
         @case ('cancelled') {
           <p class="soft">{{ t('cancelled') }}</p>

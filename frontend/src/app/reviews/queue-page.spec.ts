@@ -14,6 +14,7 @@ import { ReviewsApi } from './reviews-api';
 const item = (code: string, change: Partial<QueueItem> = {}): QueueItem =>
   ({
     sequenceId: code,
+    level: 'circuit',
     openingId: 'o',
     openingName: 'Juniper Street',
     openingDate: '2026-12-10',
@@ -53,6 +54,12 @@ async function open(first: readonly QueueItem[]) {
 }
 
 describe('QueuePage', () => {
+  it('says what waits where it is the work of a suction group', async () => {
+    const { root } = await open([item('Rack A AS-1', { level: 'suctionGroup', description: '', area: '' })]);
+    const what = [...root.querySelectorAll('.what p')].map((line) => line.textContent?.trim());
+    expect(what).toEqual(['Suction group', 'Juniper Street']);
+  });
+
   it('says that a second person reviews what the reader recorded', async () => {
     const { root } = await open([item('A1', { fourEyesBlocked: true })]);
     expect(root.textContent).toContain('Recorded by you: a second person reviews this.');

@@ -1,12 +1,10 @@
 import {
-  afterNextRender,
   ChangeDetectionStrategy,
   Component,
   computed,
   DOCUMENT,
   effect,
   inject,
-  Injector,
   input,
   linkedSignal,
   signal,
@@ -15,13 +13,15 @@ import {
 import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
 import { MatDialog } from '@angular/material/dialog';
 import { Router, RouterLink } from '@angular/router';
-import { TranslocoDirective } from '@jsverse/transloco';
+import { TranslocoDirective, TranslocoService } from '@jsverse/transloco';
 import { auditTime, filter } from 'rxjs';
+import type { SequenceDetail } from '#shared/contracts/sequences';
 import { unreachable } from '#shared/failures/unreachable';
 import type { SequenceId } from '#shared/plant/ids';
 import { Connectivity } from '../offline/connectivity';
 import { Session } from '../session/session';
 import { LiveEvents } from '../shell/live-events';
+import { PageTitles } from '../shell/page-titles';
 import { EmptyNote } from '../ui/notes/empty-note';
 import { LoadingNote } from '../ui/notes/loading-note';
 import { OfflineNote } from '../ui/notes/offline-note';
@@ -33,6 +33,7 @@ import { OtherEntries } from './other-entries';
 import { PhotoDialog, type PhotoSet } from './photo-dialog';
 import { outsideSteps } from './outside-steps';
 import { photosOf } from './photo-states';
+import { ReviewFocus } from './review-focus';
 import { REVIEW_KEYS, reviewAction, type ReviewAction } from './review-keys';
 import { ReviewSteps } from './review-steps';
 import { ReviewStore } from './review-store';
@@ -61,7 +62,7 @@ import { VerdictSender } from './verdict-sender';
     TranslocoDirective,
     VerdictPanel,
   ],
-  providers: [ReviewStore, VerdictSender],
+  providers: [ReviewFocus, ReviewStore, VerdictSender],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './review-page.html',
   styleUrl: './review-page.scss',
@@ -75,9 +76,11 @@ export class ReviewPage {
   private readonly api = inject(ReviewsApi);
   private readonly router = inject(Router);
   private readonly dialog = inject(MatDialog);
-  private readonly injector = inject(Injector);
   private readonly document = inject(DOCUMENT);
   private readonly language = readingLanguage();
+  private readonly focus = inject(ReviewFocus);
+  private readonly titles = inject(PageTitles);
+  private readonly words = inject(TranslocoService);
   private readonly evidence = viewChild(StepEvidence);
   private readonly session = inject(Session);
   protected readonly store = inject(ReviewStore);
@@ -100,12 +103,24 @@ export class ReviewPage {
   });
 
   protected readonly keys = REVIEW_KEYS;
+  protected readonly isCircuit = ({ specification: { level = 'circuit' } }: SequenceDetail): boolean =>
+    level === 'circuit';
   protected readonly photoUrl = (sha256: string, size: 'full' | 'thumbnail'): string =>
     this.api.photoUrl(this.sequenceId(), sha256, size);
 
   constructor() {
     // The router sets inputs; the store is above them and has to be told.
     effect(() => this.store.sequenceId.set(this.sequenceId()));
+    effect(() => {
+      const code = this.store.sequence()?.specification.circuit.code;
+      const review = this.words.translate<string>('shell.pageReview', {}, this.language());
+      if (code) this.titles.set(`${code} · ${review}`);
+    });
+    // The panel that held the keyboard goes with the verdict; what it led to takes its place.
+    effect(() => {
+      if (this.store.given() !== null) this.focus.moveTo('review-told');
+      else if (this.store.isChanged()) this.focus.keep('review-told');
+    });
     inject(LiveEvents)
       .on('sequenceChanged')
       .pipe(
@@ -123,6 +138,23 @@ export class ReviewPage {
       queryParamsHandling: 'merge',
       replaceUrl: true,
     });
+    this.focus.keep('step-title');
+  }
+
+  /** A phone shows the list instead of the evidence. */
+  protected showList(key: string): void {
+    this.isListOpen.set(true);
+    this.focus.keep(`step-${key}`);
+  }
+
+  /** Out of the remark, with the keyboard on its step: from there the keys walk on. */
+  protected leaveRemark(key: string): void {
+    this.focus.moveTo(`step-${key}`, 'step-title');
+  }
+
+  protected acknowledgeChange(): void {
+    this.store.acknowledgeChange();
+    this.focus.moveTo('step-title');
   }
 
   protected move(by: 1 | -1): void {
@@ -155,11 +187,10 @@ export class ReviewPage {
   }
 
   protected setMode(mode: VerdictMode): void {
+    const before = this.store.mode();
     this.store.setMode(mode);
-    if (mode === 'closed') return;
-    afterNextRender(() => this.document.getElementById('verdict-title')?.focus(), {
-      injector: this.injector,
-    });
+    // Whoever turns back stands on the button that opened the panel.
+    this.focus.moveTo(mode === 'closed' ? `verdict-${before}` : 'verdict-title');
   }
 
   private goToNext(): void {

@@ -4,6 +4,7 @@ import { TranslocoDirective } from '@jsverse/transloco';
 import type { SequenceDetail } from '#shared/contracts/sequences';
 import { AnswerView, type PhotoUrl } from '../ui/answer-view/answer-view';
 import { DateTimeOf } from '../ui/date-time-of';
+import { FloodLink } from '../ui/flood-link/flood-link';
 import { TextOf } from '../ui/text-of';
 import { Unbroken } from '../ui/words/unbroken';
 import { reasonsBesideOutcome, type ReviewStep } from './attention-order';
@@ -15,7 +16,7 @@ const MOST_CHARACTERS = 2000;
 /** The evidence of one step: what was recorded, by whom and when, all that was recorded before, and the remark on it. */
 @Component({
   selector: 'app-step-evidence',
-  imports: [AnswerView, DateTimeOf, EntryLine, TextOf, TranslocoDirective, Unbroken],
+  imports: [AnswerView, DateTimeOf, EntryLine, FloodLink, TextOf, TranslocoDirective, Unbroken],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './step-evidence.html',
   styleUrl: './step-evidence.scss',
@@ -28,6 +29,8 @@ export class StepEvidence {
   /** Whether remarks can be written: the sequence is under review, by somebody who may review it. */
   readonly canRemark = input.required<boolean>();
   readonly remarkTyped = output<string>();
+  /** The writer turns away from the remark; it stays as it is. */
+  readonly remarkLeft = output<void>();
   readonly openPhoto = output<number>();
 
   private readonly box = viewChild<ElementRef<HTMLTextAreaElement>>('box');

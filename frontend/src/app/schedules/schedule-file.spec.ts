@@ -1,5 +1,5 @@
 import { describe, expect, it } from '@jest/globals';
-import { fileFault, findProblems, MOST_BYTES, refusedRows, sayHeadingsOnce } from './schedule-file';
+import { fileFault, findProblems, MOST_BYTES, refusedRows } from './schedule-file';
 
 describe('fileFault', () => {
   it.each([
@@ -29,13 +29,15 @@ const problem = (facts: unknown) => ({
 
 describe('refusedRows', () => {
   it('reads the rows out of the refusal', () => {
-    const rows = [{ row: 7, column: 'Load', reason: 'is not a number' }];
+    const reason = { code: 'notANumber', params: { text: 'x' } };
+    const rows = [{ row: 7, column: 'Load', reason, message: 'It is not a number.' }];
     expect(refusedRows(problem({ rows }))).toEqual(rows);
   });
 
   it('is empty where the refusal names none', () => {
     expect(refusedRows(problem({}))).toEqual([]);
     expect(refusedRows(new Error('x'))).toEqual([]);
+    expect(refusedRows(problem({ rows: [{ row: 7, column: 'Load', reason: 'words' }] }))).toEqual([]);
   });
 });
 
@@ -53,31 +55,5 @@ describe('findProblems', () => {
     ['zz', 0],
   ])('finds %p: %i', (text, count) => {
     expect(findProblems(rows, text)).toHaveLength(count);
-  });
-});
-
-describe('sayHeadingsOnce', () => {
-  const missing = (label: string) => ({
-    row: 1,
-    column: null,
-    reason: `The column “${label}” is missing; add it. The headings found are: Rack, Case.`,
-  });
-  const other = { row: 4, column: 'Circuit', reason: 'Circuit is missing; fill in the cell.' };
-
-  it('takes the headings out of several missing columns', () => {
-    const { rows, headings } = sayHeadingsOnce([missing('System'), missing('Circuit'), other]);
-    expect(headings).toBe('Rack, Case');
-    expect(rows.map(({ reason }) => reason)).toEqual([
-      'The column “System” is missing; add it.',
-      'The column “Circuit” is missing; add it.',
-      'Circuit is missing; fill in the cell.',
-    ]);
-  });
-
-  it('leaves one missing column its whole sentence', () => {
-    expect(sayHeadingsOnce([missing('System'), other])).toEqual({
-      rows: [missing('System'), other],
-      headings: null,
-    });
   });
 });

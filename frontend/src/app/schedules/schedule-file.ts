@@ -20,29 +20,18 @@ export function refusedRows(error: unknown): readonly ScheduleProblem[] {
   return rows.success ? rows.data : [];
 }
 
+/** One problem as it is shown, its reason in the language that is read. */
+export interface SaidProblem {
+  readonly row: number;
+  readonly column: string | null;
+  readonly reason: string;
+}
+
 /** The problems whose row, column or reason contains what was typed. */
-export function findProblems(rows: readonly ScheduleProblem[], text: string): readonly ScheduleProblem[] {
+export function findProblems(rows: readonly SaidProblem[], text: string): readonly SaidProblem[] {
   const wanted = text.trim().toLowerCase();
   if (wanted === '') return rows;
   return rows.filter(({ row, column, reason }) =>
     `${row} ${column ?? ''} ${reason}`.toLowerCase().includes(wanted),
   );
-}
-
-/** How the server's sentence about a missing column goes on. */
-const HEADINGS = / The headings found are: (.+)\.$/;
-
-/**
- * Several missing columns each name all headings that the file has: those are said once.
- *
- * @returns `headings` is null where at most one problem names them, which then keeps its sentence whole
- */
-export function sayHeadingsOnce(rows: readonly ScheduleProblem[]): {
-  readonly rows: readonly ScheduleProblem[];
-  readonly headings: string | null;
-} {
-  const named = rows.flatMap(({ reason }) => HEADINGS.exec(reason)?.[1] ?? []);
-  const [headings] = named;
-  if (headings === undefined || named.length < 2) return { rows, headings: null };
-  return { rows: rows.map((row) => ({ ...row, reason: row.reason.replace(HEADINGS, '') })), headings };
 }

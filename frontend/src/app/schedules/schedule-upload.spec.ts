@@ -56,7 +56,8 @@ describe('ScheduleUpload', () => {
 
   it('shows the rows of a refusal and takes the corrected file after it', () => {
     upload.check(OPENING, file);
-    const rows = [{ row: 3, column: 'Load', reason: 'is empty' }];
+    const reason = { code: 'notANumber', params: { text: 'x' } };
+    const rows = [{ row: 3, column: 'Load', reason, message: 'It is not a number.' }];
     const error = {
       type: '',
       title: '',

@@ -1,5 +1,4 @@
-import { ChangeDetectionStrategy, Component, inject, signal, type Injector } from '@angular/core';
-import { NonNullableFormBuilder, ReactiveFormsModule, Validators } from '@angular/forms';
+import { ChangeDetectionStrategy, Component, inject, signal, viewChild, type Injector } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
 import { MAT_DIALOG_DATA, MatDialog, MatDialogModule, MatDialogRef } from '@angular/material/dialog';
 import { TranslocoPipe } from '@jsverse/transloco';
@@ -14,10 +13,10 @@ type Purpose = 'signature' | 'session';
 /** A small dialog with one box. It closes with `true` only when the server took the password. */
 @Component({
   selector: 'app-password-dialog',
-  imports: [MatButtonModule, MatDialogModule, PasswordField, ReactiveFormsModule, TranslocoPipe],
+  imports: [MatButtonModule, MatDialogModule, PasswordField, TranslocoPipe],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <form [formGroup]="form" (ngSubmit)="confirm()">
+    <form novalidate (submit)="confirm($event)">
       <h2 mat-dialog-title>{{ 'session.againTitle_' + purpose | transloco }}</h2>
       <mat-dialog-content>
         <p class="why">{{ 'session.againWhy_' + purpose | transloco }}</p>
@@ -29,7 +28,7 @@ type Purpose = 'signature' | 'session';
           aria-hidden="true"
           [value]="email"
         />
-        <app-password-field [control]="form.controls.password" />
+        <app-password-field [(value)]="password" [isTried]="isTried()" />
         <p class="problem" role="alert">
           @if (problem(); as key) {
             {{ key | transloco }}
@@ -38,7 +37,7 @@ type Purpose = 'signature' | 'session';
       </mat-dialog-content>
       <mat-dialog-actions align="end">
         <button matButton type="button" [mat-dialog-close]="false">{{ 'session.cancel' | transloco }}</button>
-        <button matButton="filled" type="submit" [disabled]="isBusy()">
+        <button matButton="filled" type="submit" [attr.aria-disabled]="isBusy()">
           {{ 'session.confirm' | transloco }}
         </button>
       </mat-dialog-actions>
@@ -61,14 +60,20 @@ export class PasswordDialog {
   private readonly reference = inject<MatDialogRef<PasswordDialog, boolean>>(MatDialogRef);
   protected readonly purpose = inject<Purpose>(MAT_DIALOG_DATA);
   protected readonly email = this.session.me()?.email ?? '';
-  protected readonly form = inject(NonNullableFormBuilder).group({ password: ['', Validators.required] });
+  private readonly field = viewChild.required(PasswordField);
+  protected readonly password = signal('');
+  protected readonly isTried = signal(false);
   protected readonly problem = signal<string | null>(null);
   protected readonly isBusy = signal(false);
 
-  protected async confirm(): Promise<void> {
-    if (this.form.invalid) return;
-    const { password } = this.form.getRawValue();
+  protected async confirm(event: Event): Promise<void> {
+    event.preventDefault();
+    this.isTried.set(true);
+    const password = this.password();
+    if (password === '') this.field().focus();
+    if (password === '' || this.isBusy()) return;
     this.isBusy.set(true);
+    this.problem.set(null);
     try {
       if (this.purpose === 'signature') await this.api.confirmPassword(password);
       else await this.session.signIn(this.email, password);

@@ -1,51 +1,66 @@
-import { ChangeDetectionStrategy, Component, input, signal } from '@angular/core';
-import { ReactiveFormsModule, type FormControl } from '@angular/forms';
-import { MatButtonModule } from '@angular/material/button';
-import { MatFormFieldModule } from '@angular/material/form-field';
-import { MatIconModule } from '@angular/material/icon';
-import { MatInputModule } from '@angular/material/input';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  input,
+  model,
+  signal,
+  viewChild,
+  type ElementRef,
+} from '@angular/core';
 import { TranslocoPipe } from '@jsverse/transloco';
+import { FirstIcon } from '../ui/first-icon/first-icon';
+
+let boxes = 0;
 
 /** The box for a password: pasting and password managers welcome, and it can be shown. */
 @Component({
   selector: 'app-password-field',
-  imports: [
-    ReactiveFormsModule,
-    MatButtonModule,
-    MatFormFieldModule,
-    MatIconModule,
-    MatInputModule,
-    TranslocoPipe,
-  ],
+  imports: [FirstIcon, TranslocoPipe],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <mat-form-field appearance="outline">
-      <mat-label>{{ 'session.password' | transloco }}</mat-label>
+    <label [attr.for]="id">{{ 'session.password' | transloco }}</label>
+    <div class="box">
       <input
-        matInput
+        #box
         name="password"
         autocomplete="current-password"
         autocapitalize="none"
         spellcheck="false"
+        required
+        [id]="id"
         [type]="isShown() ? 'text' : 'password'"
-        [formControl]="control()"
+        [value]="value()"
+        [attr.aria-invalid]="isMissing()"
+        [attr.aria-describedby]="isMissing() ? id + '-wrong' : null"
+        (input)="value.set(box.value)"
       />
       <button
-        matSuffix
-        matIconButton
         type="button"
         [attr.aria-pressed]="isShown()"
         [attr.aria-label]="'session.showPassword' | transloco"
         (click)="isShown.set(!isShown())"
       >
-        <mat-icon [svgIcon]="isShown() ? 'hide' : 'show'" />
+        <app-first-icon [name]="isShown() ? 'hide' : 'show'" />
       </button>
-      <mat-error>{{ 'session.passwordMissing' | transloco }}</mat-error>
-    </mat-form-field>
+    </div>
+    @if (isMissing()) {
+      <p class="wrong" [id]="id + '-wrong'">{{ 'session.passwordMissing' | transloco }}</p>
+    }
   `,
-  styles: 'mat-form-field { width: 100%; }',
+  styleUrl: './session-field.scss',
 })
 export class PasswordField {
-  readonly control = input.required<FormControl<string>>();
+  readonly value = model.required<string>();
+  /** Whether somebody tried to go on: a box that was left empty says so then. */
+  readonly isTried = input(false);
+
+  private readonly box = viewChild.required<ElementRef<HTMLInputElement>>('box');
+  protected readonly id = `password-${(boxes += 1)}`;
   protected readonly isShown = signal(false);
+  protected readonly isMissing = computed(() => this.isTried() && this.value() === '');
+
+  focus(): void {
+    this.box().nativeElement.focus();
+  }
 }

@@ -18,7 +18,10 @@ export class SessionApi {
 
   /** Who is signed in; `null` when nobody is. */
   async read(): Promise<Me | null> {
-    const answer = await firstValueFrom(this.http.get('/api/session', { context: quietly() }));
+    const get = this.http.get<{ me?: unknown } | null>('/api/session', { context: quietly() });
+    const answer = await firstValueFrom(get);
+    // Nobody is here: that needs no contract, and the sign-in page is what comes next.
+    if (answer?.me === null) return null;
     return (await contract()).sessionSchema.parse(answer).me;
   }
 

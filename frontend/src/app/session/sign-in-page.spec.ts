@@ -1,7 +1,6 @@
 import { HttpErrorResponse } from '@angular/common/http';
 import { signal } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
-import { MatIconTestingModule } from '@angular/material/icon/testing';
 import { provideRouter, Router } from '@angular/router';
 import { beforeEach, describe, expect, it, jest } from '@jest/globals';
 import type { Me } from '#shared/contracts/session';
@@ -18,7 +17,7 @@ describe('SignInPage', () => {
   beforeEach(() => {
     signIn.mockReset();
     TestBed.configureTestingModule({
-      imports: [SignInPage, MatIconTestingModule, withWords()],
+      imports: [SignInPage, withWords()],
       providers: [provideRouter([]), { provide: Session, useValue: { me: signal(null), signIn } }],
     });
   });
@@ -28,6 +27,7 @@ describe('SignInPage', () => {
     fixture.componentRef.setInput('then', '/work/7');
     await fixture.whenStable();
     const page = fixture.nativeElement as HTMLElement;
+    document.body.replaceChildren(page);
     for (const [name, value] of Object.entries({ email, password })) {
       const box = page.querySelector<HTMLInputElement>(`input[name=${name}]`)!;
       box.value = value;
@@ -60,6 +60,60 @@ describe('SignInPage', () => {
   it('asks nobody while a box is empty', async () => {
     await fill('dana@example.com', '');
     expect(signIn).not.toHaveBeenCalled();
+  });
+
+  it.each([
+    ['', '', 'email', 'Enter an email address, such as name@example.com.'],
+    ['dana', 'right', 'email', 'Enter an email address, such as name@example.com.'],
+    ['dana@example.com', '', 'password', 'Enter your password.'],
+  ])(
+    'leads from %j and %j to the first box that lacks something, and says what',
+    async (email, password, name, words) => {
+      const page = await fill(email, password);
+      const box = page.querySelector<HTMLInputElement>(`input[name=${name}]`)!;
+      expect(document.activeElement).toBe(box);
+      expect(box.getAttribute('aria-invalid')).toBe('true');
+      const described = page.querySelector(`[id="${box.getAttribute('aria-describedby')}"]`);
+      expect(described?.textContent).toBe(words);
+      expect(signIn).not.toHaveBeenCalled();
+    },
+  );
+
+  it('says nothing about boxes that nobody filled in yet', async () => {
+    const fixture = TestBed.createComponent(SignInPage);
+    await fixture.whenStable();
+    const page = fixture.nativeElement as HTMLElement;
+    expect(page.querySelector('.wrong')).toBeNull();
+    expect(page.querySelector('[aria-invalid=true]')).toBeNull();
+  });
+
+  it('names each box, and shows the password when asked', async () => {
+    const page = await fill('', '');
+    for (const [name, words] of [
+      ['email', 'Email'],
+      ['password', 'Password'],
+    ]) {
+      const box = page.querySelector<HTMLInputElement>(`input[name=${name}]`)!;
+      expect([...box.labels!].map((label) => label.textContent)).toEqual([words]);
+    }
+    const box = page.querySelector<HTMLInputElement>('input[name=password]')!;
+    expect(box.type).toBe('password');
+    const show = page.querySelector<HTMLButtonElement>('button[aria-pressed]')!;
+    show.click();
+    await new Promise((done) => setTimeout(done, 20));
+    expect(box.type).toBe('text');
+    expect(show.getAttribute('aria-pressed')).toBe('true');
+  });
+
+  it('sends a password once, and keeps the keyboard on the button meanwhile', async () => {
+    signIn.mockReturnValue(new Promise(() => undefined));
+    const page = await fill('dana@example.com', 'right');
+    const go = page.querySelector<HTMLButtonElement>('button[type=submit]')!;
+    go.focus();
+    page.querySelector('form')!.dispatchEvent(new Event('submit'));
+    expect(signIn).toHaveBeenCalledTimes(1);
+    expect(go.getAttribute('aria-disabled')).toBe('true');
+    expect(document.activeElement).toBe(go);
   });
 
   it('lets password managers and pasting work', async () => {

@@ -1,18 +1,18 @@
 import { ChangeDetectionStrategy, Component, inject } from '@angular/core';
-import { MatIconModule } from '@angular/material/icon';
 import { TranslocoPipe } from '@jsverse/transloco';
+import { FirstIcon } from '../ui/first-icon/first-icon';
 import { OutboxStart } from './outbox-start';
 import { PersonPanel } from './person-panel';
 
 /** The end of the bar: what still waits on this phone, who is here. Comes right after the first paint. */
 @Component({
   selector: 'app-bar-end',
-  imports: [MatIconModule, PersonPanel, TranslocoPipe],
+  imports: [FirstIcon, PersonPanel, TranslocoPipe],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     @if (outbox.waiting() > 0) {
       <span class="mark" [attr.title]="'shell.waitingHint' | transloco">
-        <mat-icon svgIcon="waiting" /><span class="figures">{{ outbox.waiting() }}</span>
+        <app-first-icon name="waiting" /><span class="figures">{{ outbox.waiting() }}</span>
         <span class="heard-only">{{ 'shell.waitingHint' | transloco }}</span>
       </span>
     }

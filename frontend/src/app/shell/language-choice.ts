@@ -2,6 +2,7 @@ import { DOCUMENT, effect, inject, Injectable, signal, untracked } from '@angula
 import { TranslocoService } from '@jsverse/transloco';
 import type { Language } from '#shared/checklist/text';
 import { firstValueFrom } from 'rxjs';
+import { allWords } from '../../i18n/loader/words-loader';
 import { httpFailure } from '../session/problem-code';
 import { Session } from '../session/session';
 import { SessionApi } from '../session/session-api';
@@ -20,6 +21,9 @@ export class LanguageChoice {
   private readonly document = inject(DOCUMENT);
   private readonly current = signal<Language>('en');
   private chosenHere = false;
+  /** What was asked for last; `current` follows once its words are there. */
+  private wanted: Language = 'en';
+  private isWhole = false;
 
   readonly language = this.current.asReadonly();
 
@@ -31,11 +35,17 @@ export class LanguageChoice {
     });
   }
 
-  /** Loads the first language; resolves when its words are there. */
+  /** Loads the first language; resolves when the words of the first screen are there. */
   async begin(): Promise<void> {
     const stored = localStorage.getItem(KEY);
     const wanted = stored ?? this.document.defaultView?.navigator.language.slice(0, 2);
     await this.use(SCREEN_LANGUAGES.find((language) => language === wanted) ?? 'en');
+  }
+
+  /** Loads the words of every other screen too, now and with every language chosen later. */
+  async loadAll(): Promise<void> {
+    this.isWhole = true;
+    await this.complete(this.wanted);
   }
 
   /** Switches at once, remembers it here, and with the person when somebody is signed in. */
@@ -52,10 +62,18 @@ export class LanguageChoice {
   }
 
   private async use(language: Language): Promise<void> {
+    this.wanted = language;
     await firstValueFrom(this.words.load(language));
+    if (this.isWhole) await this.complete(language);
+    // Another choice overtook this one while its words were on their way.
+    if (this.wanted !== language) return;
     this.words.setActiveLang(language);
     this.current.set(language);
     this.document.documentElement.lang = language;
     localStorage.setItem(KEY, language);
+  }
+
+  private async complete(language: Language): Promise<void> {
+    this.words.setTranslation(await allWords(language), language);
   }
 }

@@ -14,6 +14,7 @@ export class PageTitles extends TitleStrategy {
   private readonly choice = inject(LanguageChoice);
   private readonly key = signal<string | null>(null);
   private readonly own = signal<string | null>(null);
+  private path = '';
 
   constructor() {
     super();
@@ -26,11 +27,14 @@ export class PageTitles extends TitleStrategy {
   }
 
   override updateTitle(snapshot: RouterStateSnapshot): void {
-    this.own.set(null);
+    const path = snapshot.url.replace(/[?#].*$/, '');
+    // Another place on the same page: the page knows its own title, and says so when that changes with the place.
+    if (path !== this.path) this.own.set(null);
+    this.path = path;
     this.key.set(this.buildTitle(snapshot) ?? null);
   }
 
-  /** A title that isn't a key, until the next navigation. */
+  /** A title that isn't a key, until another page opens. The page says it anew in another language. */
   set(title: string): void {
     this.own.set(title);
   }

@@ -6,11 +6,11 @@ import {
   viewChild,
   type ElementRef,
 } from '@angular/core';
-import { MatIconModule } from '@angular/material/icon';
 import { Router } from '@angular/router';
 import { TranslocoPipe } from '@jsverse/transloco';
 import { httpFailure } from '../session/problem-code';
 import { Session } from '../session/session';
+import { FirstIcon } from '../ui/first-icon/first-icon';
 import { LanguageChoice, SCREEN_LANGUAGES } from './language-choice';
 import { LookChoice, LOOKS } from './look-choice';
 import { OutboxStart } from './outbox-start';
@@ -18,7 +18,7 @@ import { OutboxStart } from './outbox-start';
 /** Who is here, the language, the look, and the way out: a native popover, so nothing heavy loads for it. */
 @Component({
   selector: 'app-person-panel',
-  imports: [MatIconModule, TranslocoPipe],
+  imports: [FirstIcon, TranslocoPipe],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './person-panel.html',
   styleUrl: './person-panel.scss',

@@ -1,0 +1,61 @@
+import {
+  SCHEDULE_REASON_CODES,
+  type ScheduleReason,
+  type ScheduleReasonCode,
+  type ScheduleReasonParams,
+} from '#shared/contracts/schedule-reasons';
+
+const PARAMS: { readonly [Code in ScheduleReasonCode]: ScheduleReasonParams[Code] } = {
+  fileTooLarge: { bytes: 5 * 1024 * 1024 },
+  excelWorkbook: {},
+  olderExcelWorkbook: {},
+  pdf: {},
+  picture: { format: 'PNG' },
+  fileEmpty: {},
+  notText: {},
+  noHeadings: {},
+  openQuotationMark: {},
+  onlyHeadings: {},
+  tooManyColumns: { upTo: 300 },
+  tooManyRows: { upTo: 5000 },
+  beyondLastHeading: { text: '400' },
+  moreProblems: { count: 50 },
+  missingColumn: { column: 'system', heading: 'System', found: ['Rack', 'Case'], moreCount: 0 },
+  sameColumn: { other: 'Circuit' },
+  missingValue: { column: 'refrigerant', heading: 'Refrigerant' },
+  spreadsheetError: { text: '#REF!' },
+  textTooLong: { characterCount: 41, upTo: 40 },
+  unknownWord: {
+    text: 'cool',
+    words: [
+      { word: 'low', write: 'low' },
+      { word: 'medium', write: 'medium' },
+      { word: 'high', write: 'high' },
+    ],
+  },
+  notANumber: { text: 'twenty' },
+  twoWaysToRead: { text: '12,400' },
+  notAWholeNumber: { text: '1.5', lowCount: 1, highCount: 40 },
+  outOfRange: { text: '-77', low: -76, high: 68, unit: 'degF' },
+  unknownUnit: { text: 'psq', units: ['ft', 'm', 'in'] },
+  missingUnit: { units: ['degC', 'degF'] },
+  twoUnits: { cell: 'degC', heading: 'degF' },
+  unknownRefrigerant: { text: 'R-404' },
+  missingName: { level: 'suctionGroup' },
+  circuitElsewhere: { circuit: 'A1', suctionGroup: 'AS-1', system: 'Rack A', row: 2 },
+  fixtureTagTwice: { text: 'ME-01', row: 2 },
+  rowsDisagree: { row: 2, level: 'circuit', name: 'A1' },
+  superheatBandEmpty: {},
+  dischargeAirTooCold: {},
+  tooWarmForLow: {},
+  tooColdForMedium: {},
+  tooColdForHigh: {},
+  colderThanSuction: {},
+  defrostsWithoutDefrost: {},
+  defrostWithoutDefrosts: {},
+};
+
+/** One reason of each code, as a server would send it. */
+export const EACH_REASON = SCHEDULE_REASON_CODES.map(
+  (code) => ({ code, params: PARAMS[code] }) as ScheduleReason,
+);

@@ -1,0 +1,5 @@
+import session from '../es/session.json';
+import shell from '../es/shell.json';
+
+/** The words that the sign-in page and the shell around it need: all that loads before anybody is here. */
+export const WORDS = { session, shell };
