@@ -227,3 +227,38 @@ describe('error of a superheat’s instruments', () => {
     expect(kinds(judgement)).toEqual(['ask notANumber']);
   });
 });
+
+describe('superheat by a barometer', () => {
+  // 1976 US Standard Atmosphere: 12.100 psia at 5,280 ft, 24.64 inHg.
+  const MILE = { atmospherePaAbs: 83_430, elevationM: 1609.344 };
+  const at = (inHg: string) =>
+    judgeFor(
+      {
+        ...STEADY,
+        instruments: {
+          gauge: 'vented',
+          pressureAccuracy: null,
+          temperatureAccuracy: null,
+          barometer: { text: inHg, unit: 'inHg' },
+        },
+      },
+      [5, 7],
+      { facts: MILE },
+    );
+  const byElevation = judgeFor(STEADY, [5, 7], { facts: MILE });
+
+  it('is that of the standard atmosphere on a standard day', () => {
+    expect(kinds(at('24.64'))).toEqual(kinds(byElevation));
+    expect(inDegrees(at('24.64'))).toBeCloseTo(inDegrees(byElevation), 1);
+    // Low pressure outside: the same needle means less, and the superheat is higher.
+    expect(inDegrees(at('24.2'))).toBeGreaterThan(inDegrees(byElevation));
+  });
+
+  it('refuses a reading that was corrected to sea level, and asks about weather that is none', () => {
+    expect(kinds(at('29.92'))).toContain('refuse barometerSeaLevel');
+    expect(at('29.92').counts).toBe(false);
+    expect(kinds(at('26.9'))).toContain('ask barometerFarOff');
+    expect(kinds(at('four'))).toContain('refuse notANumber');
+    expect(kinds(at('60'))).toContain('refuse notPlausible');
+  });
+});

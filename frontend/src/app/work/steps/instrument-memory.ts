@@ -22,7 +22,7 @@ export class InstrumentMemory {
 
   keep(system: UnitSystem, instruments: TypedInstruments): void {
     try {
-      localStorage.setItem(keyOf(system), JSON.stringify(instruments));
+      localStorage.setItem(keyOf(system), JSON.stringify({ ...instruments, barometer: undefined }));
     } catch (error) {
       // A full store costs only this convenience.
       if (!(error instanceof DOMException)) throw error;

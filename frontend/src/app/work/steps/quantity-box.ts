@@ -1,6 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, input, model } from '@angular/core';
 import { TranslocoPipe } from '@jsverse/transloco';
-import { UNITS, type Dimension } from '#shared/units/unit';
+import { UNITS, type Dimension, type UnitId } from '#shared/units/unit';
 import { displayUnit, type UnitSystem } from '#shared/units/unit-system';
 import { turnSign } from './typed-text';
 
@@ -55,6 +55,8 @@ export class QuantityBox {
   readonly size = input<'medium' | 'large'>('medium');
   /** Whether there is a key for the sign, where a value of the dimension may be negative. */
   readonly withSign = input(true);
+  /** Where an instrument shows another unit than the opening's screens do. */
+  readonly inUnit = input<UnitId | null>(null);
   /** Id of the element that says how the value is judged. */
   readonly describedBy = input<string | null>(null);
   readonly text = model.required<string>();
@@ -62,7 +64,9 @@ export class QuantityBox {
   // The sign key stands beside the label, never in it: touching a label's words acts on the first control inside.
   protected readonly id = `quantity-${(boxes += 1)}`;
 
-  protected readonly unit = computed(() => UNITS[displayUnit(this.dimension(), this.unitSystem())].symbol);
+  protected readonly unit = computed(
+    () => UNITS[this.inUnit() ?? displayUnit(this.dimension(), this.unitSystem())].symbol,
+  );
   protected readonly hasSign = computed(() => this.withSign() && MAY_BE_NEGATIVE.has(this.dimension()));
   protected readonly turn = turnSign;
 

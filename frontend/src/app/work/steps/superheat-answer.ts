@@ -1,4 +1,5 @@
 import type { SuperheatAnswer, SuperheatObservation, SuperheatPair } from '#shared/checklist/kinds/superheat';
+import type { UnitId } from '#shared/units/unit';
 import { displayUnit, type UnitSystem } from '#shared/units/unit-system';
 import { readSince } from '../coil-walk/clock-text';
 import { inOrder } from '../coil-walk/valve-wait';
@@ -75,6 +76,9 @@ function lackOf(typed: TypedObservation, look: 'asFound' | 'asLeft'): Lacking | 
   return typed.valve === 'series' && isTimeless ? 'seriesTime' : null;
 }
 
+/** What a barometer shows: not the unit in which absolute pressures are shown otherwise. */
+export const BAROMETER_UNIT: Readonly<Record<UnitSystem, UnitId>> = { us: 'inHg', si: 'kPaa' };
+
 type HowRead = Pick<SuperheatAnswer, 'takenAt' | 'lineDrop' | 'instruments'>;
 
 /** How the readings were taken, as an answer says it. A plain gauge of unknown accuracy is no news and left out. */
@@ -94,8 +98,16 @@ function instrumentsOf(typed: TypedInstruments, system: UnitSystem): Pick<Superh
     typed.temperatureAccuracy,
     displayUnit('temperatureDifference', system),
   );
-  if (typed.gauge === 'vented' && !pressureAccuracy && !temperatureAccuracy) return {};
-  return { instruments: { gauge: typed.gauge, pressureAccuracy, temperatureAccuracy } };
+  const barometer = typedOrNull(typed.barometer ?? '', BAROMETER_UNIT[system]);
+  if (typed.gauge === 'vented' && !pressureAccuracy && !temperatureAccuracy && !barometer) return {};
+  return {
+    instruments: {
+      gauge: typed.gauge,
+      pressureAccuracy,
+      temperatureAccuracy,
+      ...(barometer ? { barometer } : {}),
+    },
+  };
 }
 
 /**

@@ -4,6 +4,7 @@ import { GAUGE_KINDS } from '#shared/checklist/kinds/superheat';
 import { UNITS } from '#shared/units/unit';
 import { displayUnit, type UnitSystem } from '#shared/units/unit-system';
 import { QuantityBox } from './quantity-box';
+import { BAROMETER_UNIT } from './superheat-answer';
 import type { TypedInstruments } from './superheat-typed';
 
 /** What the reading is taken with, and how good its maker says it is. Kept by the phone: the gauge goes with it. */
@@ -53,6 +54,14 @@ import type { TypedInstruments } from './superheat-typed';
           [text]="instruments().temperatureAccuracy"
           (textChange)="change({ temperatureAccuracy: $event })"
         />
+        <app-quantity-box
+          dimension="absolutePressure"
+          [label]="'work.barometer' | transloco"
+          [unitSystem]="unitSystem()"
+          [inUnit]="barometerUnit()"
+          [text]="instruments().barometer ?? ''"
+          (textChange)="change({ barometer: $event })"
+        />
         <p class="soft">{{ 'work.instrumentsHint' | transloco }}</p>
       </div>
     </details>
@@ -64,6 +73,7 @@ export class SuperheatInstruments {
   readonly unitSystem = input.required<UnitSystem>();
 
   protected readonly kinds = GAUGE_KINDS;
+  protected readonly barometerUnit = computed(() => BAROMETER_UNIT[this.unitSystem()]);
   protected readonly accuracies = computed(() => {
     const { pressureAccuracy, temperatureAccuracy } = this.instruments();
     const symbol = (dimension: 'pressureDifference' | 'temperatureDifference'): string =>

@@ -159,6 +159,23 @@ describe('liveObservation', () => {
   });
 });
 
+describe('a barometer', () => {
+  it('counts instead of the elevation, in the unit that barometers show', () => {
+    const read = (barometer: string): number | null =>
+      figureOf(
+        liveObservation(steady('45', '28'), STEP, FACTS, {
+          ...FORM,
+          instruments: { ...FORM.instruments, barometer },
+        }),
+        'superheat',
+      );
+    // 28.9 inHg is 1 inHg below the standard day: 0.49 psi, at 1.17 psi/°F a superheat higher by 0.4 °F.
+    const difference = (((read('28.92') ?? 0) - (read('') ?? 0)) * 9) / 5;
+    expect(difference).toBeGreaterThan(0.35);
+    expect(difference).toBeLessThan(0.5);
+  });
+});
+
 describe('keptSuperheat', () => {
   it('takes a draft of this version', () => {
     expect(keptSuperheat(JSON.parse(JSON.stringify(FORM)))).toEqual(FORM);

@@ -46,6 +46,8 @@ export interface TypedInstruments {
   readonly gauge: NonNullable<SuperheatAnswer['instruments']>['gauge'];
   readonly pressureAccuracy: string;
   readonly temperatureAccuracy: string;
+  /** The station pressure that somebody read here today; the phone doesn't remember it. */
+  readonly barometer?: string;
 }
 
 export interface TypedSuperheat {
@@ -105,6 +107,7 @@ function startInstruments({ instruments }: SuperheatAnswer): TypedInstruments {
     gauge: instruments.gauge,
     pressureAccuracy: instruments.pressureAccuracy?.text ?? '',
     temperatureAccuracy: instruments.temperatureAccuracy?.text ?? '',
+    ...(instruments.barometer ? { barometer: instruments.barometer.text } : {}),
   };
 }
 
