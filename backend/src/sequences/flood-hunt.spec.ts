@@ -110,8 +110,11 @@ describe('GET /openings/:openingId/suction-groups/:suctionGroupId/coils', () => 
   it('calls a superheat stale when the regulator was set after it', async () => {
     const a1 = sequences.get('A1') as SequenceId;
     await record(a1, ({ stepList }) => stepList.steps.find((step) => step.key === 'regulator-set'), {
-      kind: 'reading',
-      value: { text: '45', unit: 'psig' },
+      kind: 'measurement',
+      method: 'regulatorPressure',
+      quantities: { pressure: { text: '45', unit: 'psig' } },
+      words: {},
+      rows: [],
     });
     expect((await hunt()).coils.map((coil) => coil.asLeftStale)).toEqual([true, true, false]);
   });
