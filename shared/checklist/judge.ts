@@ -23,6 +23,19 @@ export const JUDGING_VERSION = 1;
  * @returns the outcome with its figures and working; never throws for anything a person can type
  */
 export function judge(step: Step, answer: Answer, facts: SequenceFacts): Judgement {
+  const judgement = judgeKind(step, answer, facts);
+  return changesCircuit(step, answer) ? { ...judgement, changes: true } : judgement;
+}
+
+/** Whether the template marks what was recorded as a change of how the circuit runs. */
+function changesCircuit(step: Step, answer: Answer): boolean {
+  if (step.kind !== answer.kind) return false;
+  if (step.kind === 'choose' && answer.kind === 'choose')
+    return step.options.some(({ value, changes }) => value === answer.value && changes === true);
+  return 'changes' in step && step.changes === true;
+}
+
+function judgeKind(step: Step, answer: Answer, facts: SequenceFacts): Judgement {
   switch (step.kind) {
     case 'confirm':
       return answer.kind === step.kind ? confirmRules.judge(step, answer, facts) : mismatch();

@@ -46,6 +46,7 @@ export const DOUBT_KINDS = [
   'massDoesNotFollow',
   'wrongWay',
   'withinError',
+  'readTooSoon',
   'barometerSeaLevel',
   'barometerFarOff',
   'asFoundMissing',
@@ -84,6 +85,8 @@ export const judgementSchema = z.object({
   side: z.nullable(z.enum(['low', 'high'])),
   /** Whether the answer satisfies its step. An outside answer does: it is a true record, and the lead sees it first. */
   counts: z.boolean(),
+  /** Whether it says that the circuit runs otherwise than before; part of the record, whatever a later template marks. */
+  changes: z.optional(z.literal(true)),
   doubts: z.array(doubtSchema),
   figures: z.array(figureSchema),
   limit: z.nullable(appliedLimitSchema),

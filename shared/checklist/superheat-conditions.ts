@@ -7,3 +7,6 @@ export const SUPERHEAT_CONDITIONS = [
   'suctionAtSetPoint',
 ] as const;
 export type SuperheatCondition = (typeof SUPERHEAT_CONDITIONS)[number];
+
+/** What a valve is given to settle after a turn where the template says nothing; manuals say 15 and 30 minutes. */
+export const DEFAULT_WAIT_S = 900;

@@ -262,3 +262,31 @@ describe('superheat by a barometer', () => {
     expect(kinds(at('60'))).toContain('refuse notPlausible');
   });
 });
+
+describe('superheat read after a turn of the valve', () => {
+  const turned = (waitedS?: number) =>
+    judgeFor(
+      {
+        ...STEADY,
+        turns: [{ turns: 0.25, direction: 'clockwise', at: '2027-01-15T12:00:00Z' }],
+        ...(waitedS === undefined ? {} : { waitedS }),
+      },
+      [5, 7],
+    );
+
+  // 15 minutes unless the template says otherwise: a case maker's manual; others ask for 30.
+  it('is asked about when the valve had no time to settle, and says how long it had', () => {
+    expect(kinds(turned(60))).toContain('ask readTooSoon');
+    expect(turned(60).counts).toBe(true);
+    expect(turned(60).figures).toContainEqual({ label: 'waited', value: 60, unit: 's' });
+    expect(kinds(turned(900))).not.toContain('ask readTooSoon');
+    expect(kinds(turned())).not.toContain('ask readTooSoon');
+  });
+
+  it('is not judged by a line drop that no working line has', () => {
+    const drop = (psi: string) =>
+      judgeFor({ ...STEADY, takenAt: 'elsewhere', lineDrop: { text: psi, unit: 'psi_diff' } }, [5, 7]);
+    expect(kinds(drop('2'))).not.toContain('ask notPlausible');
+    expect(kinds(drop('40'))).toContain('ask notPlausible');
+  });
+});

@@ -17,7 +17,7 @@ import {
 } from './judgement';
 import type { SuperheatAnswer, SuperheatStep } from './kinds/superheat';
 import { saturationOf } from './saturation-of';
-import { SUPERHEAT_CONDITIONS } from './superheat-conditions';
+import { DEFAULT_WAIT_S, SUPERHEAT_CONDITIONS } from './superheat-conditions';
 import { observe, type Observed, type ObservingScene } from './superheat-observing';
 import { readTypedValue } from './typed-value';
 
@@ -53,7 +53,7 @@ export function judgeSuperheatAnswer(
   const found = answer.asFound ? observe(answer.asFound, scene, foundDoubts) : null;
   // An as-found that can't be read is asked about; it doesn't keep the as-left from counting.
   doubts.push(...foundDoubts.map((doubt) => ({ ...doubt, severity: 'ask' as const })));
-  doubts.push(...conditionDoubts(answer), ...settlingDoubts(left));
+  doubts.push(...conditionDoubts(answer), ...settlingDoubts(left), ...waitDoubts(step, answer));
 
   const mean = meanOf(step, left);
   const band = { low: kelvinDifference(step.band.lowK), high: kelvinDifference(step.band.highK) };
@@ -72,6 +72,9 @@ export function judgeSuperheatAnswer(
       ...(error === null
         ? []
         : [{ label: 'superheatUncertainty', value: error.uncertainty, unit: 'K_diff' as const }]),
+      ...(answer.turns?.length && answer.waitedS !== undefined
+        ? [{ label: 'waited', value: answer.waitedS, unit: 's' as const }]
+        : []),
     ],
     limit: { low: step.band.lowK, high: step.band.highK, unit: 'K_diff', source: step.source ?? '' },
     working: [...left.workings, ...(found?.workings ?? []), ...(error === null ? [] : [error.working])].map(
@@ -106,6 +109,9 @@ function readAtmosphere({ instruments }: SuperheatAnswer, facts: SequenceFacts, 
   return read.pressure;
 }
 
+/** 5 psi: more than a suction line that works loses; manuals allow about 2. Common practice, no source. */
+const MOST_LINE_DROP_PA = 34_474;
+
 function readLineDrop(answer: SuperheatAnswer, doubts: Doubt[]): number | null {
   if (answer.takenAt !== 'elsewhere') return 0;
   const drop = answer.lineDrop ? readTypedValue(answer.lineDrop, 'pressureDifference') : null;
@@ -117,12 +123,19 @@ function readLineDrop(answer: SuperheatAnswer, doubts: Doubt[]): number | null {
     return null;
   }
   doubts.push({ kind: 'estimated', severity: 'ask' });
+  if (drop.si > MOST_LINE_DROP_PA) doubts.push({ kind: 'notPlausible', severity: 'ask' });
   return drop.si;
 }
 
 function conditionDoubts({ conditions }: SuperheatAnswer): Doubt[] {
   const areMet = !conditions || SUPERHEAT_CONDITIONS.every((condition) => conditions.includes(condition));
   return areMet ? [] : [{ kind: 'preliminary', severity: 'keep' }];
+}
+
+/** A reading right after a turn shows the turn, not the setting; it counts, and the lead sees it. */
+function waitDoubts(step: SuperheatStep, { turns = [], waitedS }: SuperheatAnswer): Doubt[] {
+  if (turns.length === 0 || waitedS === undefined) return [];
+  return waitedS < (step.waitS ?? DEFAULT_WAIT_S) ? [{ kind: 'readTooSoon', severity: 'ask' }] : [];
 }
 
 /** A series that shows that the valve hasn't settled is a true record of that, and no setting to sign off. */

@@ -161,6 +161,9 @@ function trace(atCoil: readonly SuctionSample[], scene: ObservingScene, doubts: 
     doubts.push({ kind: 'tooFewSamples', severity: 'refuse' });
     return null;
   }
+  // A trace with holes, or one that was watched for moments, counts and is looked at.
+  const isThin = read.samples.length < 0.9 * atCoil.length || analysed.settled === 'tooShort';
+  if (isThin) doubts.push({ kind: 'tooFewSamples', severity: 'ask' });
   return {
     midpoint: analysed.midpoint,
     timeWeighted: analysed.mean,

@@ -103,7 +103,8 @@ describe('judge of a trend', () => {
   it.each([
     ['a temperature too few', logOf(times(97, COLD), { temperatureK: times(96, COLD) }), 'tooFewSamples'],
     ['a time too few', logOf(times(97, COLD), { atS: [0, 900] }), 'tooFewSamples'],
-    ['no number among the temperatures', logOf([COLD, NaN, COLD]), 'notFinite'],
+    ['no number among the temperatures', logOf([COLD, NaN, COLD]), 'notPlausible'],
+    ['a figure that loggers write for a missing probe', logOf([COLD, -725.85, COLD]), 'notPlausible'],
     ['no number among the times', logOf([COLD, COLD], { atS: [0, NaN] }), 'notFinite'],
     ['one reading', logOf([COLD]), 'tooFewSamples'],
     ['no reading', logOf([]), 'tooFewSamples'],

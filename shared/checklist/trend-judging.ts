@@ -7,6 +7,7 @@ import { kelvin, second } from '../units/quantity';
 import type { SequenceFacts } from './facts';
 import { refusedJudgement, type Figure, type Judgement } from './judgement';
 import type { TrendAnswer, TrendStep } from './kinds/trend';
+import { physicalDoubt } from './physical-range';
 import { judged, refusedBy } from './methods/judged';
 
 /**
@@ -34,6 +35,8 @@ export function trendAnalysis(step: TrendStep, answer: TrendAnswer): PullDownRes
  */
 export function judgeTrend(step: TrendStep, answer: TrendAnswer, _facts: SequenceFacts): Judgement {
   if (answer.atS.length !== answer.temperatureK.length) return refusedJudgement('tooFewSamples');
+  if (answer.temperatureK.some((value) => physicalDoubt('temperature', value) !== null))
+    return refusedJudgement('notPlausible');
   const result = trendAnalysis(step, answer);
   if (!result.ok) return refusedBy(result.reason);
   if (result.outcome === 'tooShort') return refusedJudgement('tooFewSamples');

@@ -67,6 +67,9 @@ export const defrostRulesSchema = z.strictObject({
   stepS: z.int().check(z.gte(300), z.lte(DAY_S)),
 }) satisfies z.ZodMiniType<DefrostRules>;
 
+/** Of all circuits: a store of 200 circuits with six defrosts a day each has 1,200. */
+const MOST_STARTS_IN_ALL = 1500;
+
 const startsSchema = z.strictObject({
   circuitId: circuitIdSchema,
   startsS: z.array(secondOfDay).check(z.maxLength(MOST_STARTS)),
@@ -77,7 +80,12 @@ export const defrostPlanRequestSchema = z.strictObject({
   basedOn: z.int().check(z.gte(0)),
   rules: defrostRulesSchema,
   details: z.array(defrostDetailsSchema).check(z.maxLength(MOST_CIRCUITS)),
-  plan: z.array(startsSchema).check(z.maxLength(MOST_CIRCUITS)),
+  plan: z.array(startsSchema).check(
+    z.maxLength(MOST_CIRCUITS),
+    z.refine((plan) => new Set(plan.map(({ circuitId }) => circuitId)).size === plan.length),
+    // Checking looks at every start beside every other.
+    z.refine((plan) => plan.reduce((sum, { startsS }) => sum + startsS.length, 0) <= MOST_STARTS_IN_ALL),
+  ),
 });
 export type DefrostPlanRequest = z.infer<typeof defrostPlanRequestSchema>;
 

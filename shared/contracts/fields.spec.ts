@@ -141,8 +141,8 @@ describe('every schema of the contracts', () => {
   });
 
   it('gives each moment the form of an ISO 8601 time in UTC', () => {
-    // `takenAt` is a place; `readAt` is a device with its moment, which is checked as `at`.
-    const elsewhere = new Set(['takenAt', 'readAt']);
+    // `takenAt` is a place; `readAt` and `changedAt` hold their moment as `at`, which is checked.
+    const elsewhere = new Set(['takenAt', 'readAt', 'changedAt']);
     const moments = fields.filter(
       ({ name }) => /(^at|At|deviceTime|runAfter)$/.test(name) && !elsewhere.has(name),
     );

@@ -21,7 +21,7 @@ export const newRefrigerantTableSchema = z.strictObject({
     .check(z.trim(), z.maxLength(LONGEST_DESIGNATION), z.regex(/^(?=.*[A-Za-z0-9])[\x20-\x7e]+$/)),
   issuer: line(120),
   edition: line(120),
-  printedStepPa: z.number().check(z.positive(), z.lte(100_000)),
+  printedStepPa: z.number().check(z.positive(), z.lte(10_000)),
   safetyClass,
   points,
   /** Somebody looked at the sheet once more and the figures that are asked about stand so in it. */

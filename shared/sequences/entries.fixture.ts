@@ -38,9 +38,11 @@ export class Story {
     supersedes: EntryId | null = null,
   ): FoldEntry {
     const step = this.steps.find((candidate) => candidate.key === key) ?? confirmStep(key);
-    const { outcome, counts, figures } = judge(step, answer, SEA_LEVEL);
+    const judgement = judge(step, answer, SEA_LEVEL);
+    const { outcome, counts, figures } = judgement;
     const workedOut = { outcome, counts, figures };
-    return this.make(device, { kind: 'answer', stepKey: key, answer, workedOut }, supersedes);
+    const entry = this.make(device, { kind: 'answer', stepKey: key, answer, workedOut }, supersedes);
+    return { ...entry, server: { ...entry.server, judgement } };
   }
 
   notApplicable(device: number, key: string): FoldEntry {

@@ -38,6 +38,10 @@ export const foldStateSchema = z.object({
   headPosition: z.int(),
   stepListHash: z.nullable(sha256Schema),
   steps: z.record(z.string(), stepFoldSchema),
+  /** The newest change on the circuit that each device recorded; absent before the first. */
+  changedAt: z.optional(
+    z.record(z.string(), z.object({ at: z.iso.datetime(), entryId: entryIdSchema, stepKey: z.string() })),
+  ),
   arrived: z.record(deviceIdSchema, arrivedSchema),
   /** Submissions that wait for what they rest on: one of each author, so that nobody's replaces another's. */
   pending: z.array(

@@ -4,7 +4,7 @@ import { unreachable } from '../failures/unreachable';
 import { CHAIN_START } from './chain';
 import type { EntryBody, EntryContent, RestsOn, ServerPart } from './entry';
 import type { FoldState, StepFold } from './fold-state';
-import { changeOf, momentOf, staleSteps } from './stale';
+import { changeOf, momentOf, overtakenBy, staleSteps } from './stale';
 import { transitionFor } from './transitions';
 
 /** What the fold needs of an entry. One that isn't on the server yet has position 0 and no hash. */
@@ -51,7 +51,7 @@ export function applyEntry(before: FoldState, entry: FoldEntry, steps: readonly 
   markArrived(state, entry.body);
   if (entry.server.standing === 'late') return { ...state, lateCount: state.lateCount + 1 };
   if (entry.server.standing === 'held') return { ...state, heldCount: state.heldCount + 1 };
-  applyContent(state, entry, entry.body.content, steps);
+  applyContent(state, entry, entry.body.content);
   if (entry.server.stateAfter === undefined) settlePending(state, steps);
   else if (entry.server.stateAfter !== state.state) takeEffect(state, entry.server.stateAfter);
   return state;
@@ -72,15 +72,10 @@ export function missingSteps(state: FoldState, steps: readonly Step[]): readonly
   });
 }
 
-function applyContent(
-  state: FoldState,
-  entry: FoldEntry,
-  content: EntryContent,
-  steps: readonly Step[],
-): void {
+function applyContent(state: FoldState, entry: FoldEntry, content: EntryContent): void {
   switch (content.kind) {
     case 'answer':
-      applyAnswer(state, entry, content, steps);
+      applyAnswer(state, entry, content);
       return;
     case 'notApplicable':
       if (isUnknownStep(entry)) return;
@@ -111,7 +106,6 @@ function applyAnswer(
   state: FoldState,
   entry: FoldEntry,
   content: Extract<EntryContent, { kind: 'answer' }>,
-  steps: readonly Step[],
 ): void {
   const judged = entry.server.judgement ?? content.workedOut;
   if (isUnknownStep(entry)) return;
@@ -126,12 +120,30 @@ function applyAnswer(
         : null,
     ...(content.answer.kind === 'superheat' && judged.counts ? { readAt: momentOf(entry.body) } : {}),
   });
-  const change = changeOf(entry.body, content, steps);
-  if (change) reopen(state, staleSteps(state, content.stepKey, change, steps), entry.body.id);
+  applyChange(state, entry, content);
   // A note is a word beside the work, not part of what was signed for.
   if (content.answer.kind !== 'signature' && content.answer.kind !== 'note') {
     askSignaturesAgain(state, entry.body);
   }
+}
+
+/** What a change on the circuit makes stale, and whether a superheat was overtaken by one before it arrived. */
+function applyChange(
+  state: FoldState,
+  entry: FoldEntry,
+  content: Extract<EntryContent, { kind: 'answer' }>,
+): void {
+  const { stepKey } = content;
+  const fold = state.steps[stepKey];
+  const overtaking = fold?.readAt ? overtakenBy(state, stepKey, fold.readAt) : null;
+  if (overtaking !== null) reopen(state, [stepKey], overtaking);
+  const change = changeOf(entry.body, content, entry.server.judgement);
+  if (!change) return;
+  reopen(state, staleSteps(state, stepKey, change), entry.body.id);
+  state.changedAt = {
+    ...state.changedAt,
+    [change.deviceId ?? '']: { at: change.at, entryId: entry.body.id, stepKey },
+  };
 }
 
 /** Asks for the signatures again that stood before this was recorded. */

@@ -302,17 +302,46 @@ describe('the fold of a superheat', () => {
   });
 });
 
-describe('changeOf and staleSteps', () => {
-  it('know of no change on a step that isn’t asked, nor of a stale step that isn’t', () => {
-    const story = new Story(STEPS);
+describe('what was recorded, whatever is asked today', () => {
+  const story = new Story(STEPS);
+  const entries = [
+    at('12:00:00', story.answer(1, 'coilA', read())),
+    at('12:10:00', story.answer(1, 'regulator', READING)),
+  ];
+
+  it('decides what is stale: a template that marks the step no more, or asks it no more, changes no history', () => {
+    const unmarked = STEPS.map((step) =>
+      step.key === 'regulator' ? buildStep('reading', { key: step.key }) : step,
+    );
+    for (const steps of [STEPS, unmarked, STEPS.slice(0, 2)]) {
+      expect(foldEntries(entries, steps).steps['coilA']?.reopenedBy).toBe(entries[1]?.body.id);
+    }
+  });
+
+  it('knows of no change without the mark of that day', () => {
     const set = story.answer(1, 'regulator', READING);
     if (set.body.content.kind !== 'answer') throw new Error('no answer');
-    expect(changeOf(set.body, set.body.content, STEPS)).toEqual(momentOf(set.body));
-    expect(changeOf(set.body, set.body.content, STEPS.slice(0, 2))).toBeNull();
-    const state = foldEntries([at('12:00:00', story.answer(1, 'coilA', read()))], STEPS);
-    const change = { ...momentOf(set.body), at: day('13:00:00') };
-    expect(staleSteps(state, 'regulator', change, STEPS)).toEqual(['coilA']);
-    expect(staleSteps(state, 'regulator', change, STEPS.slice(1))).toEqual([]);
-    expect(staleSteps(emptyFold(), 'regulator', change, STEPS)).toEqual([]);
+    expect(changeOf(set.body, set.body.content, set.server.judgement)).toEqual(momentOf(set.body));
+    expect(changeOf(set.body, set.body.content, null)).toBeNull();
+    expect(staleSteps(emptyFold(), 'regulator', momentOf(set.body))).toEqual([]);
+  });
+});
+
+describe('a reading that arrives after a change it was taken before', () => {
+  const story = new Story(STEPS);
+  const turned = at('12:30:00', story.answer(1, 'coilB', read('12:20:00')));
+
+  it('is stale at once, and leaves a stale one stale', () => {
+    const before = at('12:10:00', story.answer(1, 'coilA', read()));
+    expect(again([turned, before])).toEqual({ coilA: 'stale' });
+    const fresh = at('12:05:00', story.answer(1, 'coilA', read()));
+    expect(again([fresh, turned, before])).toEqual({ coilA: 'stale' });
+  });
+
+  it('is fresh when it was taken after it, or on another device', () => {
+    expect(again([turned, at('12:40:00', story.answer(1, 'coilA', read()))])).toEqual({});
+    expect(again([turned, at('12:10:00', story.answer(2, 'coilA', read()))])).toEqual({});
+    // Its own turns came before its own reading.
+    expect(again([turned, at('12:30:00', story.answer(1, 'coilB', read('12:20:00')))])).toEqual({});
   });
 });

@@ -1,4 +1,5 @@
-import type { Step } from '../checklist/step';
+import type { Judgement } from '../checklist/judgement';
+import type { EntryId } from '../plant/ids';
 import type { EntryBody, EntryContent } from './entry';
 import type { FoldState, StepFold } from './fold-state';
 
@@ -15,26 +16,21 @@ export const momentOf = (body: EntryBody): DeviceMoment => ({ deviceId: body.dev
 
 /**
  * When an answer says that the circuit runs otherwise than before: the last turn of a valve, or the recording of a step
- * (or option) that the template marks so, such as a regulator that was set.
+ * (or option) that the template marked so on that day, such as a regulator that was set. Neither the steps that are
+ * asked today nor their marks have a say: whoever folds the history later has others.
  *
  * @returns `null` when nothing changed
  */
 export function changeOf(
   body: EntryBody,
-  { stepKey, answer }: AnswerContent,
-  steps: readonly Step[],
+  { answer }: AnswerContent,
+  judgement: Judgement | null,
 ): DeviceMoment | null {
   if (answer.kind === 'superheat') {
     const last = (answer.turns ?? []).toSorted((a, b) => compare(a.at, b.at)).at(-1);
     return last === undefined ? null : { deviceId: body.deviceId, at: last.at };
   }
-  const step = steps.find((candidate) => candidate.key === stepKey);
-  if (!step || step.kind !== answer.kind) return null;
-  const changes =
-    step.kind === 'choose' && answer.kind === 'choose'
-      ? step.options.find((option) => option.value === answer.value)?.changes
-      : 'changes' in step && step.changes;
-  return changes ? momentOf(body) : null;
+  return judgement?.changes ? momentOf(body) : null;
 }
 
 /**
@@ -44,18 +40,23 @@ export function changeOf(
  *
  * @param ownKey the step that the change was recorded on: its own reading came after its own turns
  */
-export function staleSteps(
-  state: FoldState,
-  ownKey: string,
-  change: DeviceMoment,
-  steps: readonly Step[],
-): string[] {
-  return steps
-    .filter((step) => step.kind === 'superheat' && step.key !== ownKey)
-    .map((step) => step.key)
-    .filter((key) => {
-      const fold = state.steps[key];
-      if (!fold?.counts || fold.reopenedBy !== null || !fold.readAt) return false;
+export function staleSteps(state: FoldState, ownKey: string, change: DeviceMoment): string[] {
+  return Object.entries(state.steps)
+    .filter(([key, fold]) => {
+      if (key === ownKey || !fold.counts || fold.reopenedBy !== null || !fold.readAt) return false;
       return fold.readAt.deviceId !== change.deviceId || compare(fold.readAt.at, change.at) < 0;
-    });
+    })
+    .map(([key]) => key);
+}
+
+/**
+ * What makes a superheat stale the moment that it arrives: a change on the same device, recorded after it was read and
+ * delivered before it.
+ *
+ * @returns the change's entry, or `null`
+ */
+export function overtakenBy(state: FoldState, ownKey: string, read: DeviceMoment): EntryId | null {
+  const last = state.changedAt?.[read.deviceId ?? ''];
+  if (!last || last.stepKey === ownKey) return null;
+  return compare(read.at, last.at) < 0 ? last.entryId : null;
 }

@@ -92,7 +92,8 @@ function coilsOf(
         stepKey: step.key,
         superheatK: figure('superheat'),
         minimumSuperheatK: figure('superheatLow'),
-        asLeftStale: !!fold && fold.reopenedBy !== null,
+        // A reading that doesn't count clears no coil.
+        asLeftStale: !!fold && (fold.reopenedBy !== null || !fold.counts),
         sinceDefrostS: sinceDefrost(circuit, entries, now),
         overrideStanding: document.stepList.steps.some(
           (each) =>

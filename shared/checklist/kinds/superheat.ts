@@ -4,10 +4,7 @@ import type { StepRules } from '../step-rules';
 import { typedValueSchema } from '../typed-value';
 import { SUPERHEAT_CONDITIONS } from '../superheat-conditions';
 import { judgeSuperheatAnswer } from '../superheat-judging';
-import { logFileSchema, MOST_SAMPLES } from './trend';
-
-/** What a valve is given to settle after a turn where the template says nothing; manuals say 15 and 30 minutes. */
-export const DEFAULT_WAIT_S = 900;
+import { logFileSchema, samplesOf, timeSchema } from './trend';
 
 export const superheatStepSchema = z.object({
   kind: z.literal('superheat'),
@@ -24,9 +21,7 @@ export const superheatPairSchema = z.object({ pressure: typedValueSchema, temper
 export type SuperheatPair = z.infer<typeof superheatPairSchema>;
 
 /** One pair of a series typed at intervals; `atS` counts from the first. */
-const timedPairSchema = z.object({ atS: z.number(), ...superheatPairSchema.shape });
-
-const samples = z.array(z.number()).check(z.maxLength(MOST_SAMPLES));
+const timedPairSchema = z.object({ atS: timeSchema, ...superheatPairSchema.shape });
 
 /**
  * A steady valve needs one pair; a hunting one the pair at its lowest and the pair at its highest superheat, or a
@@ -39,9 +34,9 @@ export const superheatObservationSchema = z.discriminatedUnion('valve', [
   z.object({
     valve: z.literal('log'),
     file: logFileSchema,
-    atS: samples,
-    pressurePag: samples,
-    temperatureK: samples,
+    atS: samplesOf(timeSchema),
+    pressurePag: samplesOf(z.number().check(z.gte(-1e7), z.lte(1e9))),
+    temperatureK: samplesOf(z.number().check(z.gte(-1000), z.lte(10_000))),
   }),
 ]);
 export type SuperheatObservation = z.infer<typeof superheatObservationSchema>;
@@ -54,7 +49,7 @@ export const valveTurnSchema = z.object({
 });
 export type ValveTurn = z.infer<typeof valveTurnSchema>;
 
-export { SUPERHEAT_CONDITIONS, type SuperheatCondition } from '../superheat-conditions';
+export { DEFAULT_WAIT_S, SUPERHEAT_CONDITIONS, type SuperheatCondition } from '../superheat-conditions';
 
 export const GAUGE_KINDS = ['vented', 'sealed', 'absolute'] as const;
 
@@ -80,6 +75,8 @@ export const superheatAnswerSchema = z.object({
   turns: z.optional(z.array(valveTurnSchema).check(z.maxLength(50))),
   /** What turning clockwise does by the valve's own sheet; makers differ, so `null` where nobody looked it up. */
   clockwise: z.optional(z.nullable(z.enum(['raisesSuperheat', 'lowersSuperheat']))),
+  /** Seconds from the last turn to the as-left reading, by the phone that took both; absent without turns. */
+  waitedS: z.optional(timeSchema),
   /** Those of the conditions that were met. Absent in answers of the first release: not asked. */
   conditions: z.optional(
     z.array(z.enum(SUPERHEAT_CONDITIONS)).check(z.maxLength(SUPERHEAT_CONDITIONS.length)),

@@ -6,6 +6,12 @@ import type { StepRules } from '../step-rules';
 /** Samples that an entry holds at most: a longer log is reduced so that no extreme is lost. */
 export const MOST_SAMPLES = 6000;
 
+/** Seconds of a log or a series, from its first: three years at most, so that no sum of them loses its way. */
+export const timeSchema = z.number().check(z.gte(0), z.lte(100_000_000));
+
+/** As many numbers as an entry holds. */
+export const samplesOf = (number: z.ZodMiniNumber) => z.array(number).check(z.maxLength(MOST_SAMPLES));
+
 /** The data logger's file behind an answer: the answer holds what was judged, the hash says of which file it is. */
 export const logFileSchema = z.object({
   name: z.string().check(z.maxLength(200)),
@@ -35,8 +41,8 @@ export const trendAnswerSchema = z.object({
   /** Heading of the column that was judged. */
   column: z.string().check(z.maxLength(120)),
   /** Seconds from the first row, ascending, and the temperature at each in kelvin. */
-  atS: z.array(z.number()).check(z.maxLength(MOST_SAMPLES)),
-  temperatureK: z.array(z.number()).check(z.maxLength(MOST_SAMPLES)),
+  atS: samplesOf(timeSchema),
+  temperatureK: samplesOf(z.number().check(z.gte(-1000), z.lte(10_000))),
 });
 
 export type TrendStep = z.infer<typeof trendStepSchema>;

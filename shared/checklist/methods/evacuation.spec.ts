@@ -26,6 +26,9 @@ describe('an evacuation’s rise test', () => {
   it.each([
     ['0:300 60:480', 'within', null, 'dryAndTight'],
     ['0:300 60:500', 'within', null, 'dryAndTight'],
+    ['0:300 60:295', 'within', null, 'dryAndTight'],
+    // An isolated system can't get deeper by itself.
+    ['0:300 60:50', 'outside', 'low', 'falling'],
     ['0:300 60:620', 'outside', 'high', 'overLimit'],
     ['0:300 20:407 40:513 60:620', 'outside', 'high', 'leak'],
     ['0:300 20:560 40:610 60:620', 'outside', 'high', 'moisture'],

@@ -4,6 +4,9 @@ import { refusedJudgement } from '../judgement';
 import { judged, refusedBy } from './judged';
 import { criterion, criterionIfAny, defineMethod, quantity, quantityIfKnown } from './method';
 
+/** A vacuum gauge's own unrest and its slow way to a reading: 10 µm; common practice, no source. */
+const GAUGE_NOISE_PA = 1.333224;
+
 /** The rise test that ends an evacuation: pump isolated, micron gauge watched. The template sets every criterion. */
 export const evacuationMethod = defineMethod({
   title: { en: 'Evacuation, rise test', es: 'Vacío, prueba de aumento' },
@@ -43,10 +46,15 @@ export const evacuationMethod = defineMethod({
       ...(ambientTemperature === null ? {} : { ambientTemperature: kelvin(ambientTemperature) }),
     });
     if (!result.ok) return refusedBy(result.reason);
+    // The first value that an isolated system can't show: then the valve wasn't shut, or rows were mixed up.
+    const falls =
+      result.verdict === 'dryAndTight' &&
+      result.risePa < -Math.max(GAUGE_NOISE_PA, 0.1 * (result.endPressure - result.risePa));
+    const verdict = falls ? 'falling' : result.verdict;
     return judged({
-      outcome: result.verdict === 'dryAndTight' ? 'within' : 'outside',
-      side: result.verdict === 'dryAndTight' || result.verdict === 'tooShort' ? null : 'high',
-      verdicts: [`evacuation_${result.verdict}`, ...result.notes.map((note) => `evacuation_${note}`)],
+      outcome: verdict === 'dryAndTight' ? 'within' : 'outside',
+      side: verdict === 'dryAndTight' || verdict === 'tooShort' ? null : falls ? 'low' : 'high',
+      verdicts: [`evacuation_${verdict}`, ...result.notes.map((note) => `evacuation_${note}`)],
       figures: [
         { label: 'endVacuum', value: result.endPressure, unit: 'Pa_vac' },
         { label: 'rise', value: result.risePa, unit: 'Pa_vac' },

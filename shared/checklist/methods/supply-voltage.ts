@@ -1,4 +1,7 @@
-import { judgeSupplyVoltage } from '../../refrigeration/electrical/supply-voltage';
+import {
+  DEFAULT_GREATEST_UNBALANCE,
+  judgeSupplyVoltage,
+} from '../../refrigeration/electrical/supply-voltage';
 import { volt } from '../../units/quantity';
 import { judged, refusedBy } from './judged';
 import { criterionIfAny, defineMethod, quantity } from './method';
@@ -37,6 +40,10 @@ export const supplyVoltageMethod = defineMethod({
           : [{ label: 'unbalance', value: result.unbalance, unit: 'fraction' as const }]),
         { label: 'furthestFromNameplate', value: furthest, unit: 'fraction' },
       ],
+      limit:
+        result.unbalance === null
+          ? null
+          : { low: null, high: greatestUnbalance ?? DEFAULT_GREATEST_UNBALANCE, unit: 'fraction' },
       working: [result.working],
       source,
     });

@@ -93,6 +93,10 @@ export const DOUBT_WORDS: Readonly<Record<DoubtKind, Text>> = {
     en: 'A cylinder that charges got heavier, or one that recovers got lighter. Swapped?',
     es: 'Un cilindro que carga pesa más, o uno que recupera pesa menos. ¿Están al revés?',
   },
+  readTooSoon: {
+    en: 'Read before the valve had its time to settle after the last turn.',
+    es: 'Leído antes de que la válvula tuviera su tiempo para estabilizarse después de la última vuelta.',
+  },
   barometerSeaLevel: {
     en: 'The barometer reading looks corrected to sea level. Use the station pressure.',
     es: 'La lectura del barómetro parece corregida al nivel del mar. Use la presión de la estación.',

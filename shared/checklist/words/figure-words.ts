@@ -118,6 +118,7 @@ export const FIGURE_WORDS: Readonly<Record<string, Text>> = {
   superheatTimeWeighted: { en: 'Time-weighted mean', es: 'Media ponderada en el tiempo' },
   superheatMidpoint: { en: 'Middle of high and low', es: 'Punto medio entre máximo y mínimo' },
   superheatUncertainty: { en: 'Instruments’ error ±', es: 'Error de los instrumentos ±' },
+  waited: { en: 'Read this long after the last turn', es: 'Leído tanto tiempo después de la última vuelta' },
   lineDrop: { en: 'Line drop added', es: 'Caída en la línea sumada' },
   gaugeZero: { en: 'Gauge’s zero', es: 'Cero del manómetro' },
   minimumSuperheat: { en: 'Lowest superheat', es: 'Sobrecalentamiento mínimo' },

@@ -27,6 +27,10 @@ export const VERDICT_WORDS: Readonly<Record<string, Text>> = {
     en: 'It did not stand isolated long enough.',
     es: 'No estuvo aislado el tiempo pedido.',
   },
+  evacuation_falling: {
+    en: 'The vacuum got deeper while isolated: valve not shut, pump still on, or rows mixed up.',
+    es: 'El vacío aumentó estando aislado: válvula sin cerrar, bomba encendida o renglones cambiados.',
+  },
   evacuation_notDeepEnough: {
     en: 'Isolated before the target was reached.',
     es: 'Se aisló antes de alcanzar el objetivo.',

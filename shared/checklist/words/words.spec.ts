@@ -83,6 +83,7 @@ const ROWS: Partial<Record<MethodKey, readonly NonNullable<Measured['rows']>[]>>
   evacuation: [
     '0:300',
     '0:300 60:480',
+    '0:300 60:50',
     '0:300 60:620',
     '0:300 30:310',
     '0:400 60:480',
@@ -156,10 +157,17 @@ function superheats(): Judgement[] {
     takenAt: fc.constantFrom('coilOutlet', 'coilOutlet', 'elsewhere'),
     lineDrop: fc.constantFrom(null, typed('2'), typed('-2')),
     conditions: fc.constantFrom([...SUPERHEAT_CONDITIONS], []),
+    turns: fc.constantFrom([], [{ turns: 0.5, direction: 'clockwise', at: '2027-01-15T12:00:00Z' } as const]),
+    waitedS: fc.constantFrom(60, 1800),
     instruments: fc.record({
       gauge: fc.constantFrom('vented', 'sealed', 'absolute'),
       pressureAccuracy: fc.constantFrom(null, typed('1'), typed('x')),
       temperatureAccuracy: fc.constant({ text: '1', unit: 'degF_diff' }),
+      barometer: fc.constantFrom(
+        null,
+        { text: '26.6', unit: 'inHg' as const },
+        { text: '29.92', unit: 'inHg' as const },
+      ),
     }),
   });
   const facts = { ...SEA_LEVEL, refrigerant: 'R-404A', atmospherePaAbs: 90_000 };

@@ -2,6 +2,7 @@ import type { SaturationTable } from '../saturation/saturation-table';
 import { likenessProblems } from './likeness';
 import { FEWEST_POINTS, problem, type MakersTable, type MakersTableProblem } from './makers-table';
 import { numberProblems, orderProblems, phaseProblems } from './order-problems';
+import { ownFigureProblems } from './own-figures';
 import { smoothnessProblems } from './smoothness';
 
 const isBlank = (text: string): boolean => text.trim() === '';
@@ -60,4 +61,8 @@ const isAboutColumns = ({ code }: MakersTableProblem): boolean =>
 export const checkMakersTable = (
   table: MakersTable,
   relatives: readonly SaturationTable[],
-): MakersTableProblem[] => [...namingProblems(table), ...figureProblems(table, relatives)];
+): MakersTableProblem[] => [
+  ...namingProblems(table),
+  ...figureProblems(table, relatives),
+  ...ownFigureProblems(table),
+];

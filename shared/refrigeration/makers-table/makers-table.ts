@@ -35,7 +35,8 @@ export interface MakersTable {
  *
  * Asked: `noEdition`; `gaugeTakenForAbsolute`, `absoluteTakenForGauge`, `celsiusInFahrenheit`, `fahrenheitInCelsius` (the
  * figures behave like a refrigerant only after that mistake is undone; named as in `DoubtKind`: °C typed as °F, °F typed
- * as °C); `unlikeAnyRefrigerant` (they behave like none); `farFromRelatives` (the pressure is far from all relatives).
+ * as °C); `unlikeAnyRefrigerant` (they behave like none); `farFromRelatives` (the pressure is far from all relatives);
+ * `differsFromOwn` (the program has figures of the very same refrigerant, and they say something else).
  */
 export type MakersTableProblemCode =
   | 'noDesignation'
@@ -59,7 +60,8 @@ export type MakersTableProblemCode =
   | 'celsiusInFahrenheit'
   | 'fahrenheitInCelsius'
   | 'unlikeAnyRefrigerant'
-  | 'farFromRelatives';
+  | 'farFromRelatives'
+  | 'differsFromOwn';
 
 export type PhaseColumn = 'bubble' | 'dew';
 

@@ -19,9 +19,13 @@ export function trendBlocks(circuit: CircuitContext, entry: FoldEntry, step: Ste
   const { content } = entry.body;
   if (content.kind !== 'answer' || content.answer.kind !== 'trend') return [];
   const { answer } = content;
+  const ordered = answer.atS
+    .map((at, index) => ({ at, kelvins: answer.temperatureK[index] ?? NaN }))
+    .filter(({ kelvins }) => Number.isFinite(kelvins))
+    .sort((a, b) => a.at - b.at);
   const drawn = reduceSamples(
-    Float64Array.from(answer.atS),
-    Float64Array.from(answer.temperatureK),
+    Float64Array.from(ordered, ({ at }) => at),
+    Float64Array.from(ordered, ({ kelvins }) => kelvins),
     MOST_POINTS,
   );
   const temperature = (kelvins: number): string => format.ofDimension(kelvins, 'temperature');

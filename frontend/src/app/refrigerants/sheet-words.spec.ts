@@ -44,6 +44,11 @@ const EACH: Readonly<Record<Code, Partial<MakersTableProblem>>> = {
   fahrenheitInCelsius: {},
   unlikeAnyRefrigerant: { values: [{ label: 'pressureRatio', value: 3.21, unit: 'fraction' }] },
   farFromRelatives: { values: [{ label: 'pressureRatio', value: 3.21, unit: 'fraction' }] },
+  differsFromOwn: {
+    row: 2,
+    column: 'dew',
+    values: [{ label: 'differenceFromOwn', value: 6, unit: 'K_diff' }],
+  },
 };
 const READING: Readonly<Record<ReadingProblem['code'], Partial<ReadingProblem>>> = {
   empty: {},

@@ -35,7 +35,9 @@ export function isCorrected({ step, history }: Pick<StepView, 'step' | 'history'
 /** Whether the valve was left hunting: its superheat is the middle of two, which deserves a look however it is judged. */
 export function isHunting(entry: FoldEntry | null): boolean {
   const answer = answerOf(entry);
-  return answer?.kind === 'superheat' && answer.asLeft.valve === 'hunting';
+  if (answer?.kind !== 'superheat') return false;
+  const shown = entry?.server.judgement?.verdicts ?? [];
+  return answer.asLeft.valve === 'hunting' || shown.includes('superheat_hunts');
 }
 
 /** Whether nobody took the superheat before the valve was touched. */

@@ -14,6 +14,7 @@ import { photosNotWell, photosOf, type PhotoStatus } from './photo-states';
 export const REASONS = [
   'outside',
   'liquidRisk',
+  'stale',
   'recordedAgain',
   'doubt',
   'answeredTwice',
@@ -87,8 +88,10 @@ export function reasonsOf(step: StepView, around: Surroundings): readonly Reason
   const holds: Readonly<Record<Reason, boolean>> = {
     outside: fold?.outcome === 'outside',
     liquidRisk: doubts.some(({ kind }) => kind === 'liquidRisk'),
+    stale: step.again === 'stale',
     recordedAgain: isAgain,
-    doubt: doubts.some(({ kind }) => kind !== 'liquidRisk'),
+    // The first half of a test that goes on is no doubt.
+    doubt: doubts.some(({ kind }) => kind !== 'liquidRisk' && kind !== 'incomplete'),
     answeredTwice: fold?.answeredTwice ?? false,
     photoBroken: notWell.some(({ state }) => state === 'broken'),
     photoAwaited: notWell.some(({ state }) => state === 'awaited'),

@@ -92,6 +92,12 @@ export class ReviewPage {
     const items = this.store.items();
     return items.find(({ view }) => view.step.key === this.step()) ?? items[0] ?? null;
   });
+  /** As lists say it: what has a recording is under way. */
+  protected readonly standing = computed(() => {
+    const { fold } = this.store.sequence() ?? {};
+    if (!fold) return 'open';
+    return fold.state === 'open' && fold.headPosition > 1 ? 'underWay' : fold.state;
+  });
   protected readonly isHelpOpen = signal(false);
   /** On a phone there is room for one: the list or the evidence. */
   protected readonly isListOpen = linkedSignal({ source: this.sequenceId, computation: () => true });

@@ -1,4 +1,8 @@
 import type { Figure, Judgement } from '#shared/checklist/judgement';
+import type { MeasurementBoxes } from '#shared/checklist/kinds/measurement';
+import type { MethodField } from '#shared/checklist/methods/method';
+import { METHODS } from '#shared/checklist/methods/methods';
+import type { Text } from '#shared/checklist/text';
 import type { Step } from '#shared/checklist/step';
 import type { TypedValue } from '#shared/checklist/typed-value';
 import { UNITS, type Dimension } from '#shared/units/unit';
@@ -139,6 +143,44 @@ function dewTemperaturesK(judgement: Judgement | null): readonly number[] {
   return (judgement?.working ?? []).flatMap(({ formula, lines }) => {
     const dew = lines.find(({ label, unit }) => label === 'dewTemperature' && unit === 'K');
     return formula === 'superheatFromDew' && dew ? [dew.value] : [];
+  });
+}
+
+/** One box of a measurement as it was filled: its name is the method's own. */
+export interface MeasuredLine {
+  readonly label: Text;
+  readonly text: Text;
+}
+
+/** Everything that was typed into a measurement, row by row, empty boxes left out. */
+export function measuredLines(content: EntryContent): readonly MeasuredLine[] {
+  if (content.kind !== 'answer' || content.answer.kind !== 'measurement') return [];
+  const { answer } = content;
+  const { fields, rows } = METHODS[answer.method];
+  return [
+    ...boxLines(fields, answer, { en: '', es: '' }),
+    ...answer.rows.flatMap((row, index) => {
+      const { en, es } = rows?.label ?? { en: '', es: '' };
+      return boxLines(rows?.fields ?? [], row, { en: `${en} ${index + 1}: `, es: `${es} ${index + 1}: ` });
+    }),
+  ];
+}
+
+function boxLines(
+  fields: readonly MethodField[],
+  { quantities, words }: Pick<MeasurementBoxes, 'quantities' | 'words'>,
+  before: Text,
+): MeasuredLine[] {
+  return fields.flatMap((field): MeasuredLine[] => {
+    const label = { en: before.en + field.label.en, es: before.es + field.label.es };
+    if (field.kind === 'quantity') {
+      const typed = quantities[field.key];
+      const text = typed ? `${typed.text} ${UNITS[typed.unit].symbol}`.trim() : '';
+      return text === '' ? [] : [{ label, text: { en: text, es: text } }];
+    }
+    const word = words[field.key] ?? '';
+    const option = field.kind === 'choice' ? field.options.find(({ value }) => value === word) : undefined;
+    return word === '' ? [] : [{ label, text: option?.label ?? { en: word, es: word } }];
   });
 }
 

@@ -16,10 +16,11 @@ import { WorkingSlip } from '../working-slip/working-slip';
 import {
   chosenLabel,
   judgedFigure,
+  measuredLines,
   otherFigures,
   pairLines,
-  typedInputs,
   type TypedInput,
+  typedInputs,
 } from './answer-figures';
 import { SuperheatExtras } from './superheat-extras';
 import { judgedMean } from './superheat-lines';
@@ -55,6 +56,8 @@ export class AnswerView {
   readonly entry = input.required<FoldEntry>();
   readonly unitSystem = input.required<UnitSystem>();
   readonly photoUrl = input.required<PhotoUrl>();
+  /** The store's: moments are told as they were on site. */
+  readonly timeZone = input<string>();
   /** Whether the working lies open at once; otherwise one tap opens it. */
   readonly openWorking = input(false);
   /** Index of the photo that was asked for at full size. */
@@ -96,6 +99,7 @@ export class AnswerView {
   });
   /** Which of a superheat's two averages is held against the band. */
   protected readonly judgedMean = computed(() => judgedMean(this.step()));
+  protected readonly measured = computed(() => measuredLines(this.content()));
   protected readonly chosen = computed(() => {
     const answer = this.answer();
     return answer?.kind === 'choose' ? chosenLabel(this.step(), answer.value) : null;

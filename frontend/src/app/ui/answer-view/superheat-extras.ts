@@ -21,7 +21,7 @@ import { superheatLines, type SuperheatLine } from './superheat-lines';
               {{ t(key, valuesOf(line)) }}
             }
             @if (line.at) {
-              <small>{{ line.at | appDateTime }}</small>
+              <small>{{ line.at | appDateTime: timeZone() }}</small>
             }
           </dd>
         </div>
@@ -53,6 +53,8 @@ import { superheatLines, type SuperheatLine } from './superheat-lines';
 })
 export class SuperheatExtras {
   readonly answer = input.required<SuperheatAnswer>();
+  /** The store's, where it is known; else the reader's own. */
+  readonly timeZone = input<string>();
 
   private readonly language = readingLanguage();
   protected readonly lines = computed(() => superheatLines(this.answer(), this.language()));

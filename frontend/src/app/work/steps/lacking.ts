@@ -2,6 +2,7 @@
 export const LACKINGS = [
   'reading',
   'log',
+  'logInFuture',
   'choice',
   'photo',
   'words',

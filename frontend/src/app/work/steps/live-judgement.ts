@@ -32,7 +32,7 @@ import { WorkingSlip } from '../../ui/working-slip/working-slip';
             [unitSystem]="unitSystem()"
           />
         }
-        @if (judged.limit) {
+        @if (judged.outcome === 'within' || judged.outcome === 'outside') {
           <app-outcome-mark [outcome]="judged.outcome" [side]="judged.side" />
         }
         @for (verdict of judged.verdicts ?? []; track verdict) {

@@ -1,4 +1,9 @@
-import type { SuperheatAnswer, SuperheatObservation, SuperheatPair } from '#shared/checklist/kinds/superheat';
+import type {
+  SuperheatAnswer,
+  SuperheatObservation,
+  SuperheatPair,
+  ValveTurn,
+} from '#shared/checklist/kinds/superheat';
 import type { UnitId } from '#shared/units/unit';
 import { displayUnit, type UnitSystem } from '#shared/units/unit-system';
 import { readSince } from '../coil-walk/clock-text';
@@ -110,6 +115,16 @@ function instrumentsOf(typed: TypedInstruments, system: UnitSystem): Pick<Superh
   };
 }
 
+/** How long after the last turn the as-left was read. */
+function waitedOf(
+  turns: readonly ValveTurn[],
+  leftAtMs: number | undefined,
+): Pick<SuperheatAnswer, 'waitedS'> {
+  const last = turns.at(-1);
+  if (!last || leftAtMs === undefined) return {};
+  return { waitedS: Math.max(0, Math.round((leftAtMs - Date.parse(last.at)) / 1000)) };
+}
+
 /**
  * The answer that the form makes.
  *
@@ -131,7 +146,7 @@ export function superheatAnswerOf(typed: TypedSuperheat, system: UnitSystem): Su
     asFound,
     asLeft,
     ...howRead(typed, system),
-    ...(turns.length > 0 ? { turns } : {}),
+    ...(turns.length > 0 ? { turns, ...waitedOf(turns, typed.leftAtMs) } : {}),
     ...(turns.length > 0 || clockwise ? { clockwise } : {}),
     conditions: [...conditions],
   };

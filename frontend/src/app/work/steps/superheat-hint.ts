@@ -43,9 +43,9 @@ export function valveLog(turns: readonly TypedTurn[], nowK: number | null): Valv
 
 /**
  * What to say about the valve: the hint's own codes, and two of readings with a swing. `liquidAtLowest`: the mean is above
- * zero, the lowest isn't.
+ * zero, the lowest isn't. `huntsInBand`: the mean is right, but the valve swings by more than a settled one does.
  */
-export type HintCode = ValveHintCode | 'liquidAtLowest';
+export type HintCode = ValveHintCode | 'liquidAtLowest' | 'huntsInBand';
 
 export interface HintWords {
   readonly code: HintCode;
@@ -85,11 +85,19 @@ export function hintOf(
   return hint.ok ? wordsOf(hint, judgement) : null;
 }
 
+/** A swing larger than this is hunting: common practice, no source. */
+const HUNTS_ABOVE_K = 2;
+
+const swingK = (judgement: Judgement): number =>
+  (figureOf(judgement, 'superheatHigh') ?? 0) - (figureOf(judgement, 'superheatLow') ?? 0);
+
 function wordsOf({ code, direction, size }: ValveHint, judgement: Judgement): HintWords | null {
   if (code === 'liquid') return { code, direction, size, isCaution: true };
   if (judgement.doubts.some(({ kind }) => kind === 'liquidRisk'))
     return { code: 'liquidAtLowest', direction: null, size: null, isCaution: true };
   // The judgement itself says "watch it longer"; a turn now would only stir what hasn't come to rest.
   if (code !== 'wait' && judgement.doubts.some(({ kind }) => kind === 'notSettled')) return null;
+  if ((code === 'leave' || code === 'withinError') && swingK(judgement) > HUNTS_ABOVE_K)
+    return { code: 'huntsInBand', direction: null, size: null, isCaution: false };
   return { code, direction, size, isCaution: false };
 }

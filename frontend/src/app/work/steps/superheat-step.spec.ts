@@ -92,7 +92,11 @@ const radio = (element: HTMLElement, words: string): HTMLInputElement =>
     .find((label) => textOf(label).startsWith(words))!
     .querySelector('input')!;
 
-beforeEach(() => localStorage.clear());
+beforeEach(() => {
+  localStorage.clear();
+  // jsdom lays nothing out, so nothing scrolls there.
+  Element.prototype.scrollIntoView = () => undefined;
+});
 
 describe('SuperheatStep', () => {
   it('says before recording that a reading without its conditions is preliminary', async () => {

@@ -1,4 +1,12 @@
-import { ChangeDetectionStrategy, Component, computed, effect, inject, signal } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  effect,
+  ElementRef,
+  inject,
+  signal,
+} from '@angular/core';
 import { TranslocoPipe } from '@jsverse/transloco';
 import { DEFAULT_WAIT_S, type ValveTurn } from '#shared/checklist/kinds/superheat';
 import { PhoneDevice } from '../../session/phone-device';
@@ -53,6 +61,7 @@ type Look = (typeof LOOKS)[number];
   styleUrl: './segments.scss',
 })
 export class SuperheatStep {
+  private readonly host = inject<ElementRef<HTMLElement>>(ElementRef);
   private readonly memory = inject(InstrumentMemory);
   private readonly nowMs = inject(NOW_MS);
   private readonly now = ticking();
@@ -106,13 +115,18 @@ export class SuperheatStep {
   }
 
   protected change(change: Partial<TypedSuperheat>): void {
-    this.typed.set({ ...this.typed(), ...change });
+    const read = change.asLeft ? { leftAtMs: this.nowMs() } : {};
+    this.typed.set({ ...this.typed(), ...change, ...read });
     if (change.instruments) this.memory.keep(this.facts.unitSystem, change.instruments);
   }
 
   protected turn(turn: Omit<ValveTurn, 'at'>): void {
     const newestK = readSuperheatK(this.newestJudgement());
     this.typed.set(withTurn(this.typed(), turn, newestK, this.step, this.nowMs()));
+    // The wait begins: what counts down comes into sight.
+    setTimeout(() => {
+      this.host.nativeElement.querySelector('app-wait-timer')?.scrollIntoView({ block: 'center' });
+    });
   }
 
   protected takeBackTurn(): void {

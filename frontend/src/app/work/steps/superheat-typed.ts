@@ -59,6 +59,8 @@ export interface TypedSuperheat {
   readonly takenAt: NonNullable<SuperheatAnswer['takenAt']>;
   readonly lineDrop: string;
   readonly instruments: TypedInstruments;
+  /** When the as-left was typed last, by the phone's clock. */
+  readonly leftAtMs?: number;
 }
 
 const EMPTY_PAIR: TypedPair = { pressure: '', temperature: '' };

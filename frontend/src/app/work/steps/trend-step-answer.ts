@@ -1,4 +1,5 @@
 import { MOST_SAMPLES, type TrendAnswer, type TrendStep } from '#shared/checklist/kinds/trend';
+import { physicalDoubt } from '#shared/checklist/physical-range';
 import { reduceSamples } from '#shared/refrigeration/logger/reduce-samples';
 import { roundTo } from '#shared/units/round';
 import type { PickedLog } from '../logger/log-choice';
@@ -27,9 +28,12 @@ interface Samples {
   readonly values: Float64Array;
 }
 
+/** Loggers write figures such as −999 where a probe was missing: what no instrument shows is no reading. */
+const isTemperature = (value: number): boolean => physicalDoubt('temperature', value) === null;
+
 const readable = ({ times, values }: Samples): Samples => ({
-  times: times.filter((_, index) => !Number.isNaN(values[index])),
-  values: values.filter((value) => !Number.isNaN(value)),
+  times: times.filter((_, index) => isTemperature(values[index] ?? NaN)),
+  values: values.filter(isTemperature),
 });
 
 function lastDays({ times, values }: Samples): Samples {
@@ -96,4 +100,20 @@ export function trendAnswerOf(
     },
     fitting,
   };
+}
+
+/** Dates that can be read in one way only: year first, or a day beyond the twelfth after the month. */
+const CLEAR_DATE = /^(\d{4}-\d\d-\d\d|\d{1,2}\/(1[3-9]|2\d|3[01])\/\d{4})\b/;
+/** Clocks of loggers and phones are an hour apart after a change of summer time. */
+const CLOCK_ROOM_MS = 2 * 3_600_000;
+
+/**
+ * Whether a log ends later than now, as with a file of another year or a logger whose clock is wrong.
+ *
+ * @returns `false` where its dates can't be read for sure
+ */
+export function endsInFuture({ startText, atS }: TrendAnswer, nowMs: number): boolean {
+  if (!CLEAR_DATE.test(startText)) return false;
+  const endMs = Date.parse(startText.replace(/^(\d{4}-\d\d-\d\d) /, '$1T')) + 1000 * (atS.at(-1) ?? 0);
+  return Number.isFinite(endMs) && endMs > nowMs + CLOCK_ROOM_MS;
 }

@@ -5,6 +5,7 @@ import type { TrendAnswer } from '#shared/checklist/kinds/trend';
 import { readLogger } from '#shared/refrigeration/logger/read-logger';
 import { PULL_DOWN, TREND_STEP, trendAnswer } from '../../ui/trend-chart/trend.fixture';
 import { withWords } from '../../ui/words/with-words.fixture';
+import { NOW_MS } from '../coil-walk/phone-clock';
 import type { LogReading, LogStage } from '../logger/log-reading';
 import { LoggerReader } from '../logger/logger-reader';
 import { SEQUENCE } from '../sequence/sequence.fixture';
@@ -27,7 +28,11 @@ async function open(previous: TrendAnswer | null, reading: LogReading) {
   const read = (): Observable<LogStage> => of({ kind: 'done', reading });
   TestBed.configureTestingModule({
     imports: [TrendStep, withWords()],
-    providers: [StepDraft, { provide: LoggerReader, useValue: { read } }],
+    providers: [
+      StepDraft,
+      { provide: LoggerReader, useValue: { read } },
+      { provide: NOW_MS, useValue: () => Date.parse('2027-06-01T12:00:00') },
+    ],
   });
   const draft = TestBed.inject(StepDraft);
   draft.open({
@@ -63,6 +68,17 @@ describe('TrendStep', () => {
     expect(text()).toContain('Above it for up to 30 min is allowed');
     expect(draft.answer()).toBeNull();
     expect(draft.lacking()).toBe('log');
+  });
+
+  it('takes no log that ends in the future', async () => {
+    const rows = (from: string, to: string): string => `Time,Air (°F)\n${from},38\n${to},38`;
+    const future = await open(null, readingOf(rows('2027-06-02 08:00', '2027-06-02 08:10')));
+    await future.choose();
+    expect([future.draft.answer(), future.draft.lacking()]).toEqual([null, 'logInFuture']);
+    TestBed.resetTestingModule();
+    const today = await open(null, readingOf(rows('2027-06-01 08:00', '2027-06-01 08:10')));
+    await today.choose();
+    expect(today.draft.answer()).not.toBeNull();
   });
 
   it('judges a file as soon as it is chosen', async () => {

@@ -6,11 +6,12 @@ import { formatQuantity } from '#shared/units/format';
 import { TextOf } from '../../ui/text-of';
 import { TrendView } from '../../ui/trend-chart/trend-view';
 import { readingLanguage } from '../../ui/words/reading-language';
+import { NOW_MS } from '../coil-walk/phone-clock';
 import type { PickedLog, WantedColumn } from '../logger/log-choice';
 import { LoggerPicker } from '../logger/logger-picker';
 import { LiveJudgement } from './live-judgement';
 import { StepDraft } from './step-draft';
-import { trendAnswerOf, WHOLE, type Fitting } from './trend-step-answer';
+import { endsInFuture, trendAnswerOf, WHOLE, type Fitting } from './trend-step-answer';
 import { WantedLimits } from './wanted-limits';
 
 const DAY_S = 86_400;
@@ -35,6 +36,7 @@ export class TrendStep {
     { initialValue: '' },
   );
   private readonly language = readingLanguage();
+  private readonly nowMs = inject(NOW_MS);
   protected readonly draft = inject(StepDraft);
   protected readonly step = this.draft.stepOf('trend');
   protected readonly typed = this.draft.form<TypedTrend>({
@@ -52,7 +54,12 @@ export class TrendStep {
   ]);
 
   constructor() {
-    effect(() => this.draft.propose(this.answer(), 'log'));
+    effect(() => {
+      const answer = this.answer();
+      // A log of tomorrow proves nothing about today.
+      const isEarly = answer !== null && endsInFuture(answer, this.nowMs());
+      this.draft.propose(isEarly ? null : answer, isEarly ? 'logInFuture' : 'log');
+    });
   }
 
   protected take(log: PickedLog | null): void {
