@@ -178,6 +178,8 @@ describe('a package that can’t be built', () => {
     const { jobs, transactions } = server.services;
     const created = await request();
     const id = created.body.id as PackageId;
+    // Its own job is through with it first, or it would issue what is broken next.
+    await until(async () => (await show(id)).state === 'issued');
     await server.sql(
       `UPDATE handover_package SET state = 'building', heads = 'no json', issued_at = NULL WHERE id = ?`,
       [id],
