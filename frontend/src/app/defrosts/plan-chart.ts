@@ -143,6 +143,12 @@ export class PlanChart {
     this.drag = null;
   }
 
+  /** By its name: the keys then work on its first defrost, as the help says. */
+  protected chooseRow(id: CircuitId): void {
+    this.chooseCircuit.emit(id);
+    this.focusChosen();
+  }
+
   private focusChosen(): void {
     afterNextRender(
       () => {

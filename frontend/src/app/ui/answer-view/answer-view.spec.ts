@@ -182,7 +182,7 @@ describe('AnswerView', () => {
     const root = (await render(TREND_STEP, entryOf(TREND_STEP, PULL_DOWN))).nativeElement as HTMLElement;
     const text = root.textContent.replace(/\s+/g, ' ');
     expect(text).toContain('box 7.csv');
-    expect(text).toContain('217 of 217 rows recorded');
+    expect(text).toContain('217 of 217 rows read');
     expect(text).toContain('Column: Air (°F)');
     expect(text).toContain('Reached the band and held it.');
     expect(root.querySelector('app-trend-chart path')?.getAttribute('d')).toMatch(/^M0\.0 /);

@@ -34,6 +34,7 @@ import { SequenceStore } from './sequence-store';
               [entry]="entry"
               [unitSystem]="unitSystem()"
               [photoUrl]="photoUrl()"
+              [timeZone]="timeZone()"
               (openPhoto)="openPhoto.emit({ entry, index: $event })"
             />
           </article>

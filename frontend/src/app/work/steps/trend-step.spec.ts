@@ -90,7 +90,7 @@ describe('TrendStep', () => {
     expect(answer.temperatureK[0]).toBeCloseTo(294.26, 9);
     expect(draft.judgement()).toMatchObject({ outcome: 'within', verdicts: ['trend_held'] });
     expect(text()).toContain('Reached the band and held it.');
-    expect(text()).toContain('181 of 181 rows recorded');
+    expect(text()).toContain('181 of 181 rows read');
     expect(root.querySelector('app-working-slip details')).not.toBeNull();
   });
 
