@@ -45,7 +45,6 @@ export const DOUBT_KINDS = [
   'wrongRefrigerant',
   'massDoesNotFollow',
   'wrongWay',
-  'withinError',
   'readTooSoon',
   'barometerSeaLevel',
   'barometerFarOff',

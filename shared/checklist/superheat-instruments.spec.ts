@@ -283,6 +283,16 @@ describe('superheat read after a turn of the valve', () => {
     expect(kinds(turned())).not.toContain('ask readTooSoon');
   });
 
+  it('is asked about when nobody recorded it as found, for then nothing says what the turn did', () => {
+    expect(kinds(turned(900))).toContain('ask asFoundMissing');
+    expect(turned(900).counts).toBe(true);
+    const turns = [{ turns: 0.25, direction: 'clockwise' as const, at: '2027-01-15T12:00:00Z' }];
+    expect(kinds(judgeFor({ ...STEADY, turns, asFound: STEADY.asLeft }, [5, 7]))).not.toContain(
+      'ask asFoundMissing',
+    );
+    expect(kinds(judgeFor(STEADY, [5, 7]))).not.toContain('ask asFoundMissing');
+  });
+
   it('is not judged by a line drop that no working line has', () => {
     const drop = (psi: string) =>
       judgeFor({ ...STEADY, takenAt: 'elsewhere', lineDrop: { text: psi, unit: 'psi_diff' } }, [5, 7]);

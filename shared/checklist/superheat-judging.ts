@@ -53,7 +53,7 @@ export function judgeSuperheatAnswer(
   const found = answer.asFound ? observe(answer.asFound, scene, foundDoubts) : null;
   // An as-found that can't be read is asked about; it doesn't keep the as-left from counting.
   doubts.push(...foundDoubts.map((doubt) => ({ ...doubt, severity: 'ask' as const })));
-  doubts.push(...conditionDoubts(answer), ...settlingDoubts(left), ...waitDoubts(step, answer));
+  doubts.push(...conditionDoubts(answer), ...settlingDoubts(left), ...turnDoubts(step, answer));
 
   const mean = meanOf(step, left);
   const band = { low: kelvinDifference(step.band.lowK), high: kelvinDifference(step.band.highK) };
@@ -88,7 +88,6 @@ function meanOf(step: SuperheatStep, observed: Observed): KelvinDifference {
   return step.judgedBy === 'timeWeighted' ? (observed.timeWeighted ?? observed.midpoint) : observed.midpoint;
 }
 
-/** What the line loses, in pascals; `null` when it was read elsewhere and the loss can't be read. */
 /** A sea-level reading at a mountain store is worth several degrees; weather out of the ordinary is only asked about. */
 const BAROMETER_DOUBTS = {
   seaLevelCorrected: { kind: 'barometerSeaLevel', severity: 'refuse' },
@@ -112,6 +111,7 @@ function readAtmosphere({ instruments }: SuperheatAnswer, facts: SequenceFacts, 
 /** 5 psi: more than a suction line that works loses; manuals allow about 2. Common practice, no source. */
 const MOST_LINE_DROP_PA = 34_474;
 
+/** What the line loses, in pascals; `null` when it was read elsewhere and the loss can't be read. */
 function readLineDrop(answer: SuperheatAnswer, doubts: Doubt[]): number | null {
   if (answer.takenAt !== 'elsewhere') return 0;
   const drop = answer.lineDrop ? readTypedValue(answer.lineDrop, 'pressureDifference') : null;
@@ -132,10 +132,17 @@ function conditionDoubts({ conditions }: SuperheatAnswer): Doubt[] {
   return areMet ? [] : [{ kind: 'preliminary', severity: 'keep' }];
 }
 
-/** A reading right after a turn shows the turn, not the setting; it counts, and the lead sees it. */
-function waitDoubts(step: SuperheatStep, { turns = [], waitedS }: SuperheatAnswer): Doubt[] {
-  if (turns.length === 0 || waitedS === undefined) return [];
-  return waitedS < (step.waitS ?? DEFAULT_WAIT_S) ? [{ kind: 'readTooSoon', severity: 'ask' }] : [];
+/**
+ * A reading right after a turn shows the turn, not the setting; and a turned valve without a superheat as found leaves
+ * nothing to say what the turn did. Both count, and the lead sees them.
+ */
+function turnDoubts(step: SuperheatStep, { turns = [], waitedS, asFound }: SuperheatAnswer): Doubt[] {
+  if (turns.length === 0) return [];
+  const isTooSoon = waitedS !== undefined && waitedS < (step.waitS ?? DEFAULT_WAIT_S);
+  return [
+    ...(asFound ? [] : [{ kind: 'asFoundMissing', severity: 'ask' } as const]),
+    ...(isTooSoon ? [{ kind: 'readTooSoon', severity: 'ask' } as const] : []),
+  ];
 }
 
 /** A series that shows that the valve hasn't settled is a true record of that, and no setting to sign off. */

@@ -105,9 +105,8 @@ export const DOUBT_WORDS: Readonly<Record<DoubtKind, Text>> = {
     en: 'The barometer reading is far from what this elevation gives.',
     es: 'La lectura del barómetro está lejos de lo que da esta altitud.',
   },
-  withinError: {
-    en: 'Within the instruments’ error of a limit.',
-    es: 'Dentro del error de los instrumentos respecto a un límite.',
+  asFoundMissing: {
+    en: 'The valve was turned, and nobody recorded the superheat as found.',
+    es: 'Se movió la válvula y nadie anotó el sobrecalentamiento como se encontró.',
   },
-  asFoundMissing: { en: 'Nobody recorded it as found.', es: 'Nadie anotó cómo estaba.' },
 };
