@@ -169,7 +169,9 @@ describe('DefrostPage', () => {
     ]);
     const { root, bars, key } = await open({ newest });
     expect(root.textContent).toContain('This plan breaks none of its rules.');
+    expect(root.textContent).not.toContain('Save with its broken rules');
     await key(bars()[0], 'ArrowRight', true);
+    expect(root.textContent).toContain('Save with its broken rules');
     expect(root.textContent).not.toContain('This plan breaks none of its rules.');
     expect(root.querySelector('.breaches')?.textContent).toContain(
       '06:00: A1, A2 start 0 min apart, at least 15 min is asked.',
