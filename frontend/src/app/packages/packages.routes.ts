@@ -2,6 +2,8 @@ import type { Routes } from '@angular/router';
 
 /** One handover package, for whoever may read it. */
 export const PACKAGES_ROUTES: Routes = [
+  // A link cut short leads to where the reader's packages are, not to an empty page.
+  { path: '', pathMatch: 'full', redirectTo: '/' },
   { path: ':packageId', loadComponent: async () => (await import('./package-page')).PackagePage },
 ];
 
